@@ -1,0 +1,17 @@
+import type { CapDiagnosis, Cylinder } from '../contracts/calculations.js';
+import type { WiringStep } from '../contracts/steps.js';
+import { capDiagnosis } from '../ignition/cap-diagnosis.js';
+
+/** What is fitted at each outlet against the map that the step requires. */
+export function diagnoseWiring(
+  definition: WiringStep,
+  fitted: Readonly<Record<string, Cylinder>>,
+): CapDiagnosis {
+  return capDiagnosis({
+    cap: definition.cap,
+    fitted,
+    fittedBy: 'outlet',
+    valveTiming: definition.valveTiming,
+    advance: definition.advance,
+  });
+}
