@@ -55,8 +55,10 @@ function leadingPlace(value: number): number {
  * down. A reading in that unit that passes the rounded limit passes the original one too.
  * Throws `InputError` as `convert`. Example: high 27 lbf·ft at one decimal is 36.6 N·m.
  */
-export function roundInwards(limit: Quantity, to: Unit, digits: number, side: 'low' | 'high'): Quantity {
+export function roundInwards(limit: Quantity, to: Unit, places: number, side: 'low' | 'high'): Quantity {
   const exact = convert(limit, to).value;
+  // A double holds no more than fifteen decimal digits.
+  const digits = Math.min(places, 15 - leadingPlace(exact));
   const inwards = side === 'low' ? ceilTo : floorTo;
   const isGood = (value: number): boolean => {
     const beyond = toSi({ value, unit: to }) - toSi(limit);
