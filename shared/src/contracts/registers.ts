@@ -14,6 +14,7 @@ export const toolKinds = [
   'straight-edge',
   'burette',
   'multimeter',
+  'pressure-gauge',
 ] as const;
 export type ToolKind = (typeof toolKinds)[number];
 

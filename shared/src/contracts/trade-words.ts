@@ -3,6 +3,7 @@ import type { Dialect } from './people.js';
 /** Pairs of trade words. A shop works in one column; quoted sources are never touched. */
 export const tradeWords = {
   clearance: ['clearance', 'lash'],
+  clearances: ['clearances', 'lash'],
   follower: ['follower', 'lifter'],
   followers: ['followers', 'lifters'],
   inlet: ['inlet', 'intake'],
@@ -22,6 +23,7 @@ export const tradeWords = {
   'gudgeon pin': ['gudgeon pin', 'wrist pin'],
   spanner: ['spanner', 'wrench'],
   anticlockwise: ['anticlockwise', 'counter-clockwise'],
+  'gudgeon pins': ['gudgeon pins', 'wrist pins'],
   earth: ['earth', 'ground'],
   snag: ['snag', 'problem'],
   snags: ['snags', 'problems'],
