@@ -1,0 +1,29 @@
+// @ts-check
+// Processes that a killed run has left behind.
+import { readFileSync } from 'node:fs';
+import { setTimeout as pause } from 'node:timers/promises';
+import { apiMain } from './places.js';
+
+/** @param {number} pid */
+const commandOf = (pid) => {
+  try {
+    return readFileSync(`/proc/${pid}/cmdline`, 'utf8').split('\0');
+  } catch {
+    return [];
+  }
+};
+
+/** Whether the process is one of these scripts at work. @param {number} pid */
+export const isScript = (pid) => commandOf(pid).some((part) => /scripts\/(start|dev)\.js$/.test(part));
+
+/** Ends an api process of this clone that nobody looks after any more. @param {number} pid */
+export const endLeftOver = async (pid) => {
+  const isOurs = () => commandOf(pid).includes(apiMain);
+  if (!isOurs()) return;
+  process.kill(pid, 'SIGTERM');
+  const forceAt = Date.now() + 5000;
+  while (isOurs()) {
+    await pause(50);
+    if (Date.now() > forceAt && isOurs()) process.kill(pid, 'SIGKILL');
+  }
+};
