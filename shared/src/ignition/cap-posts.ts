@@ -2,7 +2,7 @@ import type { CapPost, Rotation } from '../contracts/calculations.js';
 import { InputError } from '../contracts/input-error.js';
 import { requireList, requireNumber, requireRecord } from '../quantities/require.js';
 import { requireName } from './firing-order.js';
-import { shown } from './words.js';
+import { named } from './words.js';
 
 /** Two posts nearer than this stand at one angle, degrees. */
 const sameAngle = 1e-6;
@@ -35,14 +35,14 @@ function requirePost(input: unknown, field: string): CapPost {
 
 function refuseTwins(post: CapPost, before: readonly CapPost[], field: string): void {
   if (before.some((other) => other.post === post.post)) {
-    throw new InputError(`${field}.post`, `Post ${shown(post.post)} is already in the list.`);
+    throw new InputError(`${field}.post`, `Post ${named(post.post)} is already in the list.`);
   }
   const twin = before.find((other) => {
     const apart = Math.abs(other.angle - post.angle);
     return Math.min(apart, 360 - apart) < sameAngle;
   });
   if (twin !== undefined) {
-    throw new InputError(`${field}.angle`, `Post ${shown(twin.post)} stands at this angle already.`);
+    throw new InputError(`${field}.angle`, `Post ${named(twin.post)} stands at this angle already.`);
   }
 }
 

@@ -2,7 +2,7 @@ import type { CapPost } from '../contracts/calculations.js';
 import { InputError } from '../contracts/input-error.js';
 import { requireRecord } from '../quantities/require.js';
 import { requireName } from './firing-order.js';
-import { listed, shown } from './words.js';
+import { listed, named } from './words.js';
 
 /**
  * An unknown input as a trace: which outlet each post is joined to inside the cap, every post named and one
@@ -18,7 +18,7 @@ export function requireTrace(
   const names = posts.map(({ post }) => post);
   const stranger = Object.keys(given).find((post) => !names.includes(post));
   if (stranger !== undefined) {
-    throw new InputError(field, `The cap has no post “${shown(stranger)}”; its posts are ${listed(names)}.`);
+    throw new InputError(field, `The cap has no post “${named(stranger)}”; its posts are ${listed(names)}.`);
   }
   const missing = names.filter((post) => given[post] === undefined);
   if (missing.length > 0) {
@@ -29,10 +29,10 @@ export function requireTrace(
     const outlet = requireName(given[post], `${field}.${post}`);
     const other = names.find((one) => trace.get(one) === outlet);
     if (other !== undefined) {
-      const both = `posts ${shown(other)} and ${shown(post)}`;
+      const both = `posts ${named(other)} and ${named(post)}`;
       throw new InputError(
         `${field}.${post}`,
-        `Each post has an outlet of its own; ${both} both lead to ${shown(outlet)}.`,
+        `Each post has an outlet of its own; ${both} both lead to ${named(outlet)}.`,
       );
     }
     trace.set(post, outlet);

@@ -38,7 +38,7 @@ function onOpenInlet(cylinders: readonly Cylinder[], known: boolean): readonly s
   if (cylinders.length === 0) return [];
   const open = known ? 'the inlet valve open' : 'the inlet valve probably open';
   return [
-    `The spark of ${cylindersNamed(cylinders)} comes with ${open}: ` +
+    `${sparksOf(cylinders)} with ${open}: ` +
       'it can flash back through the carburettor. Keep face, hands and fuel away from it.',
   ];
 }
@@ -46,7 +46,12 @@ function onOpenInlet(cylinders: readonly Cylinder[], known: boolean): readonly s
 function wellBeforeTdc(cylinders: readonly Cylinder[]): readonly string[] {
   if (cylinders.length === 0) return [];
   return [
-    `The spark of ${cylindersNamed(cylinders)} comes on the compression stroke, well before TDC: ` +
+    `${sparksOf(cylinders)} on the compression stroke, well before TDC: ` +
       'the engine can kick back and throw the crank backwards. Keep hands off a starting handle.',
   ];
+}
+
+function sparksOf(cylinders: readonly Cylinder[]): string {
+  const [spark, comes] = cylinders.length === 1 ? ['spark', 'comes'] : ['sparks', 'come'];
+  return `The ${spark} of ${cylindersNamed(cylinders)} ${comes}`;
 }

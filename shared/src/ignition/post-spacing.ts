@@ -1,6 +1,6 @@
 import { turnBetween } from './cap-posts.js';
 import type { ResolvedCap } from './resolve-cap.js';
-import { counted, degrees, shown } from './words.js';
+import { counted, degrees, named } from './words.js';
 
 /** How far the posts' spacing may differ from the firing intervals, degrees of distributor. */
 export const spacingTolerance = 2;
@@ -30,7 +30,7 @@ export function spacingDoubt(cap: ResolvedCap): string | null {
   if (worst === undefined) return null;
   const { from, to, gap, crank, wanted } = worst;
   return (
-    `The posts are not spaced as the engine fires: from post ${shown(from)} to post ${shown(to)} ` +
+    `The posts are not spaced as the engine fires: from post ${named(from)} to post ${named(to)} ` +
     `the cap has ${degrees(gap)}, and ${degrees(crank)} of crank between the sparks needs ${degrees(wanted)} ` +
     `of distributor (${spacingTolerance}° either way is allowed; ${counted(wrong.length, 'gap')} of ` +
     `${gaps.length} out). An engine that fires unevenly needs a cap spaced to match: check ` +

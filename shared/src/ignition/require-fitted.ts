@@ -2,7 +2,7 @@ import type { Cylinder } from '../contracts/calculations.js';
 import { InputError } from '../contracts/input-error.js';
 import { requireRecord } from '../quantities/require.js';
 import type { ResolvedCap } from './resolve-cap.js';
-import { listed, shown } from './words.js';
+import { listed, named } from './words.js';
 
 /**
  * An unknown input as what is fitted: every post, or every outlet, with its cylinder, one to one.
@@ -22,7 +22,7 @@ export function requireFitted(
   if (stranger !== undefined) {
     throw new InputError(
       field,
-      `The cap has no ${fittedBy} “${shown(stranger)}”; its ${fittedBy}s are ${listed(places)}.`,
+      `The cap has no ${fittedBy} “${named(stranger)}”; its ${fittedBy}s are ${listed(places)}.`,
     );
   }
   const empty = places.filter((name) => given[name] === undefined);
@@ -36,8 +36,8 @@ export function requireFitted(
     const cylinder = requireCylinder(given[name], cap.order, path);
     const other = cap.rows.find(({ post }) => fitted.get(post) === cylinder)?.[fittedBy];
     if (other !== undefined) {
-      const both = `${fittedBy} ${shown(other)} and ${fittedBy} ${shown(name)}`;
-      throw new InputError(path, `A cylinder has one lead; ${shown(cylinder)} is on ${both}.`);
+      const both = `${fittedBy} ${named(other)} and ${fittedBy} ${named(name)}`;
+      throw new InputError(path, `A cylinder has one lead; ${named(cylinder)} is on ${both}.`);
     }
     fitted.set(row.post, cylinder);
   }

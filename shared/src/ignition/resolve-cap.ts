@@ -5,7 +5,7 @@ import { asRotorMeets, requirePosts } from './cap-posts.js';
 import { requireTrace } from './cap-trace.js';
 import { requireIntervals, type FiringIntervals } from './firing-intervals.js';
 import { requireFiringOrder, requireName } from './firing-order.js';
-import { listed, shown } from './words.js';
+import { listed, named } from './words.js';
 
 const rotations: readonly Rotation[] = ['clockwise', 'anticlockwise'];
 const sides: readonly Side[] = ['cap', 'drive'];
@@ -61,7 +61,7 @@ function requireFirstPost(input: unknown, posts: readonly CapPost[], field: stri
   const first = posts.find(({ post }) => post === name);
   if (first !== undefined) return first;
   const all = listed(posts.map(({ post }) => post));
-  throw new InputError(field, `The cap has no post “${shown(name ?? '')}”; its posts are ${all}.`);
+  throw new InputError(field, `The cap has no post “${named(name ?? '')}”; its posts are ${all}.`);
 }
 
 /** The other way round. */

@@ -2,13 +2,13 @@ import type { Cylinder } from '../contracts/calculations.js';
 import { clip } from '../quantities/clip.js';
 
 /** A cylinder's, post's or outlet's name as it stands in a sentence: a very long one is cut. */
-export function shown(name: string | number): string {
+export function named(name: string | number): string {
   return clip(String(name));
 }
 
 /** `1`, `1 and 3`, `1, 3 and 4`. */
 export function listed(names: readonly (string | number)[]): string {
-  const all = names.map(shown);
+  const all = names.map(named);
   const last = all.pop();
   if (last === undefined) return 'none';
   return all.length === 0 ? last : `${all.join(', ')} and ${last}`;
@@ -21,7 +21,7 @@ export function cylindersNamed(cylinders: readonly Cylinder[]): string {
 
 /** A firing order as the trade writes it: `1-3-4-2`. */
 export function orderNamed(order: readonly Cylinder[]): string {
-  return order.map(shown).join('-');
+  return order.map(named).join('-');
 }
 
 /** `1 post`, `2 posts`. */

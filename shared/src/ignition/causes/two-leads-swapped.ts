@@ -1,4 +1,4 @@
-import { lateness, shown } from '../words.js';
+import { lateness, named } from '../words.js';
 import { misplaced, type FittedLead } from '../wiring.js';
 import type { Cause } from './cause.js';
 
@@ -10,12 +10,13 @@ export const twoLeadsSwapped: Cause = {
     const [one, other] = misplaced(wiring);
     if (one === undefined || other === undefined) return 'Two leads are on each other’s posts.';
     return (
-      `The leads of cylinders ${shown(one.cylinder)} and ${shown(other.cylinder)} are on each other’s posts, ` +
-      `${shown(other.own.post)} and ${shown(one.own.post)}; all others are right. ` +
+      `Two leads are exchanged, all others are right: the lead of cylinder ${named(one.cylinder)} is on ` +
+      `cylinder ${named(other.cylinder)}’s post, ${named(other.own.post)}, and that of cylinder ` +
+      `${named(other.cylinder)} on cylinder ${named(one.cylinder)}’s, ${named(one.own.post)}. ` +
       `In degrees of crank, ${sparkOf(one)} and ${sparkOf(other)}.`
     );
   },
 };
 
 const sparkOf = ({ cylinder, late }: FittedLead): string =>
-  `cylinder ${shown(cylinder)} gets its spark ${lateness(late)}`;
+  `cylinder ${named(cylinder)} gets its spark ${lateness(late)}`;

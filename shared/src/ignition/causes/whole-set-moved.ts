@@ -1,7 +1,7 @@
 import { turnBetween } from '../cap-posts.js';
 import { spacingTolerance } from '../post-spacing.js';
 import { lateBy } from '../spark-position.js';
-import { counted, degrees, isWholeTurn, lateness, listed, shown } from '../words.js';
+import { counted, degrees, isWholeTurn, lateness, listed, named } from '../words.js';
 import type { Wiring } from '../wiring.js';
 import type { Cause } from './cause.js';
 
@@ -27,8 +27,8 @@ function whereItStands({ leads }: Wiring, k: number): string {
   const where =
     first === undefined
       ? ''
-      : `: the lead of cylinder ${shown(first.cylinder)} is on post ${shown(first.on.post)} ` +
-        `and belongs on post ${shown(first.own.post)}`;
+      : `: the lead of cylinder ${named(first.cylinder)} is on post ${named(first.on.post)} ` +
+        `and belongs on post ${named(first.own.post)}`;
   return `The leads are in the right order, but the whole set stands ${counted(k, 'post')} on in the rotor’s direction${where}.`;
 }
 
@@ -41,7 +41,7 @@ function whatComesOfIt(wiring: Wiring): string {
     );
   }
   if (late !== null) return `Every spark comes ${lateness(late)}, in degrees of crank.`;
-  const each = wiring.leads.map((lead) => `cylinder ${shown(lead.cylinder)} ${lateness(lead.late)}`);
+  const each = wiring.leads.map((lead) => `cylinder ${named(lead.cylinder)} ${lateness(lead.late)}`);
   return `The engine fires unevenly, so the sparks come differently wrong: ${listed(each)}.`;
 }
 
@@ -59,8 +59,8 @@ function cure(wiring: Wiring, k: number): string {
   const look =
     seen === undefined
       ? ''
-      : ` Before moving anything, bring cylinder ${shown(seen.cylinder)} to its firing point on compression: ` +
-        `if the rotor then points to post ${shown(seen.on.post)}, the leads suit the drive as it stands.`;
+      : ` Before moving anything, bring cylinder ${named(seen.cylinder)} to its firing point on compression: ` +
+        `if the rotor then points to post ${named(seen.on.post)}, the leads suit the drive as it stands.`;
   return `${leads} Or leave the leads and turn the distributor instead: ${turning(turn)}.${look}`;
 }
 
@@ -71,8 +71,8 @@ function turning(turn: number): string {
   }
   const against = turn < 180;
   const angle = degrees(against ? turn : 360 - turn);
-  const body = `its body ${angle} ${against ? 'against' : 'with'} the rotor’s direction, where it has the room`;
-  return `${body}, or its drive ${angle} ${against ? 'with' : 'against'} it`;
+  const [body, drive] = against ? ['against', 'with'] : ['with', 'against'];
+  return `its body ${angle} ${body} the way the rotor turns, where it has the room, or its drive ${angle} ${drive} it`;
 }
 
 /** What every spark is late by, if it is the same for all; else null. */
