@@ -110,9 +110,10 @@ function digitsToShow(figures: Figures, spare: number): number {
   const { reading, limits, uncertainty } = figures;
   const [low, high] = limits;
   const band = low !== undefined && high !== undefined ? high.at - low.at : uncertainty;
-  const most = digitsFor({ tolerance: band > 0 ? band : Math.abs(reading.value) / 1000 });
+  const most = digitsFor({ tolerance: band > 0 ? band : Math.abs(reading.value) });
   const isMixed = givenFigures(figures).some(({ unit }) => unit !== reading.unit);
-  const digits = isMixed ? most : Math.min(decimalsWritten(figures), most);
+  // Figures are shown as they were typed, but not the long tail of one that was converted before.
+  const digits = isMixed ? most : Math.min(decimalsWritten(figures), most + 3);
   return spare > 0 ? Math.max(digits, Math.min(9, placesToFirstDigit(spare))) : digits;
 }
 

@@ -26,10 +26,15 @@ export function kindOf(unit: Unit): Kind {
  * Source: NIST SP 811 (2008) App. B, by its exact definitions. Example: 27 lbf·ft is 36.607 084 6… N·m.
  */
 export function convert(quantity: Quantity, to: string): Quantity {
-  const { from, target, kind } = pair(quantity, to);
-  const value = scale(quantity.value).from(from).to(target);
+  const { from, kind } = pair(quantity, to);
   if (kind === 'temperature') refuseBelowAbsoluteZero(quantity.value, from, 'quantity.value');
-  return { value, unit: target };
+  return rescale(quantity, to);
+}
+
+/** As `convert`, of temperatures below absolute zero too: a rounded limit may step there. */
+export function rescale(quantity: Quantity, to: string): Quantity {
+  const { from, target } = pair(quantity, to);
+  return { value: scale(quantity.value).from(from).to(target), unit: target };
 }
 
 /**

@@ -1,5 +1,5 @@
 import type { Quantity, Unit } from '../contracts/quantity.js';
-import { convert, toSi } from './convert.js';
+import { convert, rescale, toSi } from './convert.js';
 import { ceilTo, floorTo, roundTo } from './round.js';
 
 const thinSpace = '\u2009';
@@ -62,7 +62,7 @@ export function roundInwards(limit: Quantity, to: Unit, places: number, side: 'l
   const inwards = side === 'low' ? ceilTo : floorTo;
   const isGood = (value: number): boolean => {
     const beyond = toSi({ value, unit: to }) - toSi(limit);
-    const beyondBack = convert({ value, unit: to }, limit.unit).value - limit.value;
+    const beyondBack = rescale({ value, unit: to }, limit.unit).value - limit.value;
     return side === 'low' ? Math.min(beyond, beyondBack) >= 0 : Math.max(beyond, beyondBack) <= 0;
   };
   // A value that only floating point keeps off the grid is not pushed a whole step in.
