@@ -19,7 +19,7 @@ export const causes: Readonly<Record<WiringCause, Cause>> = {
   mixed,
 };
 
-/** The cause that is shown, which is the first in the contract's order of precedence, and the others that fit. */
+/** The cause that is named, which is the first in the contract's order of precedence, and the others that fit. */
 export function causesOf(wiring: Wiring): { cause: WiringCause; alsoFits: readonly WiringCause[] } {
   const [cause = 'mixed', ...others] = wiringCauses.filter((one) => causes[one].fits(wiring));
   // Every wrong wiring is mixed: that is said only where nothing better is.
