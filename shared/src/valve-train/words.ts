@@ -1,10 +1,11 @@
 import type { Cylinder } from '../contracts/calculations.js';
 import { degrees } from '../ignition/words.js';
+import { clip } from '../quantities/clip.js';
 import { anywhere, cycle, type Windows } from './windows.js';
 
 /** `No. 3`, or `cylinder L1` where the cylinders have labels. */
 export function nameOf(cylinder: Cylinder): string {
-  return typeof cylinder === 'number' ? `No. ${cylinder}` : `cylinder ${cylinder}`;
+  return typeof cylinder === 'number' ? `No. ${cylinder}` : `cylinder ${clip(cylinder)}`;
 }
 
 /** Windows of a cylinder's phase for a sentence: `350° to 10°` where one runs over 720°. */
