@@ -1,0 +1,25 @@
+import { ChangeDetectionStrategy, Component } from '@angular/core';
+
+/** The foot of a page at the stand: its one action, always in reach, above the keypad when that is up. */
+@Component({
+  selector: 'ss-foot',
+  changeDetection: ChangeDetectionStrategy.OnPush,
+  template: '<ng-content />',
+  styles: `
+    :host {
+      position: sticky;
+      bottom: var(--ss-keypad, 0);
+      z-index: 4;
+      display: flex;
+      flex-direction: column;
+      gap: var(--ss-2);
+      margin-top: auto;
+      padding: 10px var(--ss-4);
+      background: var(--ss-paper);
+      border-top: var(--ss-hair) solid var(--ss-rule);
+      --mat-button-filled-container-height: 56px;
+      --mat-button-filled-label-text-size: 18px;
+    }
+  `,
+})
+export class Foot {}

@@ -1,0 +1,27 @@
+import { DOCUMENT } from '@angular/common';
+import { inject, Injectable, signal } from '@angular/core';
+import { recall, remember } from '../remembered/remembered';
+
+/** Which keys type a reading: the page's own, or the device's. The person's choice on this device. */
+@Injectable({ providedIn: 'root' })
+export class OwnKeypad {
+  private readonly document = inject(DOCUMENT);
+  private readonly own = signal(firstChoice());
+
+  readonly isOwn = this.own.asReadonly();
+
+  choose(own: boolean): void {
+    this.own.set(own);
+    remember('keypad', own ? 'own' : 'device');
+  }
+
+  /** How much of the page's foot the keypad covers, so that the foot's action stays above it. */
+  cover(height: number): void {
+    this.document.documentElement.style.setProperty('--ss-keypad', `${height}px`);
+  }
+}
+
+function firstChoice(): boolean {
+  const chosen = recall('keypad');
+  return chosen === null ? matchMedia('(pointer: coarse)').matches : chosen === 'own';
+}

@@ -1,0 +1,85 @@
+import { HttpClient } from '@angular/common/http';
+import { computed, inject, Injectable, signal } from '@angular/core';
+import { Router } from '@angular/router';
+import type { Dialect, Session, SignInRequest } from '@second-spanner/shared/contracts/people';
+import { may, type Permission } from '@second-spanner/shared/contracts/permissions';
+import { catchError, finalize, map, of, shareReplay, tap, throwError, type Observable } from 'rxjs';
+import { ApiProblem } from '../http/api-problem';
+import { recall, remember } from '../remembered/remembered';
+
+const remembered = 'session';
+
+/** Who is signed in. Undefined until asked, null when nobody is. */
+@Injectable({ providedIn: 'root' })
+export class SessionStore {
+  private readonly http = inject(HttpClient);
+  private readonly router = inject(Router);
+  private readonly known = signal<Session | null | undefined>(undefined);
+  private renewing: Observable<Session> | null = null;
+
+  readonly session = this.known.asReadonly();
+  readonly person = computed(() => this.known()?.person ?? null);
+  readonly shop = computed(() => this.known()?.shop ?? null);
+  /** The person's own trade words, else the shop's. */
+  readonly dialect = computed<Dialect>(() => this.person()?.dialect ?? this.shop()?.dialect ?? 'british');
+
+  /** Whether the signed-in person's role may do this at all. */
+  may(permission: Permission): boolean {
+    const person = this.person();
+    return person !== null && may(person.role, permission);
+  }
+
+  /** Who is signed in, by the api; without a network, who last was on this device. */
+  load(): Observable<Session | null> {
+    return this.http.get<Session>('/api/session').pipe(
+      catchError((error: unknown) => {
+        if (!(error instanceof ApiProblem)) return throwError(() => error);
+        if (error.noNetwork) return of(lastSession());
+        return error.status === 401 ? of(null) : throwError(() => error);
+      }),
+      tap((session) => this.keep(session)),
+    );
+  }
+
+  signIn(request: SignInRequest): Observable<Session> {
+    return this.http.post<Session>('/api/session', request).pipe(tap((session) => this.keep(session)));
+  }
+
+  signOut(): Observable<void> {
+    return this.http.delete('/api/session').pipe(
+      map(() => undefined),
+      tap(() => this.keep(null)),
+    );
+  }
+
+  /** Renews the session; requests that fail together share one renewal. */
+  renew(): Observable<Session> {
+    this.renewing ??= this.http.post<Session>('/api/session/renewal', {}).pipe(
+      tap((session) => this.keep(session)),
+      finalize(() => (this.renewing = null)),
+      shareReplay(1),
+    );
+    return this.renewing;
+  }
+
+  prefer(dialect: Dialect | null): Observable<Session> {
+    return this.http.put<Session>('/api/preferences', { dialect }).pipe(tap((session) => this.keep(session)));
+  }
+
+  /** The session is over: on to the sign-in page, and back here afterwards. */
+  ended(): void {
+    if (this.known() === null) return;
+    this.keep(null);
+    void this.router.navigate(['/sign-in'], { queryParams: { to: this.router.url } });
+  }
+
+  private keep(session: Session | null): void {
+    this.known.set(session);
+    remember(remembered, session === null ? null : JSON.stringify(session));
+  }
+}
+
+function lastSession(): Session | null {
+  const text = recall(remembered);
+  return text === null ? null : (JSON.parse(text) as Session);
+}
