@@ -1,0 +1,57 @@
+import cookieParser from 'cookie-parser';
+import express, { Router, type Express } from 'express';
+import type { Logger } from 'pino';
+import type { Config } from './config.js';
+import { peopleRoutes, preferencesRoutes, sessionRoutes } from './people/people.routes.js';
+import type { Database } from './platform/database/database.js';
+import { errorHandler, unknownRoute } from './platform/errors/error-handler.js';
+import { compression, noStore, securityHeaders } from './platform/http/headers.js';
+import { healthRoutes } from './platform/http/health.routes.js';
+import { jsonBody } from './platform/http/json-body.js';
+import { generalLimit } from './platform/http/rate-limits.js';
+import { staticClient } from './platform/http/static-client.js';
+import { requestLog } from './platform/log.js';
+import { accessClaims, authentication } from './platform/signing-in/authentication.js';
+import { SessionCookies } from './platform/signing-in/cookies.js';
+import { xsrf } from './platform/signing-in/xsrf.js';
+import type { Services } from './services.js';
+
+export interface AppDependencies {
+  readonly config: Pick<
+    Config,
+    'secret' | 'publicUrl' | 'clientDir' | 'trustedProxies' | 'requestsPerMinute'
+  >;
+  readonly log: Logger;
+  readonly database: Database;
+  readonly services: Services;
+}
+
+/** The whole application as one request handler; it listens nowhere by itself. */
+export function createApp(deps: AppDependencies): Express {
+  const { config, log } = deps;
+  const app = express();
+  app.disable('x-powered-by');
+  app.set('etag', false);
+  app.set('trust proxy', config.trustedProxies);
+  app.use(requestLog(log), securityHeaders(config.publicUrl.protocol === 'https:'), compression());
+  app.use('/api', apiRoutes(deps));
+  if (config.clientDir !== null) app.use(staticClient(config.clientDir));
+  app.use(unknownRoute, errorHandler(log));
+  return app;
+}
+
+function apiRoutes({ config, database, services }: AppDependencies): Router {
+  const { sessions, people } = services;
+  const cookies = new SessionCookies(config.publicUrl);
+  const api = Router();
+  api.use(noStore);
+  api.use('/health', healthRoutes(database));
+  api.use(cookieParser(), accessClaims(config.secret, cookies), generalLimit(config.requestsPerMinute), xsrf);
+  api.use(authentication(services.readSession));
+  api.use(jsonBody);
+  api.use('/session', sessionRoutes(sessions, cookies));
+  api.use('/people', peopleRoutes(people));
+  api.use('/preferences', preferencesRoutes(people));
+  api.use(unknownRoute);
+  return api;
+}

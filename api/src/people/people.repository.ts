@@ -1,0 +1,68 @@
+import type { EntityManager } from 'typeorm';
+import type { Dialect, Role } from '@second-spanner/shared/contracts/people';
+import type { ShopScope } from '../platform/database/database.js';
+import { PersonEntity } from './person.entity.js';
+import { ShopEntity } from './shop.entity.js';
+
+/** What signing in needs to know of an account before its shop is known. */
+export interface Account {
+  readonly id: string;
+  readonly shopId: string;
+  readonly passwordHash: string;
+  readonly lockedAt: Date | null;
+}
+
+/** One shop and its people. */
+export class PeopleRepository {
+  constructor(private readonly scope: ShopScope) {}
+
+  /** Everybody by name, or only those of some roles and one person besides. */
+  async list(only?: { readonly roles: readonly Role[]; readonly orId: string }): Promise<PersonEntity[]> {
+    const query = this.scope.manager
+      .createQueryBuilder(PersonEntity, 'person')
+      .where('person.shop_id = :shopId', { shopId: this.scope.shopId })
+      .orderBy('person.name')
+      .addOrderBy('person.id');
+    if (only) query.andWhere('(person.role = ANY (:roles) OR person.id = :orId)', only);
+    return query.getMany();
+  }
+
+  async find(id: string): Promise<PersonEntity | null> {
+    return this.scope.manager.findOneBy(PersonEntity, { id, shopId: this.scope.shopId });
+  }
+
+  async passwordHash(id: string): Promise<string | null> {
+    const found = await this.scope.manager.findOne(PersonEntity, {
+      select: { id: true, passwordHash: true },
+      where: { id, shopId: this.scope.shopId },
+    });
+    return found?.passwordHash ?? null;
+  }
+
+  async setDialect(id: string, dialect: Dialect | null): Promise<void> {
+    await this.scope.manager.update(PersonEntity, { id, shopId: this.scope.shopId }, { dialect });
+  }
+
+  async insert(person: Omit<PersonEntity, 'shopId' | 'lockedAt' | 'dialect'>): Promise<void> {
+    await this.scope.manager.insert(PersonEntity, { ...person, shopId: this.scope.shopId });
+  }
+
+  async insertShop(shop: Omit<ShopEntity, 'id'>): Promise<void> {
+    await this.scope.manager.insert(ShopEntity, { ...shop, id: this.scope.shopId });
+  }
+}
+
+/** The account with an e-mail address, of whichever shop; through the door that is open for that address. */
+export async function findAccount(manager: EntityManager, email: string): Promise<Account | null> {
+  const rows: Account[] = await manager.query(
+    `SELECT id, shop_id AS "shopId", password_hash AS "passwordHash", locked_at AS "lockedAt"
+     FROM people WHERE email = $1`,
+    [email],
+  );
+  return rows[0] ?? null;
+}
+
+/** Whether there is any shop yet; through the door for setting up. */
+export async function anyShop(manager: EntityManager): Promise<boolean> {
+  return manager.createQueryBuilder(ShopEntity, 'shop').getExists();
+}

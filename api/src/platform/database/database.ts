@@ -1,0 +1,96 @@
+import type { DataSource, EntityManager, QueryRunner } from 'typeorm';
+import type { SheetChanged } from '@second-spanner/shared/contracts/sheets';
+
+/** What a repository is made from: one shop, on a connection that sees nothing but this shop. */
+export interface ShopScope {
+  readonly shopId: string;
+  readonly manager: EntityManager;
+  /** Told to everybody who looks at the sheet, once the transaction is committed. */
+  announce(change: SheetChanged): void;
+}
+
+/** Narrow doors through row-level security, each open for one transaction and one value. */
+export type Door = 'sign_in' | 'verification' | 'setup';
+
+type Announcer = (changes: readonly SheetChanged[]) => void;
+
+/** Shop by shop access to the database. */
+export class Database {
+  /** Which shop each connection is set to, so that an unchanged one costs nothing. */
+  private readonly shopOf = new WeakMap<object, string>();
+
+  constructor(
+    private readonly dataSource: DataSource,
+    private readonly announcer: Announcer = () => undefined,
+  ) {}
+
+  /** Work in one transaction: everything or nothing. */
+  async withShop<T>(shopId: string, work: (scope: ShopScope) => Promise<T>): Promise<T> {
+    const changes: SheetChanged[] = [];
+    const result = await this.onConnection(async (runner) => {
+      await this.setShop(runner, shopId);
+      return inTransaction(runner, () =>
+        work({ shopId, manager: runner.manager, announce: (change) => changes.push(change) }),
+      );
+    });
+    if (changes.length > 0) this.announcer(changes);
+    return result;
+  }
+
+  /** Reads without a transaction: for queries that stand each for itself. */
+  async readShop<T>(shopId: string, work: (scope: ShopScope) => Promise<T>): Promise<T> {
+    return this.onConnection(async (runner) => {
+      await this.setShop(runner, shopId);
+      return work({ shopId, manager: runner.manager, announce: refuseAnnouncement });
+    });
+  }
+
+  /** Reads through one narrow door: the rows that `value` names, of whichever shop. */
+  async through<T>(door: Door, value: string, work: (manager: EntityManager) => Promise<T>): Promise<T> {
+    return this.onConnection((runner) =>
+      inTransaction(runner, async () => {
+        await runner.query('SELECT set_config($1, $2, true)', [`second_spanner.${door}`, value]);
+        return work(runner.manager);
+      }),
+    );
+  }
+
+  /** Whether the database answers. */
+  async ping(): Promise<void> {
+    await this.dataSource.query('SELECT 1');
+  }
+
+  private async onConnection<T>(work: (runner: QueryRunner) => Promise<T>): Promise<T> {
+    const runner = this.dataSource.createQueryRunner();
+    try {
+      return await work(runner);
+    } finally {
+      await runner.release();
+    }
+  }
+
+  private async setShop(runner: QueryRunner, shopId: string): Promise<void> {
+    const connection: object = await runner.connect();
+    if (this.shopOf.get(connection) === shopId) return;
+    // Outside any transaction: a rollback would take the setting back unseen.
+    await runner.query(`SELECT set_config('second_spanner.shop', $1, false)`, [shopId]);
+    this.shopOf.set(connection, shopId);
+  }
+}
+
+async function inTransaction<T>(runner: QueryRunner, work: () => Promise<T>): Promise<T> {
+  await runner.startTransaction();
+  try {
+    const result = await work();
+    await runner.commitTransaction();
+    return result;
+  } catch (error) {
+    // The first error is the one to tell; a lost connection cannot roll back.
+    await runner.rollbackTransaction().catch(() => undefined);
+    throw error;
+  }
+}
+
+function refuseAnnouncement(): never {
+  throw new Error('Changes are announced from a transaction.');
+}
