@@ -27,7 +27,7 @@ const lateOf = (answer: CapDiagnosis): Record<string, number> =>
   Object.fromEntries(answer.cylinders.map(({ cylinder, late }) => [cylinder, late]));
 
 describe('capDiagnosis, against outside values', () => {
-  // Order 1-8-4-3-6-5-7-2: article on V8 firing orders. Each cylinder of an exchanged pair is fired at the
+  // T2-047. Order 1-8-4-3-6-5-7-2: article on V8 firing orders (CP-FO). Each cylinder of an exchanged pair is fired at the
   // other one's time: index difference × 720/n, by definition.
   it('finds leads 5 and 7 of an eight exchanged: 5 is 90° late, 7 is 90° early', () => {
     const answer = diagnose(eight, [1, 8, 4, 3, 6, 7, 5, 2]);
@@ -35,7 +35,7 @@ describe('capDiagnosis, against outside values', () => {
     expect(lateOf(answer)).toMatchObject({ 5: 90, 7: -90, 1: 0, 8: 0 });
   });
 
-  // Order 1-3-4-2: "Firing order", encyclopedia copy of 2010; errors by the same definition.
+  // T2-048, T2-049. Order 1-3-4-2: "Firing order", encyclopedia copy of 2010 (W-FO2010); errors by the same definition.
   it('finds companions 1 and 4 exchanged 360° out, both at the end of the exhaust stroke', () => {
     const answer = diagnose(four, [4, 3, 1, 2]);
     expect(lateOf(answer)).toEqual({ 1: 360, 3: 0, 4: 360, 2: 0 });
@@ -62,7 +62,7 @@ describe('capDiagnosis, against outside values', () => {
     );
   });
 
-  // Valve timing 20/35/35/10: course notes on the valve timing diagram. With 10° of advance, a spark 180° late
+  // T3-001. Valve timing 20/35/35/10: course notes on the valve timing diagram (VT1). With 10° of advance, a spark 180° late
   // is 170° after TDC, past the exhaust's opening at 145°; one 180° early is 190° before, on the inlet stroke,
   // where the inlet is open from 20° before TDC to 35° past BDC; one 360° out is 10° before exhaust TDC, where
   // both are open.
@@ -181,7 +181,7 @@ describe('capDiagnosis, cause by cause', () => {
     );
   });
 
-  // 1-4-2-6-3-5 is the mirror order of 1-5-3-6-2-4, by definition of the other hand of crank.
+  // T2-052. 1-4-2-6-3-5 is the mirror order of 1-5-3-6-2-4, by definition of the other hand of crank.
   it('names the reversal of a six, which is another order too', () => {
     const answer = diagnose(six, [1, 4, 2, 6, 3, 5]);
     expect(answer).toMatchObject({ cause: 'wired-against-the-rotor', alsoFits: ['other-firing-order'] });
@@ -192,7 +192,7 @@ describe('capDiagnosis, cause by cause', () => {
     expect(diagnose(four, [2, 4, 3, 1])).toMatchObject({ cause: 'mixed', asFitted: [1, 2, 4, 3] });
   });
 
-  // 1-8-7-2-6-5-4-3: article on V8 firing orders; 1-4-5-2-3-6: FAA aviation maintenance handbook.
+  // T2-012, T2-005. 1-8-7-2-6-5-4-3: article on V8 firing orders (CP-FO); 1-4-5-2-3-6: FAA handbook (FAA-FO).
   it.each([
     [eight, [1, 8, 7, 2, 6, 5, 4, 3], 'V8'],
     [six, [1, 4, 5, 2, 3, 6], 'flat six'],

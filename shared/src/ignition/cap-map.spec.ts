@@ -16,7 +16,7 @@ const spaced = (gaps: readonly number[]): { post: string; angle: number }[] =>
   gaps.map((_, i) => ({ post: `P${i + 1}`, angle: gaps.slice(0, i).reduce((sum, gap) => sum + gap, 0) }));
 
 describe('capMap, against published orders', () => {
-  // Orders: "Firing order", encyclopedia copy of 2010 (1-3-4-2, 1-5-3-6-2-4); article on V8 firing orders.
+  // T2-042 to T2-046. Orders: "Firing order", encyclopedia copy of 2010 (W-FO2010); article on V8 orders (CP-FO).
   // The order on the cap follows from the definition: for a rotor that turns anticlockwise, reversed after No. 1.
   it.each([
     ['1-3-4-2 clockwise', [1, 3, 4, 2], 'clockwise', [1, 3, 4, 2]],
@@ -34,8 +34,8 @@ describe('capMap, against published orders', () => {
     expect(rows.map(({ angle }) => angle)).toEqual([0, 45, 90, 135, 180, 225, 270, 315]);
   });
 
-  // Firing interval 720/n of crank and 360/n of cap: technical-exam study cards; for the six also an article
-  // on odd-fire V6 engines (120° of crank, 60° of cap).
+  // T2-021, T2-022, T2-024. Firing interval 720/n of crank and 360/n of cap: technical-exam study cards (CRAM);
+  // for the six also an article on odd-fire V6 engines (ODD): 120° of crank, 60° of cap.
   it.each([
     [[1, 2, 4, 5, 3], 144, 72],
     [[1, 5, 3, 6, 2, 4], 120, 60],
@@ -48,8 +48,8 @@ describe('capMap, against published orders', () => {
     });
   });
 
-  // Companions: Halderman & Linder, Automotive Fuel and Emissions Control Systems, p. 361 (1-6-5-4-3-2);
-  // article on valve setting by overlap (1-5-3-6-2-4); V8 and V12 worked out from the published orders.
+  // T2-026, T2-027, T2-032, T2-035. Halderman & Linder, Automotive Fuel and Emissions Control Systems, p. 361
+  // (HALD); article on valve setting by overlap (CUM); V8 and V12 worked out from published orders (CP-FO, W-FO2010).
   it.each([
     [
       [1, 6, 5, 4, 3, 2],
@@ -94,7 +94,7 @@ describe('capMap, against published orders', () => {
 });
 
 describe('capMap of engines that fire unevenly', () => {
-  // Odd-fire V6: the cap's spacing is half of the crank interval, 45° and 75° (from memory, no source).
+  // T2-054. Odd-fire V6: the cap's spacing is half of the crank interval, 45° and 75° (from memory, no source).
   it('passes an odd-fire six on a cap spaced 45° and 75°', () => {
     const map = capMap({
       ...inOrder([1, 6, 5, 4, 3, 2]),
@@ -117,7 +117,7 @@ describe('capMap of engines that fire unevenly', () => {
     expect(capMap(otherWay).verdict).toBe('doubtful');
   });
 
-  // V10 of 54° and 90°: five intervals make 342° or 378°, never 360° (from memory, no source).
+  // T2-037. V10 of 54° and 90°: five intervals make 342° or 378°, never 360° (from memory, no source).
   it('finds no companions in a V10 of 54° and 90°', () => {
     const map = capMap({
       ...inOrder([1, 10, 9, 4, 3, 6, 5, 8, 7, 2]),
@@ -127,7 +127,7 @@ describe('capMap of engines that fire unevenly', () => {
     expect(map).toMatchObject({ verdict: 'pass', companions: [] });
   });
 
-  // V-twin with one crank pin and 45° between the cylinders: 360 − 45 and 360 + 45, by definition.
+  // T2-056. V-twin with one crank pin and 45° between the cylinders: 360 − 45 and 360 + 45, by definition.
   it('maps a V-twin that fires at 315° and 405°', () => {
     const twin = { ...inOrder([1, 2]), intervals: [315, 405] };
     expect(capMap({ ...twin, posts: spaced([157.5, 202.5]) })).toMatchObject({

@@ -16,8 +16,9 @@ describe('knownOrders', () => {
     expect(new Set(all.map(({ order }) => order.join())).size).toBe(all.length);
   });
 
-  // "Firing order", encyclopedia copies (2010, older, six-cylinder list); FAA aviation maintenance handbook;
-  // article on V8 firing orders; article on numbering the cylinders of V engines.
+  // T2-001 to T2-017, T2-039, T2-042: "Firing order", encyclopedia copies (W-FO2010, W-FOwoi, W-FOpig); FAA
+  // aviation maintenance handbook (FAA-FO);
+  // article on V8 firing orders (CP-FO); article on numbering the cylinders of V engines (CYLN).
   it.each([
     [[1, 2, 3]],
     [[1, 3, 2]],
