@@ -149,5 +149,5 @@ function within(quantity: Quantity, kind: Kind, field: string, options: Quantity
 function bounds(min?: number, max?: number): string {
   if (min !== undefined && max !== undefined) return ` from ${min} to ${max}`;
   if (min !== undefined) return ` of at least ${min}`;
-  return max === undefined ? '' : ` of at most ${max}`;
+  return max === undefined ? ' no larger than 10¹⁵' : ` of at most ${max}`;
 }
