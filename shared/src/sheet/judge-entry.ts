@@ -1,5 +1,5 @@
 import { InputError } from '../contracts/input-error.js';
-import type { EntryContent, StepDefinition } from '../contracts/steps.js';
+import type { EntryContent, PhotoStep, StepDefinition } from '../contracts/steps.js';
 import type { Judgement } from '../contracts/verdict.js';
 import type { JudgingContext } from './judging-context.js';
 import { judgeMeasurement } from './judge-measurement.js';
@@ -16,11 +16,7 @@ export function judgeEntry(
   content: EntryContent,
   context: JudgingContext,
 ): Judgement {
-  if (definition.kind === 'check' && content.kind === 'check') {
-    return content.outcome === 'pass'
-      ? { verdict: 'pass', reason: content.note ?? 'Looked at and found right.' }
-      : { verdict: 'fail', reason: content.note ?? 'Looked at and found wrong.' };
-  }
+  if (definition.kind === 'check' && content.kind === 'check') return judgeCheck(content);
   if (definition.kind === 'measurement' && content.kind === 'measurement') {
     return judgeMeasurement(definition, content, context);
   }
@@ -31,10 +27,18 @@ export function judgeEntry(
     return diagnoseWiring(definition, content.fitted);
   if (definition.kind === 'valve-timing' && content.kind === 'valve-timing')
     return judgeTdc(definition, content);
-  if (definition.kind === 'photo' && content.kind === 'photo') {
-    if (definition.shows.includes(content.shows))
-      return { verdict: 'pass', reason: `Photo of: ${content.shows}.` };
-    throw new InputError('content.shows', `Photos wanted here: ${definition.shows.join(', ')}.`);
-  }
+  if (definition.kind === 'photo' && content.kind === 'photo') return judgePhoto(definition, content);
   throw new InputError('content.kind', `This step takes a ${definition.kind}, not a ${content.kind}.`);
+}
+
+function judgeCheck(content: Extract<EntryContent, { kind: 'check' }>): Judgement {
+  return content.outcome === 'pass'
+    ? { verdict: 'pass', reason: content.note ?? 'Looked at and found right.' }
+    : { verdict: 'fail', reason: content.note ?? 'Looked at and found wrong.' };
+}
+
+function judgePhoto(definition: PhotoStep, content: Extract<EntryContent, { kind: 'photo' }>): Judgement {
+  if (definition.shows.includes(content.shows))
+    return { verdict: 'pass', reason: `Photo of: ${content.shows}.` };
+  throw new InputError('content.shows', `Photos wanted here: ${definition.shows.join(', ')}.`);
 }
