@@ -1,6 +1,8 @@
 import cookieParser from 'cookie-parser';
 import express, { Router, type Express } from 'express';
 import type { Logger } from 'pino';
+import { calculationRoutes } from './calculations/calculations.routes.js';
+import { carRoutes } from './car-files/cars.routes.js';
 import type { Config } from './config.js';
 import { peopleRoutes, preferencesRoutes, sessionRoutes } from './people/people.routes.js';
 import type { Database } from './platform/database/database.js';
@@ -14,7 +16,9 @@ import { requestLog } from './platform/log.js';
 import { accessClaims, authentication } from './platform/signing-in/authentication.js';
 import { SessionCookies } from './platform/signing-in/cookies.js';
 import { xsrf } from './platform/signing-in/xsrf.js';
+import { toolRoutes } from './registers/tools.routes.js';
 import type { Services } from './services.js';
+import { specRoutes } from './spec-book/specs.routes.js';
 
 export interface AppDependencies {
   readonly config: Pick<
@@ -41,7 +45,7 @@ export function createApp(deps: AppDependencies): Express {
 }
 
 function apiRoutes({ config, database, services }: AppDependencies): Router {
-  const { sessions, people } = services;
+  const { sessions, people, cars, specs, tools } = services;
   const cookies = new SessionCookies(config.publicUrl);
   const api = Router();
   api.use(noStore);
@@ -52,6 +56,10 @@ function apiRoutes({ config, database, services }: AppDependencies): Router {
   api.use('/session', sessionRoutes(sessions, cookies));
   api.use('/people', peopleRoutes(people));
   api.use('/preferences', preferencesRoutes(people));
+  api.use('/cars', carRoutes(cars));
+  api.use('/specs', specRoutes(specs));
+  api.use('/tools', toolRoutes(tools));
+  api.use('/calculations', calculationRoutes());
   api.use(unknownRoute);
   return api;
 }
