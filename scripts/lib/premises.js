@@ -23,7 +23,7 @@ const takeOver = async (folder) => {
   if (isScript(note.pid)) {
     throw new Trouble(
       `Second Spanner is running already, at ${note.address} (process ${note.pid}), on the data in ${folder}. ` +
-        'End that one first, or give this one a folder of its own with SECOND_SPANNER_DATA.',
+        'End that one first, or give this one another PORT and a data folder of its own (SECOND_SPANNER_DATA).',
     );
   }
   if (note.api !== undefined) await endLeftOver(note.api);
