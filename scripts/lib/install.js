@@ -88,7 +88,7 @@ const installFromDebian = async (name, purpose, otherwise) => {
 /** Installs PostgreSQL unless the machine has it. */
 export const installPostgres = async () => {
   if (findPostgres().length > 0) return;
-  const otherwise = 'Or set DATABASE_URL to a PostgreSQL database that you have.';
+  const otherwise = 'Setting DATABASE_URL to a PostgreSQL database that you have will do instead.';
   await installFromDebian('postgresql', 'PostgreSQL', otherwise);
   if (findPostgres().length === 0) {
     throw new Trouble(`PostgreSQL was installed but its programs were not found. ${otherwise}`);
