@@ -33,6 +33,7 @@ export const apiEnvironment = ({ port, databaseUrl, files, smtpUrl, secret }) =>
   SMTP_URL: process.env['SMTP_URL'] ?? smtpUrl,
   JWT_SECRET: secret,
   DEMO: process.env['DEMO'] ?? '1',
+  LOG_LEVEL: process.env['LOG_LEVEL'] ?? 'warn',
 });
 
 /** @param {string} address */

@@ -1,12 +1,12 @@
 // @ts-check
 // The body of `npm run dev`: compilers that watch, and an api that starts again when its code changes.
 import { apiEnvironment, startApi } from './api.js';
-import { build } from './build.js';
+import { compile } from './build.js';
 import { closeAll, closeOnSignal, isClosing, runBody } from './closing.js';
 import { root } from './places.js';
 import { enter, noteApi, surroundings, tellPlaces } from './premises.js';
 import { begin } from './run.js';
-import { say } from './say.js';
+import { Trouble, say } from './say.js';
 
 /** @param {string} name @param {string} script @param {string[]} args */
 const watch = (name, script, args) => {
@@ -25,7 +25,7 @@ const watch = (name, script, args) => {
 await runBody(async () => {
   closeOnSignal(0);
   const { folder, port } = await enter();
-  await build();
+  if ((await compile()) !== 0) throw new Trouble('The api could not be built; the compiler says why above.');
   const { database, mailbox, files, secret } = await surroundings(folder);
   watch('The compiler of shared and api', 'typescript/bin/tsc', [
     '-b',
@@ -46,5 +46,5 @@ await runBody(async () => {
     onSpawn: (pid) => noteApi(folder, `http://127.0.0.1:${port}`, pid),
   });
   tellPlaces({ address, folder, database: database.where, mail: mailbox.address });
-  say('Reload the page to see a change.');
+  say('The pages are there as soon as their first build is done; reload to see a change.');
 });
