@@ -8,6 +8,11 @@ export const routes: Routes = [
     loadComponent: async () => (await import('./sign-in/sign-in')).SignIn,
   },
   {
+    path: 'v/:code',
+    title: 'Check a build sheet',
+    loadComponent: async () => (await import('./verification/verification')).VerificationPage,
+  },
+  {
     path: '',
     canActivate: [signedIn],
     loadChildren: async () => (await import('./layout/frame.routes')).frameRoutes,

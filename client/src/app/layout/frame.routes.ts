@@ -1,4 +1,5 @@
 import type { Routes } from '@angular/router';
+import { needs } from '../session/signed-in';
 import { Frame } from './frame';
 import { provideIcons } from './icons';
 
@@ -9,10 +10,27 @@ export const frameRoutes: Routes = [
     component: Frame,
     providers: [provideIcons()],
     children: [
+      {
+        path: '',
+        pathMatch: 'full',
+        title: 'Bench',
+        loadComponent: async () => (await import('../bench/bench')).BenchPage,
+      },
+      { path: 'cars', loadChildren: async () => (await import('../cars/cars.routes')).carsRoutes },
+      {
+        path: 'specs',
+        canActivate: [needs('specs.read')],
+        loadChildren: async () => (await import('../spec-book/spec-book.routes')).specBookRoutes,
+      },
       { path: 'sheets', loadChildren: async () => (await import('../sheets/sheets.routes')).sheetsRoutes },
       {
         path: 'workings',
         loadChildren: async () => (await import('../wiring/wiring.routes')).wiringRoutes,
+      },
+      {
+        path: 'account',
+        title: 'Account',
+        loadComponent: async () => (await import('../account/account')).AccountPage,
       },
       {
         path: '**',

@@ -1,3 +1,5 @@
 import type { Routes } from '@angular/router';
 
-export const sheetsRoutes: Routes = [];
+export const sheetsRoutes: Routes = [
+  { path: '', title: 'Sheets', loadComponent: async () => (await import('./list/sheet-list')).SheetList },
+];

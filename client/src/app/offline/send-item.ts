@@ -1,0 +1,61 @@
+import { HttpClient } from '@angular/common/http';
+import { inject, Injectable } from '@angular/core';
+import type { StepDetail, StoredFile } from '@second-spanner/shared/contracts/sheets';
+import { firstValueFrom, timeout } from 'rxjs';
+import { ApiProblem, toApiProblem } from '../http/api-problem';
+import { TrayDb } from './tray-db';
+import type { TrayItem } from './tray-item';
+
+/** What became of an entry that was sent. */
+export type Sent =
+  | { readonly state: 'kept'; readonly step: StepDetail }
+  | { readonly state: 'waiting'; readonly problem: ApiProblem }
+  | { readonly state: 'refused'; readonly problem: ApiProblem };
+
+/** Longer than this, a weak network counts as none: the entry waits and is sent again. */
+const patience = { entry: 20_000, photo: 120_000 };
+
+/** These may go well when tried again later: no network, signed out, too many tries, the server unwell. */
+const mayPass = ({ status }: ApiProblem): boolean => status === 0 || status === 401 || status === 429 || status >= 500;
+
+/** Sends one entry of the tray, its photo first where it has one. */
+@Injectable({ providedIn: 'root' })
+export class SendItem {
+  private readonly http = inject(HttpClient);
+  private readonly db = inject(TrayDb);
+
+  async send(item: TrayItem): Promise<Sent> {
+    try {
+      const ready = await this.withPhotoStored(item);
+      const { sheetId, stepCode, request, key } = ready;
+      const url = `/api/sheets/${sheetId}/steps/${encodeURIComponent(stepCode)}/entries`;
+      const post = this.http.post<StepDetail>(url, request, { headers: { 'Idempotency-Key': key } });
+      return { state: 'kept', step: await firstValueFrom(post.pipe(timeout(patience.entry))) };
+    } catch (error) {
+      const problem = problemOf(error);
+      return { state: mayPass(problem) ? 'waiting' : 'refused', problem };
+    }
+  }
+
+  /** A photo is stored once: its id is kept with the item before the entry goes. */
+  private async withPhotoStored(item: TrayItem): Promise<TrayItem> {
+    const { photo, request } = item;
+    if (photo === undefined || request.content.kind !== 'photo') return item;
+    const form = new FormData();
+    form.append('file', photo, 'photo');
+    const upload = this.http.post<StoredFile>('/api/files', form).pipe(timeout(patience.photo));
+    const { id } = await firstValueFrom(upload);
+    const ready: TrayItem = {
+      ...item,
+      request: { ...request, content: { ...request.content, fileId: id } },
+      photo: undefined,
+    };
+    await this.db.put(ready);
+    return ready;
+  }
+}
+
+function problemOf(error: unknown): ApiProblem {
+  const isTimeout = error instanceof Error && error.name === 'TimeoutError';
+  return isTimeout ? new ApiProblem(0, 'The network is too weak just now.') : toApiProblem(error);
+}

@@ -1,0 +1,109 @@
+import { httpResource } from '@angular/common/http';
+import { computed, DestroyRef, effect, inject, Injectable, signal, untracked } from '@angular/core';
+import { takeUntilDestroyed } from '@angular/core/rxjs-interop';
+import type { Sheet, SnagView, StepDetail, StepLine } from '@second-spanner/shared/contracts/sheets';
+import type { Subscription } from 'rxjs';
+import { WaitingTray } from '../offline/waiting-tray';
+import { SessionStore } from '../session/session-store';
+import { sheetNews, type SheetNews } from './sheet-events';
+import { stepUrl } from './sheet-api';
+import { shownStep, type ShownStep } from './shown-step';
+import { ToolsStore } from './tools/tools-store';
+
+/**
+ * One sheet while one works on it: the sheet, the step at hand with what waits in the tray laid over it, and its
+ * snags where they are shown. Others' work is read as soon as the api tells of it.
+ */
+@Injectable()
+export class SheetStore {
+  private readonly tray = inject(WaitingTray);
+  private readonly sessions = inject(SessionStore);
+  private readonly tools = inject(ToolsStore);
+  private readonly openId = signal<string | null>(null);
+  private readonly openCode = signal<string | null>(null);
+  private readonly wantsSnags = signal(false);
+  /** Told of a change while a reading of it was under way: it must be read once more. */
+  private readonly isStale = signal(false);
+
+  readonly sheet = httpResource<Sheet>(() => {
+    const id = this.openId();
+    return id === null ? undefined : `/api/sheets/${id}`;
+  });
+  readonly detail = httpResource<StepDetail>(() => {
+    const [id, code] = [this.openId(), this.openCode()];
+    return id === null || code === null ? undefined : stepUrl(id, code);
+  });
+  readonly snags = httpResource<readonly SnagView[]>(() => {
+    const id = this.openId();
+    return id === null || !this.wantsSnags() ? undefined : `/api/sheets/${id}/snags`;
+  });
+
+  readonly id = computed(() => this.openId() ?? '');
+  readonly code = this.openCode.asReadonly();
+  readonly step = computed<ShownStep | null>(() => {
+    const person = this.sessions.person();
+    if (!this.detail.hasValue() || person === null) return null;
+    const detail = this.detail.value();
+    const items = this.tray
+      .items()
+      .filter(({ sheetId, stepCode }) => sheetId === detail.sheetId && stepCode === detail.code);
+    return shownStep(detail, items, person, this.tools.all());
+  });
+  readonly stages = computed(() => (this.sheet.hasValue() ? this.sheet.value().stages : []));
+  readonly lines = computed<readonly StepLine[]>(() => this.stages().flatMap(({ steps }) => steps));
+
+  constructor() {
+    let line: Subscription | undefined;
+    effect(() => {
+      const id = this.openId();
+      line?.unsubscribe();
+      line = id === null ? undefined : sheetNews(id, () => this.refresh()).subscribe((news) => this.hear(news));
+    });
+    inject(DestroyRef).onDestroy(() => line?.unsubscribe());
+
+    effect(() => {
+      if (!this.isStale() || this.sheet.isLoading() || this.detail.isLoading()) return;
+      untracked(() => this.refresh());
+    });
+    this.tray.sent.pipe(takeUntilDestroyed()).subscribe((step) => this.take(step));
+  }
+
+  open(id: string): void {
+    this.openId.set(id);
+  }
+
+  openStep(code: string | null): void {
+    this.openCode.set(code);
+  }
+
+  openSnags(): void {
+    this.wantsSnags.set(true);
+  }
+
+  /** A step as the api answered it to an act; the sheet's list is read anew. */
+  take(step: StepDetail): void {
+    if (step.sheetId !== this.openId()) return;
+    const isOlder = this.detail.hasValue() && this.detail.value().version > step.version;
+    if (step.code === this.openCode() && !isOlder) this.detail.set(step);
+    this.sheet.reload();
+    this.snags.reload();
+  }
+
+  takeSheet(sheet: Sheet): void {
+    this.sheet.set(sheet);
+    this.detail.reload();
+  }
+
+  private hear(news: SheetNews): void {
+    const known = this.sheet.hasValue() ? this.sheet.value().version : -1;
+    if (news === 'line-open' ? known >= 0 : news.version > known) this.refresh();
+  }
+
+  private refresh(): void {
+    const isLoading = this.sheet.status() === 'loading' || this.detail.status() === 'loading';
+    this.isStale.set(isLoading);
+    this.sheet.reload();
+    this.detail.reload();
+    this.snags.reload();
+  }
+}
