@@ -1,5 +1,6 @@
 import { Column, Entity, PrimaryColumn } from 'typeorm';
-import type { SheetState } from '@second-spanner/shared/contracts/sheets';
+import type { PersonName } from '@second-spanner/shared/contracts/people';
+import type { SheetState, SignatureMeaning } from '@second-spanner/shared/contracts/sheets';
 
 /** One engine's assembly. What is counted of its steps stands beside it, so that lists need not look at them. */
 @Entity('sheets')
@@ -57,6 +58,10 @@ export class SheetEntity {
   @Column('text', { name: 'next_step', nullable: true })
   nextStep!: string | null;
 
+  /** The stages that it was laid out with: a list of `SheetStage`. */
+  @Column('jsonb', { select: false })
+  stages!: object;
+
   @Column('text', { name: 'content_hash', nullable: true })
   contentHash!: string | null;
 
@@ -69,4 +74,55 @@ export class SheetEntity {
 
   @Column('timestamptz', { name: 'released_at', nullable: true })
   releasedAt!: Date | null;
+}
+
+/** A stage as the sheet was laid out with it. */
+export interface SheetStage {
+  readonly stage: number;
+  readonly title: string;
+  readonly hold: boolean;
+  readonly cautions: readonly string[];
+}
+
+/** A sheet as lists show it. */
+export interface SheetRow {
+  readonly id: string;
+  readonly code: string;
+  readonly state: SheetState;
+  readonly version: number;
+  readonly carId: string;
+  readonly carName: string;
+  readonly engineCode: string;
+  readonly specEdition: number;
+  readonly builder: PersonName;
+  readonly countersigner: PersonName;
+  readonly stepsDone: number;
+  readonly stepsTotal: number;
+  readonly openSnags: number;
+  readonly nextStep: string | null;
+  readonly changedAt: Date;
+}
+
+/** A signature that counts, with who gave it. Times out of JSON are texts. */
+export interface SignatureRow {
+  readonly meaning: SignatureMeaning;
+  readonly person: PersonName;
+  readonly at: string;
+  readonly binding: string;
+  readonly contentHash: string;
+}
+
+/** A sheet with everything but its steps. */
+export interface WholeSheetRow extends SheetRow {
+  readonly signRound: number;
+  readonly engineNumber: string;
+  readonly ownerName: string | null;
+  readonly specId: string;
+  readonly specTitle: string;
+  readonly specEditionId: string;
+  readonly specHash: string;
+  readonly contentHash: string | null;
+  readonly verificationCode: string | null;
+  readonly stages: readonly SheetStage[];
+  readonly signatures: readonly SignatureRow[];
 }

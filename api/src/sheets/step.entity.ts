@@ -79,3 +79,6 @@ export class StepEntity {
   @Column('timestamptz', { name: 'awaiting_since', nullable: true })
   awaitingSince!: Date | null;
 }
+
+/** A step as the sheet's list shows it, without its definition. */
+export type StepRow = Omit<StepEntity, 'shopId' | 'sheetId' | 'definition' | 'awaiting' | 'awaitingSince'>;

@@ -17,8 +17,9 @@ export function staticClient(folder: string): Router {
       },
     }),
   );
+  // A file that is not there is not the page; a step's code such as 8.6 is no file.
   router.get('/{*splat}', (request, response, next) => {
-    if (/^\/api(?:\/|$)/.test(request.path) || /\.\w+$/.test(request.path)) {
+    if (/^\/api(?:\/|$)/.test(request.path) || /\.[a-z]\w*$/i.test(request.path)) {
       next();
       return;
     }

@@ -3,6 +3,7 @@ import { People1764547200001 } from './people.js';
 import { Records1764547200005 } from './records.js';
 import { Registers1764547200002 } from './registers.js';
 import { RowSecurity1764547200009 } from './row-security.js';
+import { SheetContent1764547200010 } from './sheet-content.js';
 import { Sheets1764547200004 } from './sheets.js';
 import { Signing1764547200006 } from './signing.js';
 import { SpecBook1764547200003 } from './spec-book.js';
@@ -19,4 +20,5 @@ export const migrations = [
   AppendOnly1764547200007,
   TwoPeople1764547200008,
   RowSecurity1764547200009,
+  SheetContent1764547200010,
 ];
