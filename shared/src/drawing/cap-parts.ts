@@ -14,6 +14,7 @@ import {
   type Point,
   type Shape,
 } from './shapes.js';
+import { shortened } from './words.js';
 
 /** The body of the cap: centre lines, ears, rim, and the reference mark at 0°. */
 export function capBody({ centre, rim, ears, leads }: CapLayout): readonly Shape[] {
@@ -212,7 +213,7 @@ function outletName({ centre }: CapLayout, placed: LeadHere, reach: number): rea
       ? polar(centre, reach + 3, placed.direction)
       : { x: centre.x + (placed.way === 'left' ? -1 : 1) * Math.max(reach, 89), y: placed.end.y };
   const options = { face: 'figures', weight: 600, halo: placed.way === 'out' } as const;
-  return [centredText(at.x, at.y, placed.row.outlet, options)];
+  return [centredText(at.x, at.y, shortened(placed.row.outlet, 3), options)];
 }
 
 /** The circled cylinder number; empty and dashed while nothing has been entered. */
@@ -222,7 +223,7 @@ function badge({ row, end, state: { cylinder, wrong, inHand } }: LeadHere): read
     const style = { pen: inHand ? 'oxide' : 'hidden', fill: inHand ? 'oxide-wash' : 'paper', part } as const;
     return [circle(end.x, end.y, badgeRadius, style)];
   }
-  const name = String(cylinder);
+  const name = shortened(String(cylinder), 4);
   const size = name.length <= 2 ? 17 : 13;
   const number = centredText(end.x, end.y, name, {
     size,

@@ -3,6 +3,7 @@ import type { LeadHere } from './cap-input.js';
 import { badgeRadius, type CapLayout, type PlacedLead } from './cap-layout.js';
 import { apart, arc, arrowHead, bearing, fold, polar } from './geometry.js';
 import { centredText, line, path, text, type Shape } from './shapes.js';
+import { shortened } from './words.js';
 
 const oxideWord = { ink: 'oxide', weight: 600, halo: true } as const;
 
@@ -91,7 +92,7 @@ function destination(layout: CapLayout, placed: LeadHere): readonly Shape[] {
   if (placed.moveTo === undefined) {
     return [];
   }
-  const words = `to ${placed.moveTo}`;
+  const words = `to ${shortened(placed.moveTo, 6)}`;
   if (placed.way !== 'out') {
     const left = placed.way === 'left';
     const x = placed.end.x + (left ? 17 : -17);

@@ -13,11 +13,25 @@ export const tighteningLegend: readonly { readonly state: FastenerState; readonl
   { state: 'to-come', label: 'to come' },
 ];
 
+/** Below this a number cannot be read, and the table alone has it. */
+const leastForNumber = 8.5;
+
 /** How much larger the fastener in hand is drawn. */
 export const inHandScale = 1.3;
 
 /** A nut or bolt from above: solid when done, cross-hairs in hand, double ring next, plain to come. */
 export function fastener(
+  at: Point,
+  radius: number,
+  state: FastenerState,
+  label: string,
+  part: string,
+): readonly Shape[] {
+  const shapes = numbered(at, radius, state, label, part);
+  return radius < leastForNumber ? shapes.filter(({ kind }) => kind !== 'text') : shapes;
+}
+
+function numbered(
   at: Point,
   radius: number,
   state: FastenerState,

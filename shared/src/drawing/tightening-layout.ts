@@ -14,7 +14,7 @@ export interface TighteningLayout {
 
 export const tighteningWidth = 340;
 const largestRadius = 14.5;
-const smallestRadius = 9;
+const smallestRadius = 4;
 /** Two rows of a head stand at least so far apart, that the bores can be seen between them. */
 const headDepth = 72;
 const mostHeight = 300;

@@ -88,9 +88,10 @@ function stateOf({ states }: TighteningDrawingInput, name: string): FastenerStat
   return states?.[name] ?? 'to-come';
 }
 
-/** The number that stands on a fastener. */
+/** The number that stands on a fastener; names too long to stand there give way to the order. */
 function shownAs({ numbers, plan }: TighteningDrawingInput, name: string): string {
-  return numbers === 'name' ? name : String(plan.sequence.indexOf(name) + 1);
+  const byName = numbers === 'name' && plan.sequence.every((one) => one.length <= 3);
+  return byName ? name : String(plan.sequence.indexOf(name) + 1);
 }
 
 function stateWord(state: FastenerState): string {

@@ -37,3 +37,9 @@ export function inWords(items: readonly string[]): string {
   const last = items.at(-1) ?? '';
   return items.length < 2 ? last : `${items.slice(0, -1).join(', ')} and ${last}`;
 }
+
+/** A name cut to what its place on a drawing can hold; the table has it whole. */
+export function shortened(name: string, most: number): string {
+  const characters = [...name];
+  return characters.length <= most ? name : `${characters.slice(0, most - 1).join('')}…`;
+}
