@@ -3,8 +3,8 @@ import { InputError } from '../contracts/input-error.js';
 import { toSi } from '../quantities/convert.js';
 import { requireNumber, requireQuantity, requireRecord } from '../quantities/require.js';
 
-/** An adapter that leaves less of the wrench's length than this share turns the setting into a guess. */
-const leastShare = 0.01;
+/** Less of the wrench's length than this share is none but for rounding. */
+const noise = 1e-9;
 
 /**
  * What a torque wrench must be set to so that the fastener gets `torque` through an adapter or crow-foot:
@@ -25,7 +25,7 @@ export function wrenchSetting(request: WrenchSettingRequest): WrenchSetting {
   const angle = requireNumber(given['adapterAngle'], 'adapterAngle', { min: -360, max: 360 });
 
   const effective = wrench + adapter * Math.cos((angle * Math.PI) / 180);
-  if (effective < wrench * leastShare) {
+  if (effective <= wrench * noise) {
     throw new InputError(
       'adapterLength',
       'At this angle the adapter reaches back to the hand: it must be shorter than the wrench.',

@@ -27,8 +27,9 @@ export interface Engine {
   readonly tolerance: number;
 }
 
-const mostPositions = 16;
+const mostPositions = 50;
 const mostSightings = 32;
+const mostThings = 400;
 
 /** The crank positions of a request, as yet unread. Throws `InputError` on `sightings`. */
 export function requirePositions(input: unknown): readonly unknown[] {
@@ -46,13 +47,17 @@ export function requireSeen(
   engine: Engine,
   maybeEmpty?: number,
 ): readonly Seen[] {
-  return positions.flatMap((list, position) => {
+  const seen = positions.flatMap((list, position) => {
     const path = `sightings[${position}]`;
     const min = position === maybeEmpty ? 0 : 1;
     return requireList(list, path, { min, max: mostSightings }).flatMap((sighting, i) =>
       thingsSeen(sighting, engine, position, `${path}[${i}]`),
     );
   });
+  if (seen.length > mostThings) {
+    throw new InputError('sightings', `At most ${mostThings} things seen can be weighed together.`);
+  }
+  return seen;
 }
 
 /** The timing marks seen together, which then mean the TDC named. */

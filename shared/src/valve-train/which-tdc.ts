@@ -10,7 +10,7 @@ import { asPairs, cycle, holds, nowhere, type Windows } from './windows.js';
 import { nameOf, rangesOf } from './words.js';
 
 const defaultTolerance = 10;
-const mostTolerance = 60;
+const mostTolerance = 90;
 
 interface Question {
   readonly engine: Engine;
@@ -22,7 +22,8 @@ interface Question {
 /**
  * Which TDC a cylinder of a four-stroke was at, told from what was seen while the crank was turned the normal
  * way: valves of any cylinder, pistons, pressure at a plug hole, timing marks. Angles in crank degrees;
- * `windows` are phases of the cylinder asked about, 0 its compression TDC.
+ * `windows` are phases of the cylinder asked about, 0 its compression TDC. Marks that stand together do so at
+ * the position asked about.
  *
  * @throws InputError on the request's fields, such as `sightings[1][0].inlet`
  * Source: the valve timing's own definition; worked out by exact sets of angles.
