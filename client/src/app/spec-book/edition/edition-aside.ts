@@ -1,14 +1,24 @@
-import { ChangeDetectionStrategy, Component, computed, input } from '@angular/core';
+import { ChangeDetectionStrategy, Component, computed, inject, input } from '@angular/core';
 import type { SpecEdition } from '@second-spanner/shared/contracts/spec';
+import { tradeWord } from '@second-spanner/shared/contracts/trade-words';
 import type { SpecRow } from '@second-spanner/shared/spec/spec-rows';
+import { drawValveClock } from '@second-spanner/shared/drawing/valve-clock';
+import { valveClock } from '@second-spanner/shared/valve-train/valve-clock';
+import { DrawingFigure } from '../../drawing/drawing';
+import { SessionStore } from '../../session/session-store';
 import { VerdictLine } from '../../verdict/verdict';
 
-/** Beside the values: what the edition rests on, and which values have no source. */
+/** Beside the values: the valve clock, what the edition rests on, and how many values have no source. */
 @Component({
   selector: 'ss-edition-aside',
-  imports: [VerdictLine],
+  imports: [DrawingFigure, VerdictLine],
   changeDetection: ChangeDetectionStrategy.OnPush,
   template: `
+    <ss-drawing caption="Valve clock, two turns of the crank in one ring" [of]="clock()" [widest]="340" />
+    <p>
+      Each circled number stands at that cylinder’s compression TDC. The hand stands where No.
+      <span class="f">{{ spec().document.engine.firingOrder.value[0] }}</span> {{ inlet() }} begins to open.
+    </p>
     <h2>Rests on</h2>
     <p>{{ spec().restsOn }}</p>
     <h2>Sources</h2>
@@ -44,6 +54,15 @@ export class EditionAside {
   readonly spec = input.required<SpecEdition>();
   readonly rows = input.required<readonly SpecRow[]>();
 
+  private readonly dialect = inject(SessionStore).dialect;
+
+  protected readonly inlet = computed(() => tradeWord('inlet', this.dialect()));
+  protected readonly clock = computed(() => {
+    const { engine, valveTrain } = this.spec().document;
+    const valveTiming = valveTrain.timing.value;
+    const request = { firingOrder: engine.firingOrder.value, valveTiming, crank: 360 - valveTiming.ivo };
+    return drawValveClock({ request, clock: valveClock(request) }, { dialect: this.dialect() });
+  });
   protected readonly withoutSource = computed(
     () => this.rows().filter(({ source }) => source === undefined).length,
   );
