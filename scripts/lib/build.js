@@ -1,64 +1,69 @@
 // @ts-check
-// Builds what is out of date: shared and api with tsc, which knows by itself; the client by a fingerprint of
-// everything that goes into it.
-import { createHash } from 'node:crypto';
-import { existsSync, readFileSync, readdirSync, statSync, writeFileSync } from 'node:fs';
-import { join } from 'node:path';
-import { clientBuilt, root } from './places.js';
+// Builds what is out of date, which it knows by a fingerprint of everything that goes in.
+import { existsSync, readFileSync, writeFileSync } from 'node:fs';
+import { fingerprint } from './fingerprint.js';
+import { apiMain, clientBuilt, root } from './places.js';
 import { runTool } from './run.js';
 import { Trouble, say } from './say.js';
 
-const stamp = `${root}/client/dist/fingerprint`;
-const inputs = ['angular.json', 'package-lock.json', 'tsconfig.base.json', 'client', 'shared/src'];
-const leftOut = new Set(['node_modules', 'dist', 'e2e', '.angular']);
-
-/** @param {string} path below the project's folder @returns {string[]} the files there, in a fixed order */
-const filesIn = (path) => {
-  const here = join(root, path);
-  if (!existsSync(here)) return [];
-  if (statSync(here).isFile()) return [path];
-  return readdirSync(here, { withFileTypes: true })
-    .filter(({ name }) => !leftOut.has(name) && !name.endsWith('.spec.ts'))
-    .sort((a, b) => (a.name < b.name ? -1 : 1))
-    .flatMap((entry) => {
-      const inside = `${path}/${entry.name}`;
-      return entry.isDirectory() ? filesIn(inside) : [inside];
-    });
+const compiled = {
+  stamp: `${root}/api/dist/.fingerprint`,
+  result: apiMain,
+  // The compiler's notes stand for what it wrote: another compilation meanwhile shows in them.
+  inputs: [
+    'package-lock.json',
+    'tsconfig.base.json',
+    ...['shared', 'api'].flatMap((name) => [
+      `${name}/tsconfig.json`,
+      `${name}/package.json`,
+      `${name}/src`,
+      `${name}/dist/.tsbuildinfo`,
+    ]),
+  ],
 };
 
-const fingerprint = () => {
-  const hash = createHash('sha256').update(process.versions.node);
-  for (const file of inputs.flatMap(filesIn)) {
-    hash.update(`\0${file}\0`).update(readFileSync(join(root, file)));
-  }
-  return hash.digest('hex');
+const pages = {
+  // The builder empties its folder, so that this is gone with what it stood for.
+  stamp: `${root}/client/dist/.fingerprint`,
+  result: `${clientBuilt}/index.html`,
+  inputs: ['angular.json', 'package-lock.json', 'tsconfig.base.json', 'client', 'shared/src'],
 };
 
-const lastFingerprint = () => {
-  try {
-    return readFileSync(stamp, 'utf8');
-  } catch {
-    return undefined;
-  }
-};
+/** @param {typeof pages} part */
+const isUpToDate = ({ stamp, result, inputs }) =>
+  existsSync(stamp) && existsSync(result) && readFileSync(stamp, 'utf8') === fingerprint(inputs);
 
-/** Compiles shared and api where they are out of date. The exit code. */
-export const compile = () => runTool('typescript/bin/tsc', ['-b', 'shared', 'api']);
-
-/** Builds the client when anything in it has changed, or always. The exit code. @param {{ always?: boolean }} [options] */
-export const buildClient = async ({ always = false } = {}) => {
-  const current = fingerprint();
-  if (!always && current === lastFingerprint() && existsSync(join(clientBuilt, 'index.html'))) return 0;
-  say('Building the pages …');
-  const env = { ...process.env, NG_CLI_ANALYTICS: 'false' };
-  const code = await runTool('@angular/cli/bin/ng.js', ['build', '--no-progress'], { env });
-  if (code === 0) writeFileSync(stamp, current);
+/** Compiles shared and api. The exit code. */
+export const compile = async () => {
+  const code = await runTool('typescript/bin/tsc', ['-b', 'shared', 'api']);
+  if (code === 0) writeFileSync(compiled.stamp, fingerprint(compiled.inputs));
   return code;
 };
 
+/** Builds the pages. The exit code. */
+export const buildPages = async () => {
+  const current = fingerprint(pages.inputs);
+  const env = { ...process.env, NG_CLI_ANALYTICS: 'false' };
+  const code = await runTool('@angular/cli/bin/ng.js', ['build', '--no-progress'], { env });
+  if (code === 0) writeFileSync(pages.stamp, current);
+  return code;
+};
+
+/** Compiles shared and api when they are out of date, or says that it could not. */
+export const ensureCompiled = async () => {
+  if (isUpToDate(compiled)) return;
+  say('Compiling …');
+  if ((await compile()) !== 0) {
+    throw new Trouble('The api could not be built; the compiler says why above.');
+  }
+};
+
 /** Builds everything that is out of date, or says that it could not. */
-export const build = async () => {
-  if ((await compile()) !== 0 || (await buildClient()) !== 0) {
-    throw new Trouble('The application could not be built; the compiler says why above.');
+export const ensureBuilt = async () => {
+  await ensureCompiled();
+  if (isUpToDate(pages)) return;
+  say('Building the pages …');
+  if ((await buildPages()) !== 0) {
+    throw new Trouble('The pages could not be built; the compiler says why above.');
   }
 };

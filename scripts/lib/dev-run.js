@@ -1,12 +1,12 @@
 // @ts-check
 // The body of `npm run dev`: compilers that watch, and an api that starts again when its code changes.
 import { apiEnvironment, startApi } from './api.js';
-import { compile } from './build.js';
+import { ensureCompiled } from './build.js';
 import { closeAll, closeOnSignal, isClosing, runBody } from './closing.js';
 import { root } from './places.js';
 import { enter, noteApi, surroundings, tellPlaces } from './premises.js';
 import { begin } from './run.js';
-import { Trouble, say } from './say.js';
+import { say } from './say.js';
 
 /** @param {string} name @param {string} script @param {string[]} args */
 const watch = (name, script, args) => {
@@ -25,7 +25,7 @@ const watch = (name, script, args) => {
 await runBody(async () => {
   closeOnSignal(0);
   const { folder, port } = await enter();
-  if ((await compile()) !== 0) throw new Trouble('The api could not be built; the compiler says why above.');
+  await ensureCompiled();
   const { database, mailbox, files, secret } = await surroundings(folder);
   watch('The compiler of shared and api', 'typescript/bin/tsc', [
     '-b',

@@ -1,6 +1,6 @@
 // @ts-check
 // The body of `npm run seed`.
-import { compile } from './build.js';
+import { ensureCompiled } from './build.js';
 import { closeAll, closeOnSignal, runBody } from './closing.js';
 import { dataFolder, ensureRoom, makeDataFolder } from './data-folder.js';
 import { installPackages } from './install.js';
@@ -30,7 +30,7 @@ await runBody(async () => {
   ensureRoom(folder);
   makeDataFolder(folder);
   await installPackages();
-  if ((await compile()) !== 0) throw new Trouble('The api could not be built; the compiler says why above.');
+  await ensureCompiled();
   const { openDatabase } = await import('./database.js');
   const { url, where } = await openDatabase(folder, { borrow: true });
 

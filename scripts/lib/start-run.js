@@ -1,14 +1,14 @@
 // @ts-check
 // The body of `npm start`.
 import { apiEnvironment, startApi } from './api.js';
-import { build } from './build.js';
+import { ensureBuilt } from './build.js';
 import { closeAll, closeOnSignal, isClosing, runBody } from './closing.js';
 import { enter, noteApi, surroundings, tellPlaces } from './premises.js';
 
 await runBody(async () => {
   closeOnSignal(0);
   const { folder, port } = await enter();
-  await build();
+  await ensureBuilt();
   const { database, mailbox, files, secret } = await surroundings(folder);
   const env = apiEnvironment({ port, databaseUrl: database.url, files, smtpUrl: mailbox.smtpUrl, secret });
   const { child, address } = await startApi(env, {

@@ -2,7 +2,7 @@
 // The body of `npm test`.
 import { mkdirSync } from 'node:fs';
 import { join } from 'node:path';
-import { buildClient, compile } from './build.js';
+import { buildPages, compile } from './build.js';
 import { closeAll, closeOnSignal, runBody } from './closing.js';
 import { installChromium, installPackages, installPostgres } from './install.js';
 import { freePort } from './ports.js';
@@ -55,7 +55,7 @@ const stepsAgainst = (databaseUrl, port) => {
       return vitestTally(await runTool('@angular/cli/bin/ng.js', args, { env }), report);
     },
     build: async () => {
-      const code = await buildClient({ always: true });
+      const code = await buildPages();
       built = code === 0;
       return checked(code);
     },
