@@ -14,6 +14,8 @@ export interface EndFloatInput {
 const millimetres = { mm: 1, µm: 0.001, in: 25.4, thou: 0.0254 } as const;
 /** Drawing units to a millimetre for everything but the gap. */
 const unitsPerMillimetre = 5;
+/** What stands for the gap where nothing is known of it, mm. */
+const usualGap = 0.2;
 const exaggerations = [1, 2, 4, 8, 16, 32, 64];
 const width = 340;
 /** The face of the front thrust washer; the gap lies to its right. */
@@ -28,12 +30,13 @@ export function drawEndFloat(input: EndFloatInput, options?: DrawingOptions): Dr
   const words = wording(options);
   const gap = gapOf(input);
   const figure = figureOf(input, words);
+  const scale = gap.times === undefined ? 'Not to scale' : `Gap ×${gap.times}`;
   const limits = figure === '' ? '' : ` ${figure} ${input.unit}.`;
   return {
     title: words.say('Crankshaft {end float} at the centre main bearing'),
     description: words.say(
       'Half section. The crank is levered forward, with a dial gauge on its nose: the gap at the front ' +
-        `thrust washer is the {end float}.${limits} The gap is drawn ${gap.times} times too wide.`,
+        `thrust washer is the {end float}.${limits} ${scale}.`,
     ),
     width,
     height: 200,
@@ -43,29 +46,35 @@ export function drawEndFloat(input: EndFloatInput, options?: DrawingOptions): Dr
       ...gapShapes(face + gap.units),
       ...dimension(face + gap.units, figure, input.unit, words),
       ...gauge(gap.units),
-      text(12, 18, `Gap ×${gap.times}`, { ink: 'ink-2' }),
+      text(12, 18, scale, { ink: 'ink-2' }),
     ],
     table: {
       columns: ['What', 'Figure'],
       rows: [
         ...(figure === '' ? [] : [[words.say('{End float}'), `${figure} ${input.unit}`]]),
-        ['Gap drawn', `×${gap.times}`],
+        ['Drawn', scale],
       ],
     },
   };
 }
 
-/** The gap in drawing units, and how much it is exaggerated: the least that lets it be seen. */
-function gapOf({ low, high, unit, reading }: EndFloatInput): {
+interface Gap {
   readonly units: number;
-  readonly times: number;
-} {
+  /** How many times too wide it is drawn; undefined where it does not fit at any. */
+  readonly times: number | undefined;
+}
+
+const widestGap = 30;
+
+/** The gap in drawing units, with the least exaggeration that lets it be seen. */
+function gapOf({ low, high, unit, reading }: EndFloatInput): Gap {
   const known = [low, high].filter((limit) => limit !== undefined);
-  const middle =
-    known.length === 0 ? 0.2 / millimetres[unit] : known.reduce((sum, x) => sum + x, 0) / known.length;
-  const drawn = Math.max(0, (reading ?? middle) * millimetres[unit]) * unitsPerMillimetre;
-  const times = exaggerations.find((factor) => drawn * factor >= 9) ?? 64;
-  return { units: round(Math.min(30, Math.max(2, drawn * times))), times };
+  const sum = known.reduce((total, limit) => total + limit, 0);
+  const middle = known.length === 0 ? usualGap / millimetres[unit] : sum / known.length;
+  const plain = Math.max(0, (reading ?? middle) * millimetres[unit]) * unitsPerMillimetre;
+  const times = exaggerations.find((factor) => plain * factor >= 9) ?? 64;
+  const units = round(plain * times);
+  return units <= widestGap ? { units, times } : { units: widestGap, times: undefined };
 }
 
 function figureOf({ low, high, reading }: EndFloatInput, { figure }: Wording): string {
