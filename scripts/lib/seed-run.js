@@ -2,25 +2,26 @@
 // The body of `npm run seed`.
 import { ensureCompiled } from './build.js';
 import { closeAll, closeOnSignal, runBody } from './closing.js';
-import { dataFolder, ensureRoom, makeDataFolder } from './data-folder.js';
+import { dataFolder, ensureRoom, keptSecret, makeDataFolder } from './data-folder.js';
 import { installPackages } from './install.js';
 import { apiReload } from './places.js';
 import { run } from './run.js';
 import { Trouble, say } from './say.js';
 
-/** The shops of the demo; any other shop is somebody's work. */
-const demoShops = ['Low Mill Motor Works', 'Harbour Lane Engines'];
-
-/** @param {string} url @returns {Promise<string[]>} the names of shops that are not the demo's */
-const otherShops = async (url) => {
+/**
+ * What of somebody's work the database holds, in words; nothing when it holds the demo alone or is empty.
+ * @param {string} url @returns {Promise<string | undefined>}
+ */
+const workIn = async (url) => {
   const { withDatabase } = await import('./sql.js');
   return withDatabase(url, async (client) => {
-    const table = await client.query("SELECT to_regclass('public.shop') AS shop");
-    if (table.rows[0]?.shop === null) return [];
-    const shops = await client.query('SELECT name FROM public.shop WHERE name <> ALL ($1) ORDER BY name', [
-      demoShops,
-    ]);
-    return shops.rows.map(({ name }) => String(name));
+    const tables = await client.query("SELECT tablename FROM pg_tables WHERE schemaname = 'public'");
+    if (tables.rows.length === 0) return undefined;
+    if (!tables.rows.some(({ tablename }) => tablename === 'shops')) return 'tables that are not ours';
+    await client.query("SELECT set_config('second_spanner.setup', 'yes', false)");
+    const shops = await client.query('SELECT name FROM shops WHERE NOT demo ORDER BY name');
+    if (shops.rows.length === 0) return undefined;
+    return `shops other than the demo's (${shops.rows.map(({ name }) => name).join(', ')})`;
   });
 };
 
@@ -34,15 +35,16 @@ await runBody(async () => {
   const { openDatabase } = await import('./database.js');
   const { url, where } = await openDatabase(folder, { borrow: true });
 
-  const others = process.argv.includes('--yes') ? [] : await otherShops(url);
-  if (others.length > 0) {
+  const work = process.argv.includes('--yes') ? undefined : await workIn(url);
+  if (work) {
     throw new Trouble(
-      `The database in ${where} holds other shops than the demo's: ${others.join(', ')}. ` +
-        'Everything in it would be lost. To empty it all the same: npm run seed -- --yes',
+      `The database in ${where} holds ${work}. Everything in it would be lost. ` +
+        'To empty it all the same: npm run seed -- --yes',
     );
   }
   say(`Emptying the database in ${where} and loading the demo …`);
-  const env = { ...process.env, DATABASE_URL: url, DATA_DIR: `${folder}/files` };
+  const secret = keptSecret(folder, 'token-secret');
+  const env = { ...process.env, DATABASE_URL: url, DATA_DIR: `${folder}/files`, JWT_SECRET: secret };
   if ((await run(process.execPath, [apiReload], { env })) !== 0) {
     throw new Trouble('The demo could not be loaded; the reason is above.');
   }
