@@ -126,3 +126,10 @@ export interface WholeSheetRow extends SheetRow {
   readonly stages: readonly SheetStage[];
   readonly signatures: readonly SignatureRow[];
 }
+
+/** A sheet whose row is locked by the transaction at hand. */
+export type LockedSheetRow = Pick<
+  WholeSheetRow,
+  | ('id' | 'code' | 'state' | 'version' | 'signRound' | 'stepsDone' | 'stepsTotal' | 'openSnags')
+  | ('carName' | 'builder' | 'countersigner')
+>;

@@ -1,7 +1,7 @@
 import type { SheetState } from '@second-spanner/shared/contracts/sheets';
 import type { ShopScope } from '../platform/database/database.js';
 import type { Paging } from '../platform/validation/paging.js';
-import { SheetEntity, type SheetRow, type WholeSheetRow } from './sheet.entity.js';
+import { SheetEntity, type LockedSheetRow, type SheetRow, type WholeSheetRow } from './sheet.entity.js';
 
 const name = (alias: string): string =>
   `json_build_object('id', ${alias}.id, 'name', ${alias}.name, 'role', ${alias}.role)`;
@@ -83,11 +83,19 @@ export class SheetsRepository {
   }
 
   /** Locks the sheet's row: whoever writes on a sheet waits here for their turn. */
-  async lock(id: string): Promise<SheetEntity | null> {
-    return this.scope.manager.findOne(SheetEntity, {
-      where: { id, shopId: this.scope.shopId },
-      lock: { mode: 'pessimistic_write' },
-    });
+  async lock(id: string): Promise<LockedSheetRow | null> {
+    const rows: LockedSheetRow[] = await this.scope.manager.query(
+      `SELECT s.id, s.code, s.state, s.version, s.sign_round AS "signRound", s.steps_done AS "stepsDone",
+         s.steps_total AS "stepsTotal", s.open_snags AS "openSnags", c.name AS "carName",
+         ${name('b')} AS builder, ${name('k')} AS countersigner
+       FROM sheets s
+       JOIN cars c ON c.id = s.car_id
+       JOIN people b ON b.id = s.builder_id
+       JOIN people k ON k.id = s.countersigner_id
+       WHERE s.shop_id = $1 AND s.id = $2 FOR UPDATE OF s`,
+      [this.scope.shopId, id],
+    );
+    return rows[0] ?? null;
   }
 
   async insert(sheet: Omit<SheetEntity, 'shopId' | 'frozen' | 'releasedAt'>): Promise<void> {

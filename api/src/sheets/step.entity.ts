@@ -81,4 +81,4 @@ export class StepEntity {
 }
 
 /** A step as the sheet's list shows it, without its definition. */
-export type StepRow = Omit<StepEntity, 'shopId' | 'sheetId' | 'definition' | 'awaiting' | 'awaitingSince'>;
+export type StepRow = Omit<StepEntity, 'shopId' | 'sheetId' | 'definition'>;

@@ -3,16 +3,22 @@ import type { StepRecords } from './record.entity.js';
 import { StepEntity, type StepRow } from './step.entity.js';
 
 const lines = `
-  id, position, code, stage, kind, title, hold, critical, second_check AS "secondCheck",
-  rests_on AS "restsOn", uncritical_reason AS "uncriticalReason", round,
-  entries_from_round AS "entriesFromRound", done, of_total AS "of", verdict, recorder_ids AS "recorderIds",
-  countersigned, open_snags AS "openSnags"`;
+  s.id, s.position, s.code, s.stage, s.kind, s.title, s.hold, s.critical, s.second_check AS "secondCheck",
+  s.rests_on AS "restsOn", s.uncritical_reason AS "uncriticalReason", s.round,
+  s.entries_from_round AS "entriesFromRound", s.done, s.of_total AS "of", s.verdict,
+  s.recorder_ids AS "recorderIds", s.countersigned, s.open_snags AS "openSnags", s.awaiting,
+  s.awaiting_since AS "awaitingSince"`;
 
 const by = (column: string): string =>
   `(SELECT json_build_object('id', id, 'name', name, 'role', role) FROM people WHERE id = ${column})`;
 
 /** All rows of a table that belong to the step at hand, as one JSON list. */
-const listOf = (table: string, fields: Readonly<Record<string, string>>, at: string, tie = 'r.id'): string => {
+const listOf = (
+  table: string,
+  fields: Readonly<Record<string, string>>,
+  at: string,
+  tie = 'r.id',
+): string => {
   const pairs = Object.entries(fields).map(([key, value]) => `'${key}', ${value}`);
   return `(SELECT coalesce(json_agg(json_build_object(${pairs.join(', ')}) ORDER BY ${at}, ${tie}), '[]')
     FROM ${table} r WHERE r.step_id = s.id)`;
@@ -61,7 +67,7 @@ const snags = listOf(
 const calls = listOf('calls', { to: by('r.to_id'), at: 'r.called_at' }, 'r.called_at');
 
 const records = `
-  SELECT s.code, s.definition, ${entries} AS entries, ${secondReadings} AS "secondReadings",
+  SELECT ${lines}, s.definition, ${entries} AS entries, ${secondReadings} AS "secondReadings",
     ${countersignatures} AS countersignatures, ${snags} AS snags, ${calls} AS calls
   FROM steps s WHERE s.shop_id = $1 AND s.sheet_id = $2`;
 
@@ -78,40 +84,39 @@ export class StepsRepository {
   /** All steps of a sheet in order, without their definitions. */
   async list(sheetId: string): Promise<StepRow[]> {
     return this.scope.manager.query(
-      `SELECT ${lines} FROM steps WHERE shop_id = $1 AND sheet_id = $2 ORDER BY position`,
+      `SELECT ${lines} FROM steps s WHERE s.shop_id = $1 AND s.sheet_id = $2 ORDER BY s.position`,
       [this.scope.shopId, sheetId],
     );
   }
 
-  /** Everything that was recorded on one step. */
-  async records(sheetId: string, code: string): Promise<StepRecords | null> {
+  /** One step with everything that was recorded on it, as of one moment. */
+  async withRecords(sheetId: string, code: string): Promise<(StepRow & StepRecords) | null> {
     const values = [this.scope.shopId, sheetId, code];
-    const rows: StepRecords[] = await this.scope.manager.query(`${records} AND s.code = $3`, values);
+    const rows: (StepRow & StepRecords)[] = await this.scope.manager.query(
+      `${records} AND s.code = $3`,
+      values,
+    );
     return rows[0] ?? null;
   }
 
-  /** Everything that was recorded on every step of a sheet, in the sheet's order. */
-  async allRecords(sheetId: string): Promise<(StepRecords & { readonly code: string })[]> {
+  /** Every step of a sheet with its records, in the sheet's order. */
+  async allWithRecords(sheetId: string): Promise<(StepRow & StepRecords)[]> {
     return this.scope.manager.query(`${records} ORDER BY s.position`, [this.scope.shopId, sheetId]);
   }
 
   async insertAll(steps: readonly Omit<StepEntity, 'shopId'>[]): Promise<void> {
     const { shopId, manager } = this.scope;
     // A definition is written whole; the deep partial type of an insert has no use for its unions.
-    const rows = steps.map(({ definition, ...step }) => ({ ...step, definition: definition as object, shopId }));
+    const rows = steps.map(({ definition, ...step }) => ({
+      ...step,
+      definition: definition as object,
+      shopId,
+    }));
     await manager.insert(StepEntity, rows);
   }
 
   /** What moves on a step: its rounds, what is counted of its records, and what it waits for. */
   async setCounts(id: string, counts: StepCounts): Promise<void> {
     await this.scope.manager.update(StepEntity, { id, shopId: this.scope.shopId }, counts);
-  }
-
-  /** When a step began to wait for a person, if it does. */
-  async awaiting(id: string): Promise<Pick<StepEntity, 'awaiting' | 'awaitingSince'> | null> {
-    return this.scope.manager.findOne(StepEntity, {
-      select: { awaiting: true, awaitingSince: true },
-      where: { id, shopId: this.scope.shopId },
-    });
   }
 }

@@ -49,7 +49,11 @@ export class Database {
   async through<T>(door: Door, value: string, work: (manager: EntityManager) => Promise<T>): Promise<T> {
     return this.onConnection((runner) =>
       inTransaction(runner, async () => {
-        await runner.query('SELECT set_config($1, $2, true)', [`second_spanner.${door}`, value]);
+        // For this transaction the connection forgets its shop, so that the door is all it sees through.
+        await runner.query(`SELECT set_config('second_spanner.shop', '', true), set_config($1, $2, true)`, [
+          `second_spanner.${door}`,
+          value,
+        ]);
         return work(runner.manager);
       }),
     );

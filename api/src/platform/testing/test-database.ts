@@ -27,11 +27,13 @@ export async function createTestDatabase(): Promise<TestDatabase> {
   const dataSource = createDataSource({ url, poolSize: 8, log: createLog('silent') });
   await dataSource.initialize();
   await migrate(dataSource);
+  const pool = new pg.Pool({ connectionString: url, max: 4 });
   return {
     url,
     dataSource,
-    sql: (shopId, statement, values) => statementAs(url, shopId, statement, values),
+    sql: (shopId, statement, values) => statementAs(pool, shopId, statement, values),
     drop: async () => {
+      await pool.end();
       await dataSource.destroy();
       await asSuperuser(superUrl, [`DROP DATABASE ${name} WITH (FORCE)`, `DROP ROLE ${name}`]);
     },
@@ -49,17 +51,16 @@ async function asSuperuser(url: string, statements: readonly string[]): Promise<
 }
 
 async function statementAs<Row extends object>(
-  url: string,
+  pool: pg.Pool,
   shopId: string | null,
   statement: string,
   values: unknown[] = [],
 ): Promise<Row[]> {
-  const client = new pg.Client({ connectionString: url });
-  await client.connect();
+  const client = await pool.connect();
   try {
-    if (shopId !== null) await client.query(`SELECT set_config('second_spanner.shop', $1, false)`, [shopId]);
+    await client.query(`SELECT set_config('second_spanner.shop', $1, false)`, [shopId ?? '']);
     return (await client.query<Row>(statement, values)).rows;
   } finally {
-    await client.end();
+    client.release();
   }
 }

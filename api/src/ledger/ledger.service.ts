@@ -1,0 +1,58 @@
+import type { PersonName } from '@second-spanner/shared/contracts/people';
+import type { ShopScope } from '../platform/database/database.js';
+import { nextLine, type LedgerLine } from './ledger-chain.js';
+import type { LedgerEvent } from './ledger-event.js';
+import type { LedgerLineEntity } from './ledger-line.entity.js';
+import { LedgerRepository } from './ledger.repository.js';
+
+/** Who did something, and when. */
+export interface Doing {
+  readonly by: PersonName;
+  readonly at: Date;
+}
+
+/**
+ * Appends what happened to a sheet's ledger, in the transaction in which it happened; the sheet's row must be
+ * locked. Answers the hash of the last line.
+ */
+export async function appendToLedger(
+  scope: ShopScope,
+  sheetId: string,
+  { by, at }: Doing,
+  events: readonly LedgerEvent[],
+): Promise<string> {
+  const ledger = new LedgerRepository(scope);
+  let last: Pick<LedgerLine, 'seq' | 'hash'> | null = await ledger.last(sheetId);
+  const lines = events.map((event) => {
+    const line = nextLine(last, { ...event, by, at: at.toISOString() });
+    last = line;
+    return { ...line, sheetId, at };
+  });
+  await ledger.insertAll(lines);
+  return lines.at(-1)?.hash ?? '';
+}
+
+/** The hash of a ledger's last line; the empty text when there is none. */
+export async function ledgerHead(scope: ShopScope, sheetId: string): Promise<string> {
+  return (await new LedgerRepository(scope).last(sheetId))?.hash ?? '';
+}
+
+/** A sheet's whole ledger, from its first line. */
+export async function wholeLedger(scope: ShopScope, sheetId: string): Promise<LedgerLine[]> {
+  return (await new LedgerRepository(scope).all(sheetId)).map(toLedgerLine);
+}
+
+/** A piece of a sheet's ledger, newest first, older than line `before` where it is given. */
+export async function newestLines(
+  scope: ShopScope,
+  sheetId: string,
+  before: number | null,
+  limit: number,
+): Promise<LedgerLine[]> {
+  return (await new LedgerRepository(scope).newest(sheetId, before, limit)).map(toLedgerLine);
+}
+
+const toLedgerLine = ({ seq, prevHash, hash, body, at }: LedgerLineEntity): LedgerLine => ({
+  ...{ seq, prevHash, hash, body },
+  at: at.toISOString(),
+});

@@ -1,0 +1,128 @@
+import { randomUUID } from 'node:crypto';
+import { InputError } from '@second-spanner/shared/contracts/input-error';
+import type { NewEntryRequest } from '@second-spanner/shared/contracts/sheets';
+import type { Judgement } from '@second-spanner/shared/contracts/verdict';
+import { entryAt } from '@second-spanner/shared/sheet/current-entries';
+import { judgeEntry } from '@second-spanner/shared/sheet/judge-entry';
+import { slotKeyOf } from '@second-spanner/shared/sheet/slots';
+import type { LedgerEvent } from '../ledger/ledger-event.js';
+import { badInput, conflict, refusedByRules } from '../platform/errors/http-problem.js';
+import type { SignedIn } from '../platform/signing-in/signed-in.js';
+import type { ToolsService } from '../registers/tools.service.js';
+import { isReplay, onceFor } from './once.service.js';
+import { whyPassShut } from './pass-order.js';
+import { PhotosRepository } from './photos.repository.js';
+import type { EntryRow } from './record.entity.js';
+import { RecordsRepository, type Once } from './records.repository.js';
+import type { Done, OpenSheet, SheetWork } from './sheet-work.service.js';
+import { raiseForFailure, settleByCorrection } from './snags-by-themselves.service.js';
+import { currentOf, type StepAtHand } from './step-at-hand.js';
+import { whyNotRecord } from './step-rules.js';
+
+/** Records what a builder read, pulled, saw or photographed. */
+export class EntriesService {
+  constructor(
+    private readonly work: SheetWork,
+    private readonly tools: ToolsService,
+  ) {}
+
+  /** Whether the entry is new; false when it was sent before under the same key. */
+  async record(
+    who: SignedIn,
+    sheetId: string,
+    code: string,
+    request: NewEntryRequest,
+    key: string,
+  ): Promise<boolean> {
+    const once = onceFor(key, { personId: who.person.id, sheetId, code, body: request });
+    return this.work.onStep(who, sheetId, code, async (open, step) => {
+      const sentBefore = await new RecordsRepository(open.scope).sentUnder('entries', key);
+      if (isReplay(sentBefore, once)) return null;
+      return this.keep(open, step, request, once);
+    });
+  }
+
+  private async keep(open: OpenSheet, step: StepAtHand, request: NewEntryRequest, once: Once): Promise<Done> {
+    const { scope, sheet, by, at } = open;
+    const why = whyNotRecord(step, by.id);
+    if (why !== null) throw refusedByRules(why);
+    requireItsPlace(step, request);
+    const judgement = await this.judge(open, step, request);
+    const round = roundOf(step, request);
+    const { replaces = null, reason: replaceReason = null, content } = request;
+    const entry: EntryRow = {
+      ...{ id: randomUUID(), round, content, ...judgement, replaces, replaceReason, by },
+      at: at.toISOString(),
+    };
+    const of = { sheetId: sheet.id, stepId: step.row.id };
+    await new RecordsRepository(scope).addEntry(of, entry, once);
+    const recorded = withEntry(step, entry);
+    const after =
+      entry.verdict === 'fail'
+        ? await raiseForFailure(open, recorded, entry)
+        : await settleByCorrection(open, recorded, entry);
+    return { events: [toEvent(step, entry), ...after.events], step: after.step };
+  }
+
+  private async judge(
+    { scope, at }: OpenSheet,
+    { records: { definition } }: StepAtHand,
+    { content }: NewEntryRequest,
+  ): Promise<Judgement> {
+    const tool = 'toolId' in content ? await this.tools.findIn(scope, content.toolId) : null;
+    if (content.kind === 'photo' && !(await new PhotosRepository(scope).isStored(content.fileId))) {
+      throw badInput({ field: 'content.fileId', message: 'There is no such photo: store it first.' });
+    }
+    const context = { tools: tool ? [tool] : [], on: at.toISOString().slice(0, 10) };
+    try {
+      const { verdict, reason } = judgeEntry(definition, content, context);
+      return { verdict, reason };
+    } catch (error) {
+      throw error instanceof InputError ? fromContent(error) : error;
+    }
+  }
+}
+
+/** A calculation names its own fields; on a step they lie in `content`. */
+export const fromContent = ({ field, message }: InputError): InputError =>
+  new InputError(/^content\b/.test(field) ? field : `content.${field}`, message);
+
+/** A slot holds one entry: the first, and then corrections of it, each with its reason. */
+function requireItsPlace(step: StepAtHand, { content, replaces, reason }: NewEntryRequest): void {
+  const current = currentOf(step);
+  const slot = slotKeyOf(content);
+  const holder = entryAt(current, slot);
+  if (replaces === undefined) {
+    if (reason !== undefined) throw badInput({ field: 'reason', message: 'Only a correction has a reason.' });
+    if (holder) throw conflict('This is recorded already. Correct it with a reason.');
+  } else {
+    if (reason === undefined) throw badInput({ field: 'reason', message: 'Say why it is corrected.' });
+    const old = step.records.entries.find(({ id }) => id === replaces);
+    if (!old) throw badInput({ field: 'replaces', message: 'There is no such entry on this step.' });
+    if (!current.some(({ id }) => id === replaces)) {
+      throw conflict('This entry counts no longer: it was corrected, or the step was done again.');
+    }
+    if (slotKeyOf(old.content) !== slot) {
+      throw badInput({ field: 'replaces', message: 'A correction is of the same place as what it corrects.' });
+    }
+  }
+  const shut = whyPassShut(step, content);
+  if (shut !== null) throw refusedByRules(shut);
+}
+
+/** A correction after a second reading of this round begins a new one: what was read again counts no longer. */
+function roundOf({ row, records }: StepAtHand, { replaces }: NewEntryRequest): number {
+  const readAgain = records.secondReadings.some(({ round }) => round === row.round);
+  return replaces !== undefined && readAgain ? row.round + 1 : row.round;
+}
+
+const withEntry = (step: StepAtHand, entry: EntryRow): StepAtHand => ({
+  ...step,
+  row: { ...step.row, round: entry.round },
+  records: { ...step.records, entries: [...step.records.entries, entry] },
+});
+
+function toEvent({ row }: StepAtHand, entry: EntryRow): LedgerEvent {
+  const { id, round, content, verdict, reason, replaces, replaceReason } = entry;
+  return { kind: 'entry', step: row.code, id, round, content, verdict, reason, replaces, replaceReason };
+}

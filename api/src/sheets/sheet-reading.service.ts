@@ -1,0 +1,96 @@
+import type { Page } from '@second-spanner/shared/contracts/paging';
+import type { Sheet, SheetSummary, SnagView, StepDetail } from '@second-spanner/shared/contracts/sheets';
+import type { Database, ShopScope } from '../platform/database/database.js';
+import { notFound } from '../platform/errors/http-problem.js';
+import type { SignedIn } from '../platform/signing-in/signed-in.js';
+import { pageOf, type Paging } from '../platform/validation/paging.js';
+import type { WholeSheetRow } from './sheet.entity.js';
+import { toSheet, toSheetSummary } from './sheet.mapper.js';
+import { SheetsRepository, type SheetFilter } from './sheets.repository.js';
+import type { StepAtHand } from './step-at-hand.js';
+import type { StepRow } from './step.entity.js';
+import { toSnag, toStepDetail } from './step.mapper.js';
+import { StepsRepository } from './steps.repository.js';
+
+/** Reads sheets as one person may see them. A car owner sees the sheets of their own cars. */
+export class SheetReading {
+  constructor(private readonly database: Database) {}
+
+  async list(who: SignedIn, filter: SheetFilter, paging: Paging): Promise<Page<SheetSummary>> {
+    const rows = await this.database.readShop(who.shop.id, (scope) =>
+      sheetsFor(who, scope).list(filter, paging),
+    );
+    return pageOf(rows, paging, ({ changedAt, id }) => [changedAt.toISOString(), id], toSheetSummary);
+  }
+
+  /** The sheets of a car, within somebody else's work on the database. */
+  readonly ofCar = async (scope: ShopScope, carId: string): Promise<SheetSummary[]> =>
+    (await new SheetsRepository(scope).ofCar(carId)).map(toSheetSummary);
+
+  async version(who: SignedIn, id: string): Promise<number> {
+    const version = await this.database.readShop(who.shop.id, (scope) => sheetsFor(who, scope).version(id));
+    if (version === null) throw notFound('sheet');
+    return version;
+  }
+
+  async sheet(who: SignedIn, id: string): Promise<Sheet> {
+    return this.database.readShop(who.shop.id, async (scope) => {
+      const row = await findSheet(who, scope, id);
+      return toSheet(row, await new StepsRepository(scope).list(id), who.person);
+    });
+  }
+
+  async step(who: SignedIn, id: string, code: string): Promise<StepDetail> {
+    return this.database.readShop(who.shop.id, async (scope) => {
+      const sheet = await findSheet(who, scope, id);
+      const step = await findStep(scope, sheet, code);
+      return toStepDetail({ sheetId: id, version: sheet.version, step, person: who.person });
+    });
+  }
+
+  /** All snags of a sheet, oldest first. */
+  async snags(who: SignedIn, id: string): Promise<SnagView[]> {
+    return this.database.readShop(who.shop.id, async (scope) => {
+      const sheet = await findSheet(who, scope, id);
+      const steps = await allSteps(scope, sheet);
+      return steps
+        .flatMap((step) => step.records.snags.map((snag) => toSnag(step, snag, who.person)))
+        .sort((a, b) => a.at.localeCompare(b.at));
+    });
+  }
+}
+
+export const sheetsFor = ({ person }: SignedIn, scope: ShopScope): SheetsRepository =>
+  new SheetsRepository(scope, person.role === 'car-owner' ? person.id : null);
+
+export async function findSheet(who: SignedIn, scope: ShopScope, id: string): Promise<WholeSheetRow> {
+  const row = await sheetsFor(who, scope).find(id);
+  if (!row) throw notFound('sheet');
+  return row;
+}
+
+async function findStep(scope: ShopScope, sheet: WholeSheetRow, code: string): Promise<StepAtHand> {
+  const repository = new StepsRepository(scope);
+  const steps = await repository.list(sheet.id);
+  const found = await repository.withRecords(sheet.id, code);
+  if (!found) throw notFound('step');
+  return { ...onSheet(sheet, steps), row: found, records: found };
+}
+
+/** Every step of a sheet with its records. */
+export async function allSteps(
+  scope: ShopScope,
+  sheet: Pick<WholeSheetRow, 'id' | 'state' | 'countersigner'>,
+): Promise<StepAtHand[]> {
+  const steps = await new StepsRepository(scope).allWithRecords(sheet.id);
+  return steps.map((step) => ({ ...onSheet(sheet, steps), row: step, records: step }));
+}
+
+const onSheet = (
+  { state, countersigner }: Pick<WholeSheetRow, 'state' | 'countersigner'>,
+  steps: readonly StepRow[],
+): Pick<StepAtHand, 'sheetState' | 'secondPerson' | 'steps'> => ({
+  sheetState: state,
+  secondPerson: countersigner.name,
+  steps,
+});
