@@ -29,7 +29,7 @@ export interface Engine {
 
 const mostPositions = 50;
 const mostSightings = 32;
-const mostThings = 400;
+const mostInAll = 300;
 
 /** The crank positions of a request, as yet unread. Throws `InputError` on `sightings`. */
 export function requirePositions(input: unknown): readonly unknown[] {
@@ -47,17 +47,15 @@ export function requireSeen(
   engine: Engine,
   maybeEmpty?: number,
 ): readonly Seen[] {
-  const seen = positions.flatMap((list, position) => {
-    const path = `sightings[${position}]`;
-    const min = position === maybeEmpty ? 0 : 1;
-    return requireList(list, path, { min, max: mostSightings }).flatMap((sighting, i) =>
-      thingsSeen(sighting, engine, position, `${path}[${i}]`),
-    );
-  });
-  if (seen.length > mostThings) {
-    throw new InputError('sightings', `At most ${mostThings} things seen can be weighed together.`);
+  const lists = positions.map((list, position) =>
+    requireList(list, `sightings[${position}]`, { min: position === maybeEmpty ? 0 : 1, max: mostSightings }),
+  );
+  if (lists.reduce((sum, list) => sum + list.length, 0) > mostInAll) {
+    throw new InputError('sightings', `At most ${mostInAll} sightings can be weighed together.`);
   }
-  return seen;
+  return lists.flatMap((list, position) =>
+    list.flatMap((sighting, i) => thingsSeen(sighting, engine, position, `sightings[${position}][${i}]`)),
+  );
 }
 
 /** The timing marks seen together, which then mean the TDC named. */

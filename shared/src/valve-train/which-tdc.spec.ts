@@ -274,7 +274,7 @@ describe('input that cannot be used', () => {
     const firingOrder = Array.from({ length: 16 }, (_, i) => i + 1);
     const started = performance.now();
     const { answer } = ask(
-      Array.from({ length: 12 }, () => all),
+      Array.from({ length: 9 }, () => all),
       { firingOrder },
     );
     expect(answer).toBe('contradiction');
