@@ -18,6 +18,7 @@ import { SessionCookies } from './platform/signing-in/cookies.js';
 import { xsrf } from './platform/signing-in/xsrf.js';
 import { toolRoutes } from './registers/tools.routes.js';
 import type { Services } from './services.js';
+import { sheetRoutes } from './sheets/sheets.routes.js';
 import { specRoutes } from './spec-book/specs.routes.js';
 
 export interface AppDependencies {
@@ -45,7 +46,7 @@ export function createApp(deps: AppDependencies): Express {
 }
 
 function apiRoutes({ config, database, services }: AppDependencies): Router {
-  const { sessions, people, cars, specs, tools } = services;
+  const { sessions, people, cars, specs, tools, sheets } = services;
   const cookies = new SessionCookies(config.publicUrl);
   const api = Router();
   api.use(noStore);
@@ -59,6 +60,7 @@ function apiRoutes({ config, database, services }: AppDependencies): Router {
   api.use('/cars', carRoutes(cars));
   api.use('/specs', specRoutes(specs));
   api.use('/tools', toolRoutes(tools));
+  api.use('/sheets', sheetRoutes(sheets));
   api.use('/calculations', calculationRoutes());
   api.use(unknownRoute);
   return api;

@@ -1,4 +1,4 @@
-import { CarsService, type SheetsOfCar } from './car-files/cars.service.js';
+import { CarsService } from './car-files/cars.service.js';
 import type { Config } from './config.js';
 import { PeopleService } from './people/people.service.js';
 import { Passwords } from './people/passwords.js';
@@ -7,6 +7,7 @@ import { SessionsService } from './people/sessions.service.js';
 import type { Database } from './platform/database/database.js';
 import type { ReadSession } from './platform/signing-in/authentication.js';
 import { ToolsService } from './registers/tools.service.js';
+import { createSheetServices, type SheetServices } from './sheets/sheet-services.js';
 import { SpecsService } from './spec-book/specs.service.js';
 
 export interface Services {
@@ -16,22 +17,30 @@ export interface Services {
   readonly cars: CarsService;
   readonly specs: SpecsService;
   readonly tools: ToolsService;
+  readonly sheets: SheetServices;
 }
 
 type ServiceConfig = Pick<Config, 'secret' | 'passwordCost'>;
 
-const noSheets: SheetsOfCar = () => Promise.resolve([]);
-
-/** All services, each made once and given what it needs. */
-export function createServices({ secret, passwordCost }: ServiceConfig, database: Database): Services {
+/**
+ * All services, each made once and given what it needs.
+ * @param now the clock that everything recorded on sheets is dated by
+ */
+export function createServices(
+  { secret, passwordCost }: ServiceConfig,
+  database: Database,
+  now = (): Date => new Date(),
+): Services {
   const passwords = new Passwords(passwordCost);
   const readSession = sessionReader(database);
+  const specs = new SpecsService(database);
+  const tools = new ToolsService(database);
+  const sheets = createSheetServices({ database, specs, tools, now });
   return {
     readSession,
     sessions: new SessionsService(database, passwords, secret, readSession),
     people: new PeopleService(database, passwords),
-    cars: new CarsService(database, noSheets),
-    specs: new SpecsService(database),
-    tools: new ToolsService(database),
+    cars: new CarsService(database, sheets.reading.ofCar),
+    ...{ specs, tools, sheets },
   };
 }

@@ -103,7 +103,10 @@ function requireItsPlace(step: StepAtHand, { content, replaces, reason }: NewEnt
       throw conflict('This entry counts no longer: it was corrected, or the step was done again.');
     }
     if (slotKeyOf(old.content) !== slot) {
-      throw badInput({ field: 'replaces', message: 'A correction is of the same place as what it corrects.' });
+      throw badInput({
+        field: 'replaces',
+        message: 'A correction is of the same place as what it corrects.',
+      });
     }
   }
   const shut = whyPassShut(step, content);

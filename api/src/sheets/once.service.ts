@@ -20,7 +20,10 @@ export function parseKey(header: string | undefined): string {
   return header.toLowerCase();
 }
 
-export const onceFor = (key: string, request: OnceRequest): Once => ({ key, bodyHash: canonicalHash(request) });
+export const onceFor = (key: string, request: OnceRequest): Once => ({
+  key,
+  bodyHash: canonicalHash(request),
+});
 
 /** Whether the request was sent before. Throws a 409 problem when its key stood under something else. */
 export function isReplay(sentBefore: string | null, { bodyHash }: Once): boolean {

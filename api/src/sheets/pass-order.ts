@@ -17,8 +17,7 @@ export function whyPassShut(step: StepAtHand, content: EntryContent): string | n
     ({ pass, fastener }) =>
       pass < content.pass &&
       !good.some(
-        ({ content: done }) =>
-          done.kind === 'tightening' && done.pass === pass && done.fastener === fastener,
+        ({ content: done }) => done.kind === 'tightening' && done.pass === pass && done.fastener === fastener,
       ),
   );
   if (!open) return null;

@@ -54,11 +54,7 @@ export const raiseForFailure = (open: OpenSheet, step: StepAtHand, entry: EntryR
   raiseSnag(open, step, { cause: 'failed', words: entry.reason, parties: [], entryId: entry.id });
 
 /** A correction that passes settles what failed at its place before. */
-export async function settleByCorrection(
-  open: OpenSheet,
-  step: StepAtHand,
-  entry: EntryRow,
-): Promise<After> {
+export async function settleByCorrection(open: OpenSheet, step: StepAtHand, entry: EntryRow): Promise<After> {
   if (entry.verdict !== 'pass' || entry.replaces === null) return { step, events: [] };
   const slot = slotKeyOf(entry.content);
   const failedHere = new Set(

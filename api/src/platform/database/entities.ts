@@ -1,4 +1,5 @@
 import { CarEntity } from '../../car-files/car.entity.js';
+import { LedgerLineEntity } from '../../ledger/ledger-line.entity.js';
 import { PersonEntity } from '../../people/person.entity.js';
 import { SessionEntity } from '../../people/session.entity.js';
 import { ShopEntity } from '../../people/shop.entity.js';
@@ -19,4 +20,5 @@ export const entities = [
   SpecEditionEntity,
   SheetEntity,
   StepEntity,
+  LedgerLineEntity,
 ];
