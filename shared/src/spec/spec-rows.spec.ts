@@ -1,5 +1,7 @@
 import { describe, expect, it } from 'vitest';
 import at18 from '../../../test-data/specs/ok/at18.json' with { type: 'json' };
+import bx26 from '../../../test-data/specs/ok/bx26.json' with { type: 'json' };
+import cv34 from '../../../test-data/specs/ok/cv34.json' with { type: 'json' };
 import { checkSpecDocument } from './check-document.js';
 import { countValues, specRows, specSections } from './spec-rows.js';
 
@@ -48,7 +50,11 @@ describe('the rows of a spec', () => {
 });
 
 describe('the demo specs', () => {
-  it.each([{ name: 'AT18', input: at18 as unknown }])('$name holds at least 120 values', ({ input }) => {
+  it.each([
+    { name: 'AT18', input: at18 as unknown },
+    { name: 'BX26', input: bx26 },
+    { name: 'CV34', input: cv34 },
+  ])('$name holds at least 120 values', ({ input }) => {
     expect(countValues(checkSpecDocument(input))).toBeGreaterThanOrEqual(120);
   });
 });

@@ -1,13 +1,19 @@
 import { readFileSync } from 'node:fs';
 import { describe, expect, it } from 'vitest';
 import at18 from '../../../../test-data/specs/ok/at18.json' with { type: 'json' };
+import bx26 from '../../../../test-data/specs/ok/bx26.json' with { type: 'json' };
+import cv34 from '../../../../test-data/specs/ok/cv34.json' with { type: 'json' };
 import type { SpecDocument } from '../../contracts/spec.js';
 import type { StepDefinition } from '../../contracts/steps.js';
 import { checkSpecDocument } from '../../spec/check-document.js';
 import { planOf } from '../plan-of.js';
 import { capRequestOf, proposeSheet, valveTimingOf } from './propose-sheet.js';
 
-const specs = [{ name: 'at18', document: checkSpecDocument(at18) }];
+const specs = [
+  { name: 'at18', document: checkSpecDocument(at18) },
+  { name: 'bx26', document: checkSpecDocument(bx26) },
+  { name: 'cv34', document: checkSpecDocument(cv34) },
+];
 
 /** Stages that design calls hold stages. */
 const holdStages = [1, 3, 4, 5, 8, 9, 11, 12];
@@ -136,6 +142,40 @@ describe.each(specs)('the sheet proposed for $name', ({ name, document }) => {
         expect(cautions).toContain(own.text.value);
       }
     }
+  });
+});
+
+describe('what one engine has and another has not', () => {
+  const titles = (input: unknown): string[] =>
+    proposeSheet(checkSpecDocument(input)).steps.map(({ title, instruction }) => `${title}: ${instruction}`);
+
+  it('puts mushroom followers in before the camshaft', () => {
+    const steps = titles(bx26);
+    const mushroom = steps.findIndex((step) => step.startsWith('Mushroom {followers}'));
+    expect(mushroom).toBeGreaterThan(-1);
+    expect(mushroom).toBeLessThan(steps.findIndex((step) => step.startsWith('Camshaft in:')));
+    expect(titles(at18).some((step) => step.startsWith('Mushroom'))).toBe(false);
+  });
+
+  it('tightens the heads of a vee by bank, and turns its rod chamfers outwards', () => {
+    const steps = titles(cv34);
+    expect(steps.filter((step) => /^Tighten the head bolts, bank [12]:/.test(step))).toHaveLength(2);
+    expect(steps.some((step) => step.startsWith('Valley manifold faces meet'))).toBe(true);
+    expect(steps.some((step) => step.includes('chamfers look outwards'))).toBe(true);
+    expect(titles(at18).some((step) => step.includes('chamfer'))).toBe(false);
+  });
+
+  it('sets hot clearances after the run, and preload where the followers are hydraulic', () => {
+    const hot = proposeSheet(checkSpecDocument(bx26)).steps.filter(({ title }) =>
+      title.includes('engine hot'),
+    );
+    expect(hot.map(({ stage }) => stage)).toEqual([14, 14]);
+    expect(titles(cv34).filter((step) => step.includes('preload,')).length).toBe(2);
+  });
+
+  it('traces a cap only where the outlets do not show their posts', () => {
+    expect(titles(at18).some((step) => step.startsWith('Cap traced'))).toBe(true);
+    expect(titles(bx26).some((step) => step.startsWith('Cap traced'))).toBe(false);
   });
 });
 
