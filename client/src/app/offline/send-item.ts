@@ -16,7 +16,8 @@ export type Sent =
 const patience = { entry: 20_000, photo: 120_000 };
 
 /** These may go well when tried again later: no network, signed out, too many tries, the server unwell. */
-const mayPass = ({ status }: ApiProblem): boolean => status === 0 || status === 401 || status === 429 || status >= 500;
+const mayPass = ({ status }: ApiProblem): boolean =>
+  status === 0 || status === 401 || status === 429 || status >= 500;
 
 /** Sends one entry of the tray, its photo first where it has one. */
 @Injectable({ providedIn: 'root' })

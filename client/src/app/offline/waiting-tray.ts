@@ -78,7 +78,10 @@ export class WaitingTray {
     const sent = await this.sender.send({ ...item, seq: -1 });
     if (sent.state === 'kept') this.taken.next(sent.step);
     if (sent.state !== 'waiting') return sent;
-    return { state: 'refused', problem: new ApiProblem(0, 'No network, and this browser window keeps nothing.') };
+    return {
+      state: 'refused',
+      problem: new ApiProblem(0, 'No network, and this browser window keeps nothing.'),
+    };
   }
 
   /** Takes an item out for good. */

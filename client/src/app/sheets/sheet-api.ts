@@ -1,4 +1,4 @@
-import { HttpClient } from '@angular/common/http';
+import { HttpClient, HttpParams } from '@angular/common/http';
 import { inject, Injectable } from '@angular/core';
 import type { Page } from '@second-spanner/shared/contracts/paging';
 import type {
@@ -28,7 +28,12 @@ export class SheetApi {
     return this.http.post<Sheet>(`/api/sheets/${sheetId}/start`, {});
   }
 
-  readAgain(sheetId: string, code: string, request: NewSecondReadingRequest, key: string): Observable<StepDetail> {
+  readAgain(
+    sheetId: string,
+    code: string,
+    request: NewSecondReadingRequest,
+    key: string,
+  ): Observable<StepDetail> {
     return this.postOnce(`${stepUrl(sheetId, code)}/second-readings`, request, key);
   }
 
@@ -58,7 +63,7 @@ export class SheetApi {
   }
 
   history(sheetId: string, cursor: string | null): Observable<Page<HistoryLine>> {
-    const params = cursor === null ? {} : { cursor };
+    const params = new HttpParams({ fromObject: cursor === null ? {} : { cursor } });
     return this.http.get<Page<HistoryLine>>(`/api/sheets/${sheetId}/history`, { params });
   }
 

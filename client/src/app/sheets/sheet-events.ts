@@ -11,7 +11,9 @@ function openLine(sheetId: string): Observable<SheetNews> {
   return new Observable((subscriber) => {
     const source = new EventSource(`/api/sheets/${sheetId}/events`);
     source.addEventListener('open', () => subscriber.next('line-open'));
-    source.addEventListener('changed', (event) => subscriber.next(JSON.parse(event.data as string) as SheetChanged));
+    source.addEventListener('changed', (event) =>
+      subscriber.next(JSON.parse(event.data as string) as SheetChanged),
+    );
     source.addEventListener('error', () => {
       // While it connects the browser tries by itself; a closed line, as after signing in anew, is ours to open.
       if (source.readyState === EventSource.CLOSED) subscriber.error(new Error('The line was closed.'));

@@ -57,7 +57,8 @@ export class SheetStore {
     effect(() => {
       const id = this.openId();
       line?.unsubscribe();
-      line = id === null ? undefined : sheetNews(id, () => this.refresh()).subscribe((news) => this.hear(news));
+      line =
+        id === null ? undefined : sheetNews(id, () => this.refresh()).subscribe((news) => this.hear(news));
     });
     inject(DestroyRef).onDestroy(() => line?.unsubscribe());
 

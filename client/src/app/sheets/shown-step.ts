@@ -25,7 +25,9 @@ export function shownStep(
 ): ShownStep {
   const waiting = items.filter(({ refused }) => refused === undefined);
   const replacedBy = new Map(
-    waiting.flatMap(({ key, request }) => (request.replaces === undefined ? [] : [[request.replaces, key] as const])),
+    waiting.flatMap(({ key, request }) =>
+      request.replaces === undefined ? [] : [[request.replaces, key] as const],
+    ),
   );
   const known = step.entries.map((entry): ShownEntry => {
     const later = replacedBy.get(entry.id);
@@ -33,7 +35,10 @@ export function shownStep(
       ? { ...entry, inTray: null }
       : { ...entry, replacedBy: later, current: false, inTray: null };
   });
-  return { ...step, entries: [...known, ...items.map((item) => fromTray(item, step, by, tools, replacedBy))] };
+  return {
+    ...step,
+    entries: [...known, ...items.map((item) => fromTray(item, step, by, tools, replacedBy))],
+  };
 }
 
 function fromTray(

@@ -17,7 +17,9 @@ import type { SaveState } from './save-state';
         <p class="small quiet">Saving…</p>
       }
       @case ('kept') {
-        <p class="small quiet">Kept at <span class="f">{{ save.at | when }}</span>.</p>
+        <p class="small quiet">
+          Kept at <span class="f">{{ save.at | when }}</span>.
+        </p>
       }
       @case ('waiting') {
         <p class="small line"><ss-sign name="waiting" />Kept on this device; waiting for the network.</p>
