@@ -35,12 +35,12 @@ export function createServices(
   const readSession = sessionReader(database);
   const specs = new SpecsService(database);
   const tools = new ToolsService(database);
-  const sheets = createSheetServices({ database, specs, tools, now });
+  const people = new PeopleService(database, passwords);
+  const sheets = createSheetServices({ database, specs, tools, people, now });
   return {
     readSession,
     sessions: new SessionsService(database, passwords, secret, readSession),
-    people: new PeopleService(database, passwords),
     cars: new CarsService(database, sheets.reading.ofCar),
-    ...{ specs, tools, sheets },
+    ...{ people, specs, tools, sheets },
   };
 }

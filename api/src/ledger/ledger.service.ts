@@ -13,14 +13,15 @@ export interface Doing {
 
 /**
  * Appends what happened to a sheet's ledger, in the transaction in which it happened; the sheet's row must be
- * locked. Answers the hash of the last line.
+ * locked.
  */
 export async function appendToLedger(
   scope: ShopScope,
   sheetId: string,
   { by, at }: Doing,
   events: readonly LedgerEvent[],
-): Promise<string> {
+): Promise<void> {
+  if (events.length === 0) return;
   const ledger = new LedgerRepository(scope);
   let last: Pick<LedgerLine, 'seq' | 'hash'> | null = await ledger.last(sheetId);
   const lines = events.map((event) => {
@@ -29,12 +30,6 @@ export async function appendToLedger(
     return { ...line, sheetId, at };
   });
   await ledger.insertAll(lines);
-  return lines.at(-1)?.hash ?? '';
-}
-
-/** The hash of a ledger's last line; the empty text when there is none. */
-export async function ledgerHead(scope: ShopScope, sheetId: string): Promise<string> {
-  return (await new LedgerRepository(scope).last(sheetId))?.hash ?? '';
 }
 
 /** A sheet's whole ledger, from its first line. */

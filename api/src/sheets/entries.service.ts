@@ -9,13 +9,14 @@ import type { LedgerEvent } from '../ledger/ledger-event.js';
 import { badInput, conflict, refusedByRules } from '../platform/errors/http-problem.js';
 import type { SignedIn } from '../platform/signing-in/signed-in.js';
 import type { ToolsService } from '../registers/tools.service.js';
+import { fromContent } from './from-content.js';
 import { isReplay, onceFor } from './once.service.js';
 import { whyPassShut } from './pass-order.js';
 import { PhotosRepository } from './photos.repository.js';
 import type { EntryRow } from './record.entity.js';
 import { RecordsRepository, type Once } from './records.repository.js';
 import type { Done, OpenSheet, SheetWork } from './sheet-work.service.js';
-import { raiseForFailure, settleByCorrection } from './snags-by-themselves.service.js';
+import { raiseForFailure, settleByCorrection } from './snag-deeds.service.js';
 import { currentOf, type StepAtHand } from './step-at-hand.js';
 import { whyNotRecord } from './step-rules.js';
 
@@ -82,10 +83,6 @@ export class EntriesService {
     }
   }
 }
-
-/** A calculation names its own fields; on a step they lie in `content`. */
-export const fromContent = ({ field, message }: InputError): InputError =>
-  new InputError(/^content\b/.test(field) ? field : `content.${field}`, message);
 
 /** A slot holds one entry: the first, and then corrections of it, each with its reason. */
 function requireItsPlace(step: StepAtHand, { content, replaces, reason }: NewEntryRequest): void {

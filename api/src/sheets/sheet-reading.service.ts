@@ -4,6 +4,8 @@ import type { Database, ShopScope } from '../platform/database/database.js';
 import { notFound } from '../platform/errors/http-problem.js';
 import type { SignedIn } from '../platform/signing-in/signed-in.js';
 import { pageOf, type Paging } from '../platform/validation/paging.js';
+import type { ToolsService } from '../registers/tools.service.js';
+import { contentOf, type SheetContent } from './sheet-content.js';
 import type { WholeSheetRow } from './sheet.entity.js';
 import { toSheet, toSheetSummary } from './sheet.mapper.js';
 import { SheetsRepository, type SheetFilter } from './sheets.repository.js';
@@ -14,7 +16,10 @@ import { StepsRepository } from './steps.repository.js';
 
 /** Reads sheets as one person may see them. A car owner sees the sheets of their own cars. */
 export class SheetReading {
-  constructor(private readonly database: Database) {}
+  constructor(
+    private readonly database: Database,
+    private readonly tools: ToolsService,
+  ) {}
 
   async list(who: SignedIn, filter: SheetFilter, paging: Paging): Promise<Page<SheetSummary>> {
     const rows = await this.database.readShop(who.shop.id, (scope) =>
@@ -48,6 +53,14 @@ export class SheetReading {
     });
   }
 
+  /** A sheet whole and uncovered, for signing, within somebody else's work on the database. */
+  async wholeIn(scope: ShopScope, who: SignedIn, id: string): Promise<WholeSheet> {
+    const row = await findSheet(who, scope, id);
+    const steps = await allSteps(scope, row);
+    const content = contentOf(row, steps, await this.tools.listIn(scope));
+    return { row, steps: steps.map((step) => step.row), content };
+  }
+
   /** All snags of a sheet, oldest first. */
   async snags(who: SignedIn, id: string): Promise<SnagView[]> {
     return this.database.readShop(who.shop.id, async (scope) => {
@@ -58,6 +71,13 @@ export class SheetReading {
         .sort((a, b) => a.at.localeCompare(b.at));
     });
   }
+}
+
+/** A sheet with its steps, and its content as it would be signed. */
+export interface WholeSheet {
+  readonly row: WholeSheetRow;
+  readonly steps: readonly StepRow[];
+  readonly content: SheetContent;
 }
 
 export const sheetsFor = ({ person }: SignedIn, scope: ShopScope): SheetsRepository =>

@@ -1,34 +1,53 @@
 import type { Database } from '../platform/database/database.js';
+import type { PeopleService } from '../people/people.service.js';
 import type { ToolsService } from '../registers/tools.service.js';
 import type { SpecsService } from '../spec-book/specs.service.js';
+import { CountersigningService } from './countersigning.service.js';
 import { EntriesService } from './entries.service.js';
 import { LayOutService } from './lay-out.service.js';
+import { SecondReadingsService } from './second-readings.service.js';
 import { SheetReading } from './sheet-reading.service.js';
 import { SheetWork, type Now } from './sheet-work.service.js';
+import { SigningService } from './signing.service.js';
+import { SnagsService } from './snags.service.js';
 import { StartService } from './start.service.js';
+import { UnmarkingService } from './unmarking.service.js';
 
 export interface SheetServices {
   readonly reading: SheetReading;
   readonly layOut: LayOutService;
   readonly start: StartService;
   readonly entries: EntriesService;
+  readonly secondReadings: SecondReadingsService;
+  readonly countersigning: CountersigningService;
+  readonly snags: SnagsService;
+  readonly unmarking: UnmarkingService;
+  readonly signing: SigningService;
 }
 
 interface Needs {
   readonly database: Database;
   readonly specs: SpecsService;
   readonly tools: ToolsService;
+  readonly people: PeopleService;
   /** What everything recorded is dated by. */
   readonly now: Now;
 }
 
 /** Everything that can be done with sheets, one service a deed. */
-export function createSheetServices({ database, specs, tools, now }: Needs): SheetServices {
+export function createSheetServices({ database, specs, tools, people, now }: Needs): SheetServices {
   const work = new SheetWork(database, now);
+  const reading = new SheetReading(database, tools);
+  const secondReadings = new SecondReadingsService(work, tools);
   return {
-    reading: new SheetReading(database),
+    reading,
     layOut: new LayOutService(database, specs, now),
     start: new StartService(work),
     entries: new EntriesService(work, tools),
+    secondReadings,
+    countersigning: new CountersigningService(work, secondReadings),
+    snags: new SnagsService(work),
+    unmarking: new UnmarkingService(work),
+    signing: new SigningService(work, reading, people),
   };
 }

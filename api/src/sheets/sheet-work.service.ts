@@ -80,8 +80,9 @@ export async function openStep({ scope, sheet }: OpenSheet, code: string): Promi
 async function close({ scope, sheet, by, at }: OpenSheet, { events, step, change }: Done): Promise<void> {
   const counted = step && (await closeStep(scope, step, at));
   const version = sheet.version + 1;
-  await new SheetsRepository(scope).update(sheet.id, { ...counted, ...change, version, changedAt: at });
+  // The ledger first: a sheet that is released takes no more lines.
   await appendToLedger(scope, sheet.id, { by, at }, events);
+  await new SheetsRepository(scope).update(sheet.id, { ...counted, ...change, version, changedAt: at });
   notifySheetChanged(scope, sheet.id, version);
 }
 

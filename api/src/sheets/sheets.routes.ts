@@ -1,18 +1,19 @@
 import { Router, type Request } from 'express';
 import { sheetStates } from '@second-spanner/shared/contracts/sheets';
 import { badInput } from '../platform/errors/http-problem.js';
-import { allow } from '../platform/signing-in/authentication.js';
+import { passwordLimit } from '../platform/http/rate-limits.js';
+import { allow, signedInOnly } from '../platform/signing-in/authentication.js';
 import { signedIn } from '../platform/signing-in/signed-in.js';
 import { parsePaging } from '../platform/validation/paging.js';
 import { parseBody } from '../platform/validation/parse-body.js';
 import { isId, parseId } from '../platform/validation/parse-id.js';
-import { NewSheetDto } from './sheets.dto.js';
+import { NewSheetDto, SendBackDto, SettleSnagDto, SignDto } from './sheets.dto.js';
 import type { SheetServices } from './sheet-services.js';
 import { stepRoutes } from './steps.routes.js';
 
 /** `/sheets`: assembly sheets. */
 export function sheetRoutes(services: SheetServices): Router {
-  const { reading, layOut, start } = services;
+  const { reading, layOut, start, snags, signing } = services;
   const router = Router();
   router.get('/', allow('sheets.read'), async (request, response) => {
     const paging = parsePaging(request.query, 2);
@@ -41,6 +42,22 @@ export function sheetRoutes(services: SheetServices): Router {
   });
   router.get('/:id/snags', allow('sheets.read'), async (request, response) => {
     response.json(await reading.snags(signedIn(request), sheetId(request)));
+  });
+  router.post('/:id/snags/:snagId/settlements', allow('snags.settle'), async (request, response) => {
+    const [who, id] = [signedIn(request), sheetId(request)];
+    const snagId = parseId(request.params['snagId'], 'snag');
+    const code = await snags.settle(who, id, snagId, parseBody(SettleSnagDto, request.body));
+    response.json(await reading.step(who, id, code));
+  });
+  router.post('/:id/signatures', signedInOnly, passwordLimit(), async (request, response) => {
+    const [who, id] = [signedIn(request), sheetId(request)];
+    await signing.sign(who, id, parseBody(SignDto, request.body));
+    response.json(await reading.sheet(who, id));
+  });
+  router.post('/:id/send-back', allow('sheets.send-back'), async (request, response) => {
+    const [who, id] = [signedIn(request), sheetId(request)];
+    await signing.sendBack(who, id, parseBody(SendBackDto, request.body));
+    response.json(await reading.sheet(who, id));
   });
   router.use('/:id/steps/:code', stepRoutes(services));
   return router;

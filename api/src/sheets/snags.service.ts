@@ -1,0 +1,56 @@
+import type { NewSnagRequest, SettleSnagRequest } from '@second-spanner/shared/contracts/sheets';
+import { may } from '@second-spanner/shared/contracts/permissions';
+import { conflict, forbidden, notFound, refusedByRules } from '../platform/errors/http-problem.js';
+import type { SignedIn } from '../platform/signing-in/signed-in.js';
+import type { SnagRow } from './record.entity.js';
+import { openStep, type SheetWork } from './sheet-work.service.js';
+import { raiseSnag, settle } from './snag-deeds.service.js';
+import { SnagsRepository } from './snags.repository.js';
+import type { StepAtHand } from './step-at-hand.js';
+import { whyNotSettle, whySheetClosed } from './step-rules.js';
+
+/** Raises and settles snags. */
+export class SnagsService {
+  constructor(private readonly work: SheetWork) {}
+
+  async raise(who: SignedIn, sheetId: string, code: string, { words }: NewSnagRequest): Promise<void> {
+    await this.work.onStep(who, sheetId, code, async (open, step) => {
+      const closed = whySheetClosed(step.sheetState);
+      if (closed !== null) throw refusedByRules(closed);
+      return raiseSnag(open, step, { cause: 'raised', words, parties: [], entryId: null });
+    });
+  }
+
+  /** Settles a snag and answers the code of its step. */
+  async settle(who: SignedIn, sheetId: string, snagId: string, request: SettleSnagRequest): Promise<string> {
+    if (request.how === 'accepted-as-it-is' && !may(who.person.role, 'snags.accept')) {
+      throw forbidden('Only a foreman accepts a {snag} as it is.');
+    }
+    let stepCode = '';
+    await this.work.onSheet(who, sheetId, async (open) => {
+      const code = await new SnagsRepository(open.scope).stepOf(sheetId, snagId);
+      if (code === null) throw notFound('snag');
+      stepCode = code;
+      const step = await openStep(open, code);
+      const snag = step.records.snags.find(({ id }) => id === snagId);
+      if (!snag) throw notFound('snag');
+      if (snag.settled) throw conflict(`This {snag} was settled by ${snag.settled.by.name} already.`);
+      const why = whyNotSettle(step, snag, open.by.id);
+      if (why !== null) throw refusedByRules(why);
+      const { step: settled, events } = await settle(open, step, snag, request);
+      return { events, step: withRounds(settled, snag, request) };
+    });
+    return stepCode;
+  }
+}
+
+/**
+ * What was redone or replaced begins a new round: second readings and countersignatures count no longer. After a
+ * disagreement what was recorded counts no longer either.
+ */
+function withRounds(step: StepAtHand, { cause }: SnagRow, { how }: SettleSnagRequest): StepAtHand {
+  if (how === 'accepted-as-it-is') return step;
+  const round = step.row.round + 1;
+  const entriesFromRound = cause === 'disagreement' ? round : step.row.entriesFromRound;
+  return { ...step, row: { ...step.row, round, entriesFromRound } };
+}
