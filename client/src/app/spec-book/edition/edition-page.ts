@@ -1,7 +1,6 @@
 import { httpResource } from '@angular/common/http';
 import { ChangeDetectionStrategy, Component, computed, effect, inject, input } from '@angular/core';
-import { MatTabLink, MatTabNav, MatTabNavPanel } from '@angular/material/tabs';
-import { RouterLink } from '@angular/router';
+import { Router, RouterLink } from '@angular/router';
 import type { SpecEdition } from '@second-spanner/shared/contracts/spec';
 import { specRows, specSections } from '@second-spanner/shared/spec/spec-rows';
 import { Cell } from '../../layout/cell';
@@ -17,26 +16,14 @@ import { ValueTable } from './value-table';
 /** One edition of a spec, read section by section; each section has its own address. */
 @Component({
   selector: 'ss-edition-page',
-  imports: [
-    Cell,
-    EditionAside,
-    EmptyState,
-    LoadState,
-    MatTabLink,
-    MatTabNav,
-    MatTabNavPanel,
-    RouterLink,
-    TitleBlock,
-    TradeWords,
-    ValueTable,
-    When,
-  ],
+  imports: [Cell, EditionAside, EmptyState, LoadState, RouterLink, TitleBlock, TradeWords, ValueTable, When],
   changeDetection: ChangeDetectionStrategy.OnPush,
   templateUrl: './edition-page.html',
   styleUrl: './edition-page.scss',
 })
 export class EditionPage {
   private readonly title = inject(PageTitle);
+  private readonly router = inject(Router);
 
   readonly id = input.required<string>();
   readonly edition = input.required<string>();
@@ -64,5 +51,10 @@ export class EditionPage {
       const spec = this.spec();
       if (spec !== null) this.title.name(`${spec.title}, edition ${spec.edition}`);
     });
+  }
+
+  protected goTo(event: Event): void {
+    const { value } = event.target as HTMLSelectElement;
+    void this.router.navigate(['/specs', this.id(), this.edition(), value]);
   }
 }

@@ -3,6 +3,7 @@ import type { SpecRow } from '@second-spanner/shared/spec/spec-rows';
 import { Sentence } from '../../quantity/sentence';
 import { Sign } from '../../verdict/sign';
 import { TradeWords } from '../../words/trade-words';
+import { valueLines } from './lines';
 
 /** A section's values, each with its limits, the other printed figure and where it comes from. */
 @Component({
@@ -15,6 +16,7 @@ import { TradeWords } from '../../words/trade-words';
 export class ValueTable {
   readonly rows = input.required<readonly SpecRow[]>();
 
+  protected readonly lines = computed(() => valueLines(this.rows()));
   protected readonly withLimits = computed(() => this.rows().some(({ limits }) => limits !== undefined));
   protected readonly withOther = computed(() =>
     this.rows().some(({ alsoPrinted }) => alsoPrinted !== undefined),
