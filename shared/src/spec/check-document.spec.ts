@@ -61,7 +61,7 @@ describe('a spec document', () => {
     },
     {
       what: 'a trace with two posts on one outlet',
-      input: changed(['ignition', 'trace', 'value', '45'], 'D'),
+      input: changed(['ignition', 'trace', 'value', 'C'], 'D'),
       field: 'ignition.trace.value',
     },
     {

@@ -186,8 +186,8 @@ describe('what a sheet takes from a spec', () => {
     expect(capRequestOf(document)).toMatchObject({
       firingOrder: [1, 3, 4, 2],
       rotation: 'anticlockwise',
-      firstPost: '315',
-      trace: { '45': 'C', '135': 'D', '225': 'A', '315': 'B' },
+      firstPost: 'A',
+      trace: { A: 'B', B: 'A', C: 'C', D: 'D' },
     });
   });
 

@@ -35,7 +35,8 @@ function whichTdc(document: SpecDocument): Draft {
 }
 
 function distributor(document: SpecDocument): readonly Draft[] {
-  const { staticTiming, firstPost } = document.ignition;
+  const { staticTiming, firstPost, posts } = document.ignition;
+  const angle = posts.value.find(({ post }) => post === firstPost.value)?.angle;
   return [
     check({
       id: 'distributor-drive',
@@ -49,7 +50,7 @@ function distributor(document: SpecDocument): readonly Draft[] {
       id: 'rotor',
       after: ['which-tdc', 'distributor-drive'],
       title: 'Rotor at the static timing mark',
-      instruction: `Crank at ${staticTiming.value}° before the compression TDC: the rotor points to post ${firstPost.value} as the points just open. At TDC itself it is already past by half the advance.`,
+      instruction: `Crank at ${staticTiming.value}° before the compression TDC: the rotor points to the post at ${angle}° as the points just open. At TDC itself it is already past by half the advance.`,
       source: staticTiming.source,
     }),
     ...tightening(document, 'distributor-clamp', { after: ['rotor'] }),

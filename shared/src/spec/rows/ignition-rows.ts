@@ -3,6 +3,8 @@ import { printLimits } from '../print-limits.js';
 import { RowList, type SpecRow } from '../spec-row.js';
 
 export function ignitionRows(ignition: IgnitionSection): readonly SpecRow[] {
+  const angles = new Map(ignition.posts.value.map(({ post, angle }) => [post, `${angle}°`]));
+  const byAngle = (post: string): string => angles.get(post) ?? post;
   return new RowList('ignition', 'ignition')
     .add({
       key: 'rotation',
@@ -26,7 +28,7 @@ export function ignitionRows(ignition: IgnitionSection): readonly SpecRow[] {
       key: 'firstPost',
       label: 'Post for the first cylinder',
       sourced: ignition.firstPost,
-      print: String,
+      print: byAngle,
     })
     .add({
       key: 'trace',
@@ -34,7 +36,7 @@ export function ignitionRows(ignition: IgnitionSection): readonly SpecRow[] {
       sourced: ignition.trace,
       print: (trace) =>
         Object.entries(trace)
-          .map(([post, outlet]) => `${post} to ${outlet}`)
+          .map(([post, outlet]) => `${byAngle(post)} to ${outlet}`)
           .join(', '),
     })
     .add({
