@@ -21,6 +21,8 @@ export default defineConfig({
   outputDir: 'e2e/results',
   forbidOnly: true,
   retries: 0,
+  timeout: 60_000,
+  expect: { timeout: 10_000 },
   workers: 1,
   reporter: report ? [['line'], ['json', { outputFile: report }]] : [['line']],
   use: {
@@ -28,7 +30,6 @@ export default defineConfig({
     locale: 'en-GB',
     timezoneId: 'UTC',
     screenshot: 'only-on-failure',
-    trace: 'retain-on-failure',
     launchOptions: { executablePath: '/usr/bin/chromium', args: quietly },
   },
   // A test tagged @desk or @phone runs only there; every other runs on both.
