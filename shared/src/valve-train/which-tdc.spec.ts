@@ -38,6 +38,7 @@ describe('with No. 1 at the top, both valves shut, and the exhaust opening next'
     expect(windows).toEqual([[120, 262.5]]);
     expect(reason).toContain('At position 1 it was at compression TDC');
     expect(next).toContain('130° past compression TDC: bring it round again');
+    expect(next).toContain('that is its exhaust TDC; one whole turn further is its compression TDC');
   });
 
   it('tells nothing by the first position alone without overlap', () => {
@@ -125,7 +126,9 @@ describe('engines without companions', () => {
     expect(untold.next).toContain("cylinder front's own valves");
     expect(ask([[{ cylinder: 'front', rocking: true }]], twin).answer).toBe('exhaust-tdc');
     const single = { firingOrder: [1] };
-    expect(ask([[{ cylinder: 1, piston: 'top' }]], single).next).toContain("No. 1's own valves");
+    const alone = ask([[{ cylinder: 1, piston: 'top' }]], single).next;
+    expect(alone).toContain("No. 1's own valves");
+    expect(alone).not.toContain("No. 1's inlet valve");
     expect(ask([[topAndShut]], single).answer).toBe('compression-tdc');
   });
 });
