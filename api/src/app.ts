@@ -4,6 +4,7 @@ import type { Logger } from 'pino';
 import { calculationRoutes } from './calculations/calculations.routes.js';
 import { carRoutes } from './car-files/cars.routes.js';
 import type { Config } from './config.js';
+import { fileRoutes } from './files/files.routes.js';
 import { peopleRoutes, preferencesRoutes, sessionRoutes } from './people/people.routes.js';
 import type { Database } from './platform/database/database.js';
 import { errorHandler, unknownRoute } from './platform/errors/error-handler.js';
@@ -53,6 +54,7 @@ function apiRoutes({ config, database, services }: AppDependencies): Router {
   api.use('/health', healthRoutes(database));
   api.use(cookieParser(), accessClaims(config.secret, cookies), generalLimit(config.requestsPerMinute), xsrf);
   api.use(authentication(services.readSession));
+  api.use('/files', fileRoutes(services.files));
   api.use(jsonBody);
   api.use('/session', sessionRoutes(sessions, cookies));
   api.use('/people', peopleRoutes(people));

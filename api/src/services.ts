@@ -1,5 +1,7 @@
 import { CarsService } from './car-files/cars.service.js';
 import type { Config } from './config.js';
+import { DiskFileStore } from './files/file-store.js';
+import { FilesService } from './files/files.service.js';
 import { PeopleService } from './people/people.service.js';
 import { Passwords } from './people/passwords.js';
 import { sessionReader } from './people/read-sessions.js';
@@ -18,16 +20,17 @@ export interface Services {
   readonly specs: SpecsService;
   readonly tools: ToolsService;
   readonly sheets: SheetServices;
+  readonly files: FilesService;
 }
 
-type ServiceConfig = Pick<Config, 'secret' | 'passwordCost'>;
+type ServiceConfig = Pick<Config, 'secret' | 'passwordCost' | 'dataDir'>;
 
 /**
  * All services, each made once and given what it needs.
  * @param now the clock that everything recorded on sheets is dated by
  */
 export function createServices(
-  { secret, passwordCost }: ServiceConfig,
+  { secret, passwordCost, dataDir }: ServiceConfig,
   database: Database,
   now = (): Date => new Date(),
 ): Services {
@@ -42,5 +45,6 @@ export function createServices(
     sessions: new SessionsService(database, passwords, secret, readSession),
     cars: new CarsService(database, sheets.reading.ofCar),
     ...{ people, specs, tools, sheets },
+    files: new FilesService(database, new DiskFileStore(dataDir), now),
   };
 }

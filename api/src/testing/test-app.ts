@@ -1,6 +1,9 @@
 import { createSecretKey } from 'node:crypto';
+import { mkdtemp, rm } from 'node:fs/promises';
 import { createServer } from 'node:http';
 import type { AddressInfo } from 'node:net';
+import { tmpdir } from 'node:os';
+import { join } from 'node:path';
 import { createApp } from '../app.js';
 import { Database } from '../platform/database/database.js';
 import { SheetEvents } from '../platform/live-events/sheet-events.js';
@@ -33,6 +36,7 @@ export async function startTestApp(options: TestAppOptions = {}): Promise<TestAp
     clientDir: options.clientDir ?? null,
     trustedProxies: 0,
     requestsPerMinute: options.requestsPerMinute ?? 1_000_000,
+    dataDir: await mkdtemp(join(tmpdir(), 'second-spanner-photos-')),
     // The least that bcrypt takes: these passwords guard nothing.
     passwordCost: 4,
   };
@@ -56,6 +60,7 @@ export async function startTestApp(options: TestAppOptions = {}): Promise<TestAp
       await new Promise((closed) => {
         server.close(closed);
       });
+      await rm(config.dataDir, { recursive: true, force: true });
       await db.drop();
     },
   };

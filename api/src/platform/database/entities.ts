@@ -1,4 +1,5 @@
 import { CarEntity } from '../../car-files/car.entity.js';
+import { StoredFileEntity } from '../../files/stored-file.entity.js';
 import { LedgerLineEntity } from '../../ledger/ledger-line.entity.js';
 import { PersonEntity } from '../../people/person.entity.js';
 import { SessionEntity } from '../../people/session.entity.js';
@@ -21,4 +22,5 @@ export const entities = [
   SheetEntity,
   StepEntity,
   LedgerLineEntity,
+  StoredFileEntity,
 ];
