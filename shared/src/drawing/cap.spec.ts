@@ -195,6 +195,12 @@ describe('while it is being entered', () => {
     });
   });
 
+  it('shows no cylinder before any has been entered', () => {
+    const blank = drawCap({ map: capMap(eight), request: eight, showRequired: false });
+    expect(wordsOf(blank).filter((word) => /^\d+$/.test(word))).toEqual([]);
+    expect(blank.description).toBe('8 leads. None entered yet.');
+  });
+
   it('does not call a lead wrong, and marks the outlet in hand', () => {
     expect(circleOf(drawing, 'cylinder-at:A').fill).toBe('paper');
     expect(circleOf(drawing, 'cylinder-at:B').pen).toBe('oxide');

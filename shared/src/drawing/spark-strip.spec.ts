@@ -80,19 +80,22 @@ const twelve = [1, 12, 5, 8, 3, 10, 6, 7, 2, 11, 4, 9];
 const moved = (order: readonly number[], by: (i: number) => number): Record<string, number> =>
   Object.fromEntries(order.map((_, i) => [String(i + 1), order[by(i) % order.length] ?? 0]));
 
-it.each([
-  ['a right eight', vee, (i: number) => i],
-  ['an eight moved one post', vee, (i: number) => i + 1],
-  ['an eight wired against the rotor', vee, (i: number) => 8 - i],
-  ['a mixed eight', vee, (i: number) => i * 3],
-  ['a twelve wired against the rotor', twelve, (i: number) => 12 - i],
-] as const)('shows every cylinder once, none over another: %s', (_, order, by) => {
-  const drawing = strip(order, moved(order, by));
+it.each<{ what: string; order: readonly number[]; by: (i: number) => number; advance?: number }>([
+  { what: 'a right eight', order: vee, by: (i) => i },
+  { what: 'an eight moved one post', order: vee, by: (i) => i + 1 },
+  { what: 'an eight wired against the rotor', order: vee, by: (i) => 8 - i },
+  { what: 'a mixed eight', order: vee, by: (i) => i * 3 },
+  { what: 'a twelve wired against the rotor', order: twelve, by: (i) => 12 - i },
+  { what: 'a twelve moved five posts, sparking early', order: twelve, by: (i) => i + 5, advance: 50 },
+])('shows every cylinder once, none over another: $what', ({ order, by, advance }) => {
+  const drawing = strip(order, moved(order, by), { advance });
   const badges = allShapes(drawing).filter(
     (shape): shape is CircleShape => shape.kind === 'circle' && shape.part?.startsWith('cylinder:') === true,
   );
   expect(badges).toHaveLength(order.length);
   for (const [i, a] of badges.entries()) {
+    expect(a.centre.x - a.radius).toBeGreaterThanOrEqual(0);
+    expect(a.centre.x + a.radius).toBeLessThanOrEqual(drawing.width);
     for (const b of badges.slice(i + 1)) {
       const gap = Math.hypot(a.centre.x - b.centre.x, a.centre.y - b.centre.y);
       expect(gap).toBeGreaterThanOrEqual(a.radius + b.radius);
