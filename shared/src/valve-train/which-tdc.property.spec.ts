@@ -160,7 +160,7 @@ describe('what contradicts', () => {
       }));
     fc.assert(
       fc.property(fc.array(anySeen, { minLength: 2, maxLength: 12 }), (list) => {
-        const seen = list.sort((a, b) => a.position - b.position);
+        const seen: readonly Seen[] = list.sort((a, b) => a.position - b.position);
         const fits = (some: readonly Seen[]): boolean => whereItStood(some, 0).length > 0;
         const blamed = contradicting(seen);
         expect(blamed.length === 0).toBe(fits(seen));
