@@ -1,15 +1,18 @@
 import 'reflect-metadata';
 import { createServer } from 'node:http';
 import type { AddressInfo } from 'node:net';
+import type { Logger } from 'pino';
 import { createApp } from './app.js';
 import { ConfigError, readConfig } from './config.js';
+import { seedDemo } from './demo/seed-demo.js';
 import { createDataSource } from './platform/database/data-source.js';
 import { Database } from './platform/database/database.js';
+import { fillWhenEmpty } from './platform/database/loading.js';
 import { migrate, passesRowSecurity } from './platform/database/migrate.js';
 import { closeGracefully } from './platform/http/close-gracefully.js';
 import { SheetEvents } from './platform/live-events/sheet-events.js';
 import { createLog } from './platform/log.js';
-import { createServices } from './services.js';
+import { createServices, type Services } from './services.js';
 
 async function main(): Promise<void> {
   const config = readConfig(process.env);
@@ -26,6 +29,7 @@ async function main(): Promise<void> {
   });
   await events.start();
   const services = createServices(config, database);
+  if (config.demo) await loadDemo(dataSource, services, log);
   const server = createServer(createApp({ config, log, database, services }));
   closeGracefully(server, log, {
     endStreams: () => events.stop(),
@@ -35,6 +39,18 @@ async function main(): Promise<void> {
     const { port } = server.address() as AddressInfo;
     log.info({ host: config.host, port }, 'Listening.');
   });
+}
+
+type DataSource = ReturnType<typeof createDataSource>;
+
+async function loadDemo(dataSource: DataSource, services: Services, log: Logger): Promise<void> {
+  const { people } = services;
+  const loaded = await fillWhenEmpty(
+    dataSource,
+    () => people.holding(),
+    () => seedDemo(services),
+  );
+  if (loaded) log.info('The demo is loaded.');
 }
 
 main().catch((error: unknown) => {

@@ -62,7 +62,8 @@ export async function findAccount(manager: EntityManager, email: string): Promis
   return rows[0] ?? null;
 }
 
-/** Whether there is any shop yet; through the door for setting up. */
-export async function anyShop(manager: EntityManager): Promise<boolean> {
-  return manager.createQueryBuilder(ShopEntity, 'shop').getExists();
+/** Whether each shop is a demo's; through the door for setting up. */
+export async function demoFlags(manager: EntityManager): Promise<boolean[]> {
+  const shops = await manager.find(ShopEntity, { select: { id: true, demo: true } });
+  return shops.map(({ demo }) => demo);
 }

@@ -1,11 +1,12 @@
 import { randomUUID } from 'node:crypto';
 import type { Dialect, PersonName, Role, Session } from '@second-spanner/shared/contracts/people';
 import type { Database } from '../platform/database/database.js';
+import type { Holding } from '../platform/database/loading.js';
 import { badInput } from '../platform/errors/http-problem.js';
 import type { SignedIn } from '../platform/signing-in/signed-in.js';
 import { passwordTrouble } from './password-rules.js';
 import type { Passwords } from './passwords.js';
-import { anyShop, PeopleRepository } from './people.repository.js';
+import { demoFlags, PeopleRepository } from './people.repository.js';
 import { toPersonName } from './person.mapper.js';
 
 export interface NewShop {
@@ -53,9 +54,11 @@ export class PeopleService {
     return this.passwords.match(password, hash);
   }
 
-  /** Whether there is any shop yet. */
-  async anyShop(): Promise<boolean> {
-    return this.database.through('setup', 'yes', anyShop);
+  /** Whether the database holds no shop, only the demo's, or others too. */
+  async holding(): Promise<Holding> {
+    const flags = await this.database.through('setup', 'yes', demoFlags);
+    if (flags.length === 0) return 'nothing';
+    return flags.every(Boolean) ? 'demo' : 'work';
   }
 
   /** Opens a shop and answers its id. */

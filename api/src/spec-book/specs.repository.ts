@@ -64,12 +64,16 @@ export class SpecsRepository {
     await this.scope.manager.insert(SpecEntity, { ...spec, shopId: this.scope.shopId });
   }
 
-  /** Marks the approved edition as superseded, if there is one, and answers the highest number so far. */
-  async supersede(specId: string): Promise<number> {
+  /** Marks the approved edition as superseded, if there is one. */
+  async supersede(specId: string): Promise<void> {
     const { shopId, manager } = this.scope;
     await manager.update(SpecEditionEntity, { shopId, specId, state: 'approved' }, { state: 'superseded' });
-    const highest = await manager.maximum(SpecEditionEntity, 'edition', { shopId, specId });
-    return highest ?? 0;
+  }
+
+  /** The number of the newest edition; 0 when there is none. */
+  async highestEdition(specId: string): Promise<number> {
+    const { shopId, manager } = this.scope;
+    return (await manager.maximum(SpecEditionEntity, 'edition', { shopId, specId })) ?? 0;
   }
 
   async insertEdition(edition: Omit<SpecEditionEntity, 'shopId'>): Promise<void> {

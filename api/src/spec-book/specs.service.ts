@@ -8,14 +8,16 @@ import { notFound } from '../platform/errors/http-problem.js';
 import { canonicalHash } from '../platform/hashing/canonical.js';
 import type { SignedIn } from '../platform/signing-in/signed-in.js';
 import { pageOf, type Paging } from '../platform/validation/paging.js';
-import { restsOn } from './rests-on.js';
 import { toSpecEdition, toSpecSummary } from './spec.mapper.js';
 import { SpecsRepository } from './specs.repository.js';
 
-/** Who approves an edition, and when. */
-export interface Approval {
-  readonly by: string;
-  readonly at: Date;
+export interface NewEdition {
+  /** Checked to be a `SpecDocument`. */
+  readonly document: unknown;
+  /** What its values rest on, in a line. */
+  readonly restsOn: string;
+  /** Who approves it, and when; null leaves it a draft. */
+  readonly approval: { readonly by: string; readonly at: Date } | null;
 }
 
 /** The spec book. */
@@ -51,21 +53,24 @@ export class SpecsService {
   }
 
   /**
-   * Puts an approved edition into the book, the next of its spec; the one before it is superseded.
+   * Puts the next edition of a spec into the book. An approved one takes the place of the one before it.
    * Throws `InputError` for a document that is not a spec. Answers the edition's id.
    */
-  async addApproved(shopId: string, input: unknown, { by, at }: Approval): Promise<string> {
+  async add(shopId: string, { document: input, restsOn, approval }: NewEdition): Promise<string> {
     const document = checkSpecDocument(input);
     const id = randomUUID();
     await this.database.withShop(shopId, async (scope) => {
       const specs = new SpecsRepository(scope);
       const specId = await specOf(specs, document);
+      if (approval) await specs.supersede(specId);
       await specs.insertEdition({
-        ...{ id, specId, document, state: 'approved', approvedBy: by, approvedAt: at },
-        edition: (await specs.supersede(specId)) + 1,
+        ...{ id, specId, document, restsOn },
+        edition: (await specs.highestEdition(specId)) + 1,
+        state: approval ? 'approved' : 'draft',
+        approvedBy: approval?.by ?? null,
+        approvedAt: approval?.at ?? null,
         hash: canonicalHash(document),
         valueCount: countValues(document),
-        restsOn: restsOn(document),
       });
     });
     return id;

@@ -24,7 +24,7 @@ describe('row-level security', () => {
     const open = await app.db.sql(
       null,
       `SELECT relname FROM pg_class
-       WHERE relkind = 'r' AND relnamespace = 'public'::regnamespace AND relname <> 'migrations'
+       WHERE relkind = 'r' AND relnamespace = 'public'::regnamespace AND relname NOT IN ('migrations', 'loading')
          AND NOT (relrowsecurity AND relforcerowsecurity)`,
     );
     expect(open).toEqual([]);

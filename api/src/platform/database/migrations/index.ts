@@ -1,4 +1,5 @@
 import { AppendOnly1764547200007 } from './append-only.js';
+import { Loading1764547200011 } from './loading.js';
 import { People1764547200001 } from './people.js';
 import { Records1764547200005 } from './records.js';
 import { Registers1764547200002 } from './registers.js';
@@ -21,4 +22,5 @@ export const migrations = [
   TwoPeople1764547200008,
   RowSecurity1764547200009,
   SheetContent1764547200010,
+  Loading1764547200011,
 ];
