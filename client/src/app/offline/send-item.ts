@@ -1,7 +1,7 @@
-import { HttpClient } from '@angular/common/http';
-import { inject, Injectable } from '@angular/core';
+import { HttpClient, HttpEventType, HttpResponse, type HttpEvent } from '@angular/common/http';
+import { inject, Injectable, signal } from '@angular/core';
 import type { StepDetail, StoredFile } from '@second-spanner/shared/contracts/sheets';
-import { firstValueFrom, timeout } from 'rxjs';
+import { filter, finalize, firstValueFrom, map, tap, timeout } from 'rxjs';
 import { ApiProblem, toApiProblem } from '../http/api-problem';
 import { TrayDb } from './tray-db';
 import type { TrayItem } from './tray-item';
@@ -25,6 +25,9 @@ export class SendItem {
   private readonly http = inject(HttpClient);
   private readonly db = inject(TrayDb);
 
+  /** How much of a photo is sent, 0 to 1; null while none is. */
+  readonly photoShare = signal<number | null>(null);
+
   async send(item: TrayItem): Promise<Sent> {
     try {
       const ready = await this.withPhotoStored(item);
@@ -44,8 +47,16 @@ export class SendItem {
     if (photo === undefined || request.content.kind !== 'photo') return item;
     const form = new FormData();
     form.append('file', photo, 'photo');
-    const upload = this.http.post<StoredFile>('/api/files', form).pipe(timeout(patience.photo));
-    const { id } = await firstValueFrom(upload);
+    const upload = this.http
+      .post<StoredFile>('/api/files', form, { reportProgress: true, observe: 'events' })
+      .pipe(
+        timeout({ each: patience.photo }),
+        tap((event) => this.photoShare.set(shareOf(event) ?? this.photoShare())),
+        filter((event) => event instanceof HttpResponse),
+        map(({ body }) => body?.id ?? ''),
+        finalize(() => this.photoShare.set(null)),
+      );
+    const id = await firstValueFrom(upload);
     const ready: TrayItem = {
       ...item,
       request: { ...request, content: { ...request.content, fileId: id } },
@@ -59,4 +70,9 @@ export class SendItem {
 function problemOf(error: unknown): ApiProblem {
   const isTimeout = error instanceof Error && error.name === 'TimeoutError';
   return isTimeout ? new ApiProblem(0, 'The network is too weak just now.') : toApiProblem(error);
+}
+
+function shareOf(event: HttpEvent<unknown>): number | null {
+  if (event.type !== HttpEventType.UploadProgress || event.total === undefined) return null;
+  return event.loaded / event.total;
 }

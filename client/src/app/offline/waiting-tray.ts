@@ -45,6 +45,8 @@ export class WaitingTray {
     const person = this.sessions.person();
     return this.lying().filter(({ personId }) => personId === person?.id);
   });
+  /** How much of a photo under way is sent, 0 to 1; null while none is. */
+  readonly photoShare = this.sender.photoShare.asReadonly();
   readonly count = computed(() => this.items().length);
   /** Steps as they are after an entry was taken. */
   readonly sent = this.taken.asObservable();

@@ -35,6 +35,9 @@ export class StepWork {
   /** The page's own finding about a field that an attempt to keep brought up. */
   readonly fieldError = signal<InputError | null>(null);
 
+  /** How much of a photo under way is sent, 0 to 1; null while none is. */
+  readonly sendingShare = this.tray.photoShare;
+
   private readonly step = this.store.step;
   /** A slot that the person chose; otherwise the work goes on in its order. */
   private readonly chosen = signal<string | null>(null);

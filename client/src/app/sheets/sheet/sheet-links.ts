@@ -28,7 +28,7 @@ import { SheetStore } from '../sheet-store';
       </li>
       <li>
         <a [routerLink]="[base(), 'sign-off']" routerLinkActive="here" ariaCurrentWhenActive="page">
-          <mat-icon svgIcon="pdf" />Sign-off and build sheet
+          <mat-icon svgIcon="pdf" />Sign-off
         </a>
       </li>
       <li>
@@ -68,9 +68,16 @@ import { SheetStore } from '../sheet-store';
     }
 
     @media (min-width: 960px) {
+      ul {
+        display: grid;
+        grid-template-columns: 1fr 1fr;
+      }
+
       a {
+        gap: var(--ss-2);
+        padding: 0 4px 0 20px;
         min-height: 36px;
-        font-size: 15px;
+        font-size: 14px;
       }
     }
   `,

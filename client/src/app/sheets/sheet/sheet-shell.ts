@@ -14,9 +14,11 @@ import { StageList } from './stage-list';
   changeDetection: ChangeDetectionStrategy.OnPush,
   template: `
     <ng-template ssFrameAside>
-      <nav aria-label="Stages and steps"><ss-stage-list /></nav>
-      <nav class="links" aria-label="This sheet"><ss-sheet-links /></nav>
-      <p class="small key"><ss-sign name="hold" />hold point: a second person countersigns</p>
+      <div class="aside">
+        <nav aria-label="Stages and steps"><ss-stage-list /></nav>
+        <nav class="links" aria-label="This sheet"><ss-sheet-links /></nav>
+        <p class="small key"><ss-sign name="hold" />hold point: a second person countersigns</p>
+      </div>
     </ng-template>
     <router-outlet />
   `,
@@ -25,6 +27,20 @@ import { StageList } from './stage-list';
       display: flex;
       flex-direction: column;
       flex: 1;
+    }
+
+    :host ::ng-deep > router-outlet + * {
+      display: flex;
+      flex-direction: column;
+      flex: 1;
+      min-width: 0;
+    }
+
+    .aside {
+      display: flex;
+      flex-direction: column;
+      width: 286px;
+      min-height: 100%;
     }
 
     nav {

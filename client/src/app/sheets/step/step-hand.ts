@@ -1,14 +1,17 @@
 import { ChangeDetectionStrategy, Component, input } from '@angular/core';
 import { CheckWork } from '../kinds/check/check-work';
 import { MeasurementWork } from '../kinds/measurement/measurement-work';
+import { PhotoWork } from '../kinds/photo/photo-work';
 import { TighteningWork } from '../kinds/tightening/tightening-work';
+import { ValveTimingWork } from '../kinds/valve-timing/valve-timing-work';
+import { WiringWork } from '../kinds/wiring/wiring-work';
 import type { ShownStep } from '../shown-step';
 import { StepWork } from '../step-work';
 
 /** The step at hand, worked in the way of its kind. Made anew for every step. */
 @Component({
   selector: 'ss-step-hand',
-  imports: [CheckWork, MeasurementWork, TighteningWork],
+  imports: [CheckWork, MeasurementWork, PhotoWork, TighteningWork, ValveTimingWork, WiringWork],
   providers: [StepWork],
   changeDetection: ChangeDetectionStrategy.OnPush,
   template: `
@@ -22,6 +25,15 @@ import { StepWork } from '../step-work';
       }
       @case ('tightening') {
         <ss-tightening-work [step]="one" [definition]="one.definition" />
+      }
+      @case ('wiring') {
+        <ss-wiring-work [step]="one" [definition]="one.definition" />
+      }
+      @case ('valve-timing') {
+        <ss-valve-timing-work [step]="one" [definition]="one.definition" />
+      }
+      @case ('photo') {
+        <ss-photo-work [step]="one" [definition]="one.definition" />
       }
     }
   `,

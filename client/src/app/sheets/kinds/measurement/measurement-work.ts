@@ -1,4 +1,12 @@
-import { ChangeDetectionStrategy, Component, computed, inject, input, linkedSignal } from '@angular/core';
+import {
+  ChangeDetectionStrategy,
+  Component,
+  computed,
+  inject,
+  input,
+  linkedSignal,
+  viewChild,
+} from '@angular/core';
 import { MatButton } from '@angular/material/button';
 import type { Unit } from '@second-spanner/shared/contracts/quantity';
 import type { EntryContent, MeasurementStep } from '@second-spanner/shared/contracts/steps';
@@ -59,6 +67,8 @@ export class MeasurementWork {
     const { unit, method } = this.definition();
     return toolsForReading(this.tools.all(), unit, method);
   });
+
+  private readonly field = viewChild(Reading);
 
   protected readonly isEntering = computed(() => this.work.isOpen() && this.work.slot() !== null);
   protected readonly place = computed(() => this.work.slot()?.label ?? '');
@@ -122,7 +132,9 @@ export class MeasurementWork {
     const error = this.judged()?.error ?? null;
     this.work.fieldError.set(error);
     if (content === null || error !== null) return;
-    if (await this.work.record(this.definition(), content)) this.typed.set(noReading);
+    if (!(await this.work.record(this.definition(), content))) return;
+    this.typed.set(noReading);
+    this.field()?.focus();
   }
 
   /** A tool not chosen yet is no error before one wants to keep the reading. */

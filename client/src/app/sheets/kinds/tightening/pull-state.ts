@@ -214,14 +214,15 @@ export class PullState {
     this.work.choose(`pull/${this.pass()}/${fastener}`);
   }
 
-  async keep(): Promise<void> {
+  /** Keeps the pull; true when it is kept and the next one may be typed. */
+  async keep(): Promise<boolean> {
     const [definition, content] = [this.definition(), this.content()];
     const error = this.judged()?.error ?? null;
     this.work.fieldError.set(error);
-    if (definition === null || content === null || error !== null) return;
-    if (await this.work.record(definition, content)) {
-      this.typed.update((typed) => ({ ...typed, slot: '', reading: '' }));
-    }
+    if (definition === null || content === null || error !== null) return false;
+    const isKept = await this.work.record(definition, content);
+    if (isKept) this.typed.update((typed) => ({ ...typed, slot: '', reading: '' }));
+    return isKept;
   }
 
   /** A click wrench is set once a pass; everything else is read at each fastener. */

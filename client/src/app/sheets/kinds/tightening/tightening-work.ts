@@ -1,4 +1,4 @@
-import { ChangeDetectionStrategy, Component, inject, input } from '@angular/core';
+import { ChangeDetectionStrategy, Component, inject, input, viewChild } from '@angular/core';
 import { MatButton } from '@angular/material/button';
 import type { TighteningStepDefinition } from '@second-spanner/shared/contracts/steps';
 import { DrawingFigure } from '../../../drawing/drawing';
@@ -45,6 +45,8 @@ export class TighteningWork {
   readonly step = input.required<ShownStep>();
   readonly definition = input.required<TighteningStepDefinition>();
 
+  private readonly field = viewChild(Reading);
+
   /** Touching the drawing does what the list of fasteners does. */
   protected touch(part: string): void {
     const [kind, fastener] = part.split(':');
@@ -52,8 +54,8 @@ export class TighteningWork {
       this.state.chooseFastener(fastener);
   }
 
-  protected keep(event: Event): void {
+  protected async keep(event: Event): Promise<void> {
     event.preventDefault();
-    void this.state.keep();
+    if (await this.state.keep()) this.field()?.focus();
   }
 }
