@@ -1,5 +1,8 @@
 import { describe, expect, it } from 'vitest';
 import at18 from '../../../test-data/specs/ok/at18.json' with { type: 'json' };
+import orderTwice from '../../../test-data/specs/not-ok/firing-order-names-a-cylinder-twice.json' with { type: 'json' };
+import torqueInMillimetres from '../../../test-data/specs/not-ok/torque-in-millimetres.json' with { type: 'json' };
+import traceTooShort from '../../../test-data/specs/not-ok/trace-leaves-a-post-out.json' with { type: 'json' };
 import { InputError } from '../contracts/input-error.js';
 import { checkSpecDocument } from './check-document.js';
 
@@ -27,6 +30,14 @@ function fieldOf(input: unknown): string {
 describe('a spec document', () => {
   it('is taken as it is when everything in it is right', () => {
     expect(checkSpecDocument(at18)).toEqual(at18);
+  });
+
+  it.each([
+    { what: 'an order that is none', input: orderTwice as unknown, field: 'engine.firingOrder.value' },
+    { what: 'millimetres', input: torqueInMillimetres, field: 'fastenerGroups[11].torque.value.unit' },
+    { what: 'half a trace', input: traceTooShort, field: 'ignition.trace.value' },
+  ])('read from a file with $what is refused', ({ input, field }) => {
+    expect(fieldOf(input)).toBe(field);
   });
 
   it.each([

@@ -11,6 +11,7 @@ import { capMap } from '../../ignition/cap-map.js';
 import { agreementPossible } from '../../measuring/agreement-possible.js';
 import { kindOf } from '../../quantities/convert.js';
 import { checkSpecDocument } from '../../spec/check-document.js';
+import { mayRecord, type GateStep } from '../gates.js';
 import { judgeEntry } from '../judge-entry.js';
 import { planOf } from '../plan-of.js';
 import { compareSecond } from '../second-check.js';
@@ -190,9 +191,28 @@ function contentsOf(
 describe('what happens on the demo sheets', () => {
   it('happens on steps that are there', () => {
     for (const { spec, event } of events) expect(stepOf(spec, event.step).code).toBe(event.step);
+  });
+
+  it('can be worked in the order of its steps, past what is left waiting', () => {
     for (const { sheets: shopSheets } of demo.shops) {
-      for (const { spec, upTo } of shopSheets) {
-        if (upTo) expect(stepOf(spec, upTo.step).code).toBe(upTo.step);
+      for (const sheet of shopSheets) {
+        const { spec, upTo } = sheet;
+        const waiting: readonly string[] = ('notDone' in sheet && sheet.notDone) || [];
+        const unseen: readonly string[] = ('notCountersigned' in sheet && sheet.notCountersigned) || [];
+        const steps = sheets.get(spec) ?? [];
+        const end = upTo ? steps.indexOf(stepOf(spec, upTo.step)) : -1;
+        const worked = (at: number) => steps.map((definition, index) => workedTo(definition, index < at));
+        const workedTo = (definition: StepDefinition, before: boolean): GateStep => {
+          const done = before && !waiting.includes(definition.code) ? 1 : 0;
+          const countersigned = done === 1 && !unseen.includes(definition.code);
+          const facts = { done, of: 1, verdict: null, recorders: [], countersigned, openSnags: 0 };
+          return { definition, critical: definition.critical, facts };
+        };
+        for (const [at, { code }] of steps.slice(0, end + 1).entries()) {
+          if (!waiting.includes(code))
+            expect(mayRecord(worked(at), code, false), `${sheet.code} ${code}`).toBe(true);
+        }
+        for (const code of waiting) expect(mayRecord(worked(end), code, false), code).toBe(false);
       }
     }
   });
