@@ -23,10 +23,7 @@ import { sheetRoutes } from './sheets/sheets.routes.js';
 import { specRoutes } from './spec-book/specs.routes.js';
 
 export interface AppDependencies {
-  readonly config: Pick<
-    Config,
-    'secret' | 'publicUrl' | 'clientDir' | 'trustedProxies' | 'requestsPerMinute'
-  >;
+  readonly config: Pick<Config, 'publicUrl' | 'clientDir' | 'trustedProxies' | 'requestsPerMinute'>;
   readonly log: Logger;
   readonly database: Database;
   readonly services: Services;
@@ -52,7 +49,12 @@ function apiRoutes({ config, database, services }: AppDependencies): Router {
   const api = Router();
   api.use(noStore);
   api.use('/health', healthRoutes(database));
-  api.use(cookieParser(), accessClaims(config.secret, cookies), generalLimit(config.requestsPerMinute), xsrf);
+  api.use(
+    cookieParser(),
+    accessClaims(services.tokens, cookies),
+    generalLimit(config.requestsPerMinute),
+    xsrf,
+  );
   api.use(authentication(services.readSession));
   api.use('/files', fileRoutes(services.files));
   api.use(jsonBody);

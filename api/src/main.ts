@@ -1,10 +1,10 @@
 import 'reflect-metadata';
-import { createServer } from 'node:http';
+import { createServer, type Server } from 'node:http';
 import type { AddressInfo } from 'node:net';
 import type { Logger } from 'pino';
 import { createApp } from './app.js';
-import { ConfigError, readConfig } from './config.js';
-import { seedDemo } from './demo/seed-demo.js';
+import { readConfig, type Config } from './config.js';
+import { loadWholeDemo } from './demo/load-demo.js';
 import { createDataSource } from './platform/database/data-source.js';
 import { Database } from './platform/database/database.js';
 import { fillWhenEmpty } from './platform/database/loading.js';
@@ -12,6 +12,7 @@ import { migrate, passesRowSecurity } from './platform/database/migrate.js';
 import { closeGracefully } from './platform/http/close-gracefully.js';
 import { SheetEvents } from './platform/live-events/sheet-events.js';
 import { createLog } from './platform/log.js';
+import { sayWhy } from './say-why.js';
 import { createServices, type Services } from './services.js';
 
 async function main(): Promise<void> {
@@ -29,32 +30,40 @@ async function main(): Promise<void> {
   });
   await events.start();
   const services = createServices(config, database);
-  if (config.demo) await loadDemo(dataSource, services, log);
+  if (config.demo) {
+    await loadDemo(dataSource, (now) => createServices(config, database, now), log);
+  }
   const server = createServer(createApp({ config, log, database, services }));
   closeGracefully(server, log, {
     endStreams: () => events.stop(),
     close: () => dataSource.destroy(),
   });
-  server.listen(config.port, config.host, () => {
-    const { port } = server.address() as AddressInfo;
-    log.info({ host: config.host, port }, 'Listening.');
+  const port = await listen(server, config);
+  log.info({ host: config.host, port }, 'Listening.');
+}
+
+async function listen(server: Server, { port, host }: Config): Promise<number> {
+  await new Promise<void>((listening, refused) => {
+    server.once('error', refused);
+    server.listen(port, host, listening);
   });
+  return (server.address() as AddressInfo).port;
 }
 
 type DataSource = ReturnType<typeof createDataSource>;
 
-async function loadDemo(dataSource: DataSource, services: Services, log: Logger): Promise<void> {
-  const { people } = services;
+async function loadDemo(
+  dataSource: DataSource,
+  servicesBy: (now: () => Date) => Services,
+  log: Logger,
+): Promise<void> {
+  const { people } = servicesBy(() => new Date());
   const loaded = await fillWhenEmpty(
     dataSource,
     () => people.holding(),
-    () => seedDemo(services),
+    () => loadWholeDemo(servicesBy),
   );
   if (loaded) log.info('The demo is loaded.');
 }
 
-main().catch((error: unknown) => {
-  const words = error instanceof ConfigError ? error.message : error;
-  process.stderr.write(`${words instanceof Error ? (words.stack ?? words.message) : String(words)}\n`);
-  process.exitCode = 1;
-});
+main().catch(sayWhy);

@@ -1,11 +1,12 @@
 import 'reflect-metadata';
 import { randomBytes } from 'node:crypto';
-import { ConfigError, readConfig } from './config.js';
-import { seedDemo } from './demo/seed-demo.js';
+import { readConfig } from './config.js';
+import { loadWholeDemo } from './demo/load-demo.js';
 import { createDataSource } from './platform/database/data-source.js';
 import { Database } from './platform/database/database.js';
 import { refill } from './platform/database/loading.js';
 import { createLog } from './platform/log.js';
+import { sayWhy } from './say-why.js';
 import { createServices } from './services.js';
 
 /** Empties the database and loads the demo. Nobody signs in meanwhile, so that any secret does. */
@@ -19,15 +20,11 @@ async function seed(): Promise<void> {
   });
   await dataSource.initialize();
   try {
-    const services = createServices(config, new Database(dataSource));
-    await refill(dataSource, () => seedDemo(services));
+    const database = new Database(dataSource);
+    await refill(dataSource, () => loadWholeDemo((now) => createServices(config, database, now)));
   } finally {
     await dataSource.destroy();
   }
 }
 
-seed().catch((error: unknown) => {
-  const words = error instanceof ConfigError ? error.message : error;
-  process.stderr.write(`${words instanceof Error ? (words.stack ?? words.message) : String(words)}\n`);
-  process.exitCode = 1;
-});
+seed().catch(sayWhy);

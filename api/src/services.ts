@@ -7,12 +7,14 @@ import { Passwords } from './people/passwords.js';
 import { sessionReader } from './people/read-sessions.js';
 import { SessionsService } from './people/sessions.service.js';
 import type { Database } from './platform/database/database.js';
+import { AccessTokens } from './platform/signing-in/access-token.js';
 import type { ReadSession } from './platform/signing-in/authentication.js';
 import { ToolsService } from './registers/tools.service.js';
 import { createSheetServices, type SheetServices } from './sheets/sheet-services.js';
 import { SpecsService } from './spec-book/specs.service.js';
 
 export interface Services {
+  readonly tokens: AccessTokens;
   readonly readSession: ReadSession;
   readonly sessions: SessionsService;
   readonly people: PeopleService;
@@ -35,14 +37,16 @@ export function createServices(
   now = (): Date => new Date(),
 ): Services {
   const passwords = new Passwords(passwordCost);
+  const tokens = new AccessTokens(secret);
   const readSession = sessionReader(database);
   const specs = new SpecsService(database);
   const tools = new ToolsService(database);
   const people = new PeopleService(database, passwords);
   const sheets = createSheetServices({ database, specs, tools, people, now });
   return {
+    tokens,
     readSession,
-    sessions: new SessionsService(database, passwords, secret, readSession),
+    sessions: new SessionsService(database, passwords, tokens, readSession),
     cars: new CarsService(database, sheets.reading.ofCar),
     ...{ people, specs, tools, sheets },
     files: new FilesService(database, new DiskFileStore(dataDir), now),

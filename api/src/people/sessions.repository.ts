@@ -1,22 +1,22 @@
 import type { ShopScope } from '../platform/database/database.js';
 import { SessionEntity, type EndReason, type SessionRow } from './session.entity.js';
 
+const running = `
+  SELECT s.id AS "sessionId", p.id, p.name, p.email, p.role, p.dialect,
+    h.name AS "shopName", h.dialect AS "shopDialect", h.demo AS "shopDemo"
+  FROM sessions s
+  JOIN people p ON p.id = s.person_id
+  JOIN shops h ON h.id = s.shop_id
+  WHERE s.id = ANY ($1::uuid[]) AND s.shop_id = $2 AND s.ended_at IS NULL AND s.expires_at > now()
+    AND p.locked_at IS NULL`;
+
 /** The sessions of one shop's people. */
 export class SessionsRepository {
   constructor(private readonly scope: ShopScope) {}
 
   /** Those of the sessions that still run, whose people are not locked out: one query by primary keys. */
   async running(ids: readonly string[]): Promise<SessionRow[]> {
-    return this.scope.manager.query(
-      `SELECT s.id AS "sessionId", p.id, p.name, p.email, p.role, p.dialect,
-         h.name AS "shopName", h.dialect AS "shopDialect", h.demo AS "shopDemo"
-       FROM sessions s
-       JOIN people p ON p.id = s.person_id
-       JOIN shops h ON h.id = s.shop_id
-       WHERE s.id = ANY ($1) AND s.shop_id = $2 AND s.ended_at IS NULL AND s.expires_at > now()
-         AND p.locked_at IS NULL`,
-      [ids, this.scope.shopId],
-    );
+    return this.scope.prepared('running-sessions', running, [ids, this.scope.shopId]);
   }
 
   /** The session, its row locked, so that one token is renewed once. */

@@ -1,8 +1,8 @@
-import { randomUUID, type KeyObject } from 'node:crypto';
+import { randomUUID } from 'node:crypto';
 import type { SignInRequest } from '@second-spanner/shared/contracts/people';
 import type { Database } from '../platform/database/database.js';
 import { HttpProblem } from '../platform/errors/http-problem.js';
-import { signAccess } from '../platform/signing-in/access-token.js';
+import type { AccessTokens } from '../platform/signing-in/access-token.js';
 import { renewalDays } from '../platform/signing-in/cookies.js';
 import type { ReadSession } from '../platform/signing-in/authentication.js';
 import type { SignedIn } from '../platform/signing-in/signed-in.js';
@@ -23,7 +23,7 @@ export class SessionsService {
   constructor(
     private readonly database: Database,
     private readonly passwords: Passwords,
-    private readonly secret: KeyObject,
+    private readonly tokens: AccessTokens,
     private readonly readSession: ReadSession,
   ) {}
 
@@ -92,7 +92,7 @@ export class SessionsService {
     const claims = { shopId: token.shopId, sessionId: token.sessionId, personId };
     const signedIn = await this.readSession(claims);
     if (!signedIn) throw over();
-    return { signedIn, access: signAccess(claims, this.secret), renewal: token.text };
+    return { signedIn, access: this.tokens.sign(claims), renewal: token.text };
   }
 }
 

@@ -1,3 +1,4 @@
+import type { ClientBase, QueryResultRow } from 'pg';
 import type { DataSource, EntityManager, QueryRunner } from 'typeorm';
 import type { SheetChanged } from '@second-spanner/shared/contracts/sheets';
 
@@ -5,6 +6,8 @@ import type { SheetChanged } from '@second-spanner/shared/contracts/sheets';
 export interface ShopScope {
   readonly shopId: string;
   readonly manager: EntityManager;
+  /** A query that every request makes: PostgreSQL plans it once a connection, under its name. */
+  prepared<Row extends QueryResultRow>(name: string, text: string, values: unknown[]): Promise<Row[]>;
   /** Told to everybody who looks at the sheet, once the transaction is committed. */
   announce(change: SheetChanged): void;
 }
@@ -28,10 +31,9 @@ export class Database {
   async withShop<T>(shopId: string, work: (scope: ShopScope) => Promise<T>): Promise<T> {
     const changes: SheetChanged[] = [];
     const result = await this.onConnection(async (runner) => {
-      await this.setShop(runner, shopId);
-      return inTransaction(runner, () =>
-        work({ shopId, manager: runner.manager, announce: (change) => changes.push(change) }),
-      );
+      const client = await this.clientFor(runner, shopId);
+      const scope = scopeOf(shopId, runner, client, (change) => changes.push(change));
+      return inTransaction(runner, () => work(scope));
     });
     if (changes.length > 0) this.announcer(changes);
     return result;
@@ -40,8 +42,8 @@ export class Database {
   /** Reads without a transaction: for queries that stand each for itself. */
   async readShop<T>(shopId: string, work: (scope: ShopScope) => Promise<T>): Promise<T> {
     return this.onConnection(async (runner) => {
-      await this.setShop(runner, shopId);
-      return work({ shopId, manager: runner.manager, announce: refuseAnnouncement });
+      const client = await this.clientFor(runner, shopId);
+      return work(scopeOf(shopId, runner, client, refuseAnnouncement));
     });
   }
 
@@ -73,14 +75,28 @@ export class Database {
     }
   }
 
-  private async setShop(runner: QueryRunner, shopId: string): Promise<void> {
-    const connection: object = await runner.connect();
-    if (this.shopOf.get(connection) === shopId) return;
-    // Outside any transaction: a rollback would take the setting back unseen.
-    await runner.query(`SELECT set_config('second_spanner.shop', $1, false)`, [shopId]);
-    this.shopOf.set(connection, shopId);
+  /** The runner's connection, set to the shop. */
+  private async clientFor(runner: QueryRunner, shopId: string): Promise<ClientBase> {
+    const client = (await runner.connect()) as ClientBase;
+    if (this.shopOf.get(client) !== shopId) {
+      // Outside any transaction: a rollback would take the setting back unseen.
+      await client.query(`SELECT set_config('second_spanner.shop', $1, false)`, [shopId]);
+      this.shopOf.set(client, shopId);
+    }
+    return client;
   }
 }
+
+const scopeOf = (
+  shopId: string,
+  { manager }: QueryRunner,
+  client: ClientBase,
+  announce: ShopScope['announce'],
+): ShopScope => ({
+  ...{ shopId, manager, announce },
+  prepared: async <Row extends QueryResultRow>(name: string, text: string, values: unknown[]) =>
+    (await client.query<Row>({ name, text, values })).rows,
+});
 
 async function inTransaction<T>(runner: QueryRunner, work: () => Promise<T>): Promise<T> {
   await runner.startTransaction();

@@ -33,12 +33,17 @@ export const securityHeaders = (secure: boolean): RequestHandler =>
   });
 
 /** Compresses what gains by it; a stream of events must not wait for a full buffer. */
-export const compression = (): RequestHandler =>
-  compressionOf({
+export function compression(): RequestHandler {
+  const compress = compressionOf({
     filter: (request, response) =>
       !String(response.getHeader('content-type')).startsWith('text/event-stream') &&
       compressionOf.filter(request, response),
   });
+  return (request, response, next) => {
+    if (request.headers['accept-encoding'] === undefined) next();
+    else compress(request, response, next);
+  };
+}
 
 /** Answers of the api belong to one person and one moment: no cache in between keeps them. */
 export const noStore: RequestHandler = (_request, response, next) => {

@@ -1,8 +1,7 @@
-import type { KeyObject } from 'node:crypto';
 import type { Request, RequestHandler } from 'express';
 import { may, type Permission } from '@second-spanner/shared/contracts/permissions';
 import { forbidden } from '../errors/http-problem.js';
-import { readAccess, type AccessClaims } from './access-token.js';
+import type { AccessClaims, AccessTokens } from './access-token.js';
 import type { SessionCookies } from './cookies.js';
 import { signedIn, type SignedIn } from './signed-in.js';
 
@@ -13,10 +12,10 @@ const claimsOf = new WeakMap<Request, AccessClaims>();
 
 /** Checks the access token, without a look at the database: enough to tell whose requests to count. */
 export const accessClaims =
-  (secret: KeyObject, cookies: SessionCookies): RequestHandler =>
+  (tokens: AccessTokens, cookies: SessionCookies): RequestHandler =>
   (request, _response, next) => {
     const token = cookies.access(request);
-    const claims = token === null ? null : readAccess(token, secret);
+    const claims = token === null ? null : tokens.read(token);
     if (claims) claimsOf.set(request, claims);
     next();
   };
