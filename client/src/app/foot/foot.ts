@@ -1,9 +1,11 @@
-import { ChangeDetectionStrategy, Component } from '@angular/core';
+import { ChangeDetectionStrategy, Component, inject } from '@angular/core';
+import { OwnKeypad } from '../reading/own-keypad';
 
 /** The foot of a page at the stand: its one action, always in reach, above the keypad when that is up. */
 @Component({
   selector: 'ss-foot',
   changeDetection: ChangeDetectionStrategy.OnPush,
+  host: { '(mousedown)': 'keepFocus($event)' },
   template: '<ng-content />',
   styles: `
     :host {
@@ -22,4 +24,11 @@ import { ChangeDetectionStrategy, Component } from '@angular/core';
     }
   `,
 })
-export class Foot {}
+export class Foot {
+  private readonly keypads = inject(OwnKeypad);
+
+  /** The keypad stands while its field has the focus; were it to go at a touch, the action would move away. */
+  protected keepFocus(event: Event): void {
+    if (this.keypads.height() > 0) event.preventDefault();
+  }
+}

@@ -1,15 +1,15 @@
 import { HttpClient, provideHttpClient, withInterceptors } from '@angular/common/http';
 import { HttpTestingController, provideHttpClientTesting } from '@angular/common/http/testing';
-import { Component } from '@angular/core';
+import { ChangeDetectionStrategy, Component } from '@angular/core';
 import { TestBed } from '@angular/core/testing';
 import { provideRouter, Router } from '@angular/router';
-import { afterEach, beforeEach, describe, expect, it } from 'vitest';
+import { afterEach, beforeEach, describe, expect, it, vi } from 'vitest';
 import { SessionStore } from '../session/session-store';
 import { sessionOf } from '../session/testing/sessions';
 import { problemErrors } from './problem-errors';
 import { renewal } from './renewal';
 
-@Component({ template: '' })
+@Component({ changeDetection: ChangeDetectionStrategy.OnPush, template: '' })
 class Blank {}
 
 const refused = { status: 401, statusText: 'Unauthorized' };
@@ -85,8 +85,7 @@ describe('the renewal of a session', () => {
     ask('/api/bench');
     api.expectOne('/api/bench').flush(null, refused);
     api.expectOne('/api/session/renewal').flush(null, refused);
-    await TestBed.tick();
-    await new Promise((done) => setTimeout(done));
+    await vi.waitUntil(() => router.url.startsWith('/sign-in'));
 
     expect(router.url).toBe('/sign-in?to=%2Fsheets%2Fone%3Ffrom%3Dtwo');
     expect(TestBed.inject(SessionStore).person()).toBeNull();

@@ -26,7 +26,7 @@ const faces: Partial<Record<KeypadKey, string>> = { sign: '±', fraction: '⁄',
   selector: 'ss-keypad',
   imports: [MatIcon],
   changeDetection: ChangeDetectionStrategy.OnPush,
-  host: { role: 'group', 'aria-label': 'Keypad', '(pointerdown)': '$event.preventDefault()' },
+  host: { role: 'group', 'aria-label': 'Keypad', '(mousedown)': '$event.preventDefault()' },
   templateUrl: './keypad.html',
   styleUrl: './keypad.scss',
 })

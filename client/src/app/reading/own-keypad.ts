@@ -8,7 +8,11 @@ export class OwnKeypad {
   private readonly document = inject(DOCUMENT);
   private readonly own = signal(firstChoice());
 
+  private readonly covered = signal(0);
+
   readonly isOwn = this.own.asReadonly();
+  /** CSS pixels of the page's foot that the keypad covers; 0 while it is away. */
+  readonly height = this.covered.asReadonly();
 
   choose(own: boolean): void {
     this.own.set(own);
@@ -17,6 +21,7 @@ export class OwnKeypad {
 
   /** How much of the page's foot the keypad covers, so that the foot's action stays above it. */
   cover(height: number): void {
+    this.covered.set(height);
     this.document.documentElement.style.setProperty('--ss-keypad', `${height}px`);
   }
 }

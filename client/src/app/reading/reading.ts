@@ -1,4 +1,5 @@
 import {
+  afterRenderEffect,
   ChangeDetectionStrategy,
   Component,
   computed,
@@ -33,6 +34,7 @@ let fields = 0;
 })
 export class Reading {
   private readonly keypads = inject(OwnKeypad);
+  private readonly box = viewChild.required<ElementRef<HTMLElement>>('box');
   private readonly field = viewChild.required<ElementRef<HTMLInputElement>>('field');
 
   readonly label = input.required<string>();
@@ -56,6 +58,14 @@ export class Reading {
     () => this.error() ?? (this.isTyping() ? null : this.read().error),
   );
 
+  constructor() {
+    // Once the keypad stands, the field and the judgement under it are moved above it.
+    afterRenderEffect(() => {
+      if (!this.keypadUp() || this.keypads.height() === 0) return;
+      this.box().nativeElement.scrollIntoView({ block: 'nearest' });
+    });
+  }
+
   /** Puts the caret in the field. */
   focus(): void {
     this.field().nativeElement.focus();
@@ -76,7 +86,6 @@ export class Reading {
 
   protected begin(): void {
     this.isTyping.set(true);
-    this.field().nativeElement.scrollIntoView({ block: 'nearest' });
   }
 
   protected end(): void {
