@@ -1,6 +1,7 @@
 import cookieParser from 'cookie-parser';
 import express, { Router, type Express } from 'express';
 import type { Logger } from 'pino';
+import { buildSheetRoutes } from './build-sheets/build-sheets.routes.js';
 import { calculationRoutes } from './calculations/calculations.routes.js';
 import { carRoutes } from './car-files/cars.routes.js';
 import type { Config } from './config.js';
@@ -44,7 +45,7 @@ export function createApp(deps: AppDependencies): Express {
 }
 
 function apiRoutes({ config, database, services }: AppDependencies): Router {
-  const { sessions, people, cars, specs, tools, sheets } = services;
+  const { sessions, people, cars, specs, tools, sheets, buildSheets } = services;
   const cookies = new SessionCookies(config.publicUrl);
   const api = Router();
   api.use(noStore);
@@ -64,7 +65,7 @@ function apiRoutes({ config, database, services }: AppDependencies): Router {
   api.use('/cars', carRoutes(cars));
   api.use('/specs', specRoutes(specs));
   api.use('/tools', toolRoutes(tools));
-  api.use('/sheets', sheetRoutes(sheets));
+  api.use('/sheets', sheetRoutes(sheets), buildSheetRoutes(buildSheets));
   api.use('/calculations', calculationRoutes());
   api.use(unknownRoute);
   return api;

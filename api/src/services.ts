@@ -1,3 +1,4 @@
+import { BuildSheetsService } from './build-sheets/build-sheets.service.js';
 import { CarsService } from './car-files/cars.service.js';
 import type { Config } from './config.js';
 import { DiskFileStore } from './files/file-store.js';
@@ -22,17 +23,18 @@ export interface Services {
   readonly specs: SpecsService;
   readonly tools: ToolsService;
   readonly sheets: SheetServices;
+  readonly buildSheets: BuildSheetsService;
   readonly files: FilesService;
 }
 
-type ServiceConfig = Pick<Config, 'secret' | 'passwordCost' | 'dataDir'>;
+type ServiceConfig = Pick<Config, 'secret' | 'passwordCost' | 'dataDir' | 'publicUrl'>;
 
 /**
  * All services, each made once and given what it needs.
  * @param now the clock that everything recorded on sheets is dated by
  */
 export function createServices(
-  { secret, passwordCost, dataDir }: ServiceConfig,
+  { secret, passwordCost, dataDir, publicUrl }: ServiceConfig,
   database: Database,
   now = (): Date => new Date(),
 ): Services {
@@ -49,6 +51,7 @@ export function createServices(
     sessions: new SessionsService(database, passwords, tokens, readSession),
     cars: new CarsService(database, sheets.reading.ofCar),
     ...{ people, specs, tools, sheets },
+    buildSheets: new BuildSheetsService(sheets.reading, tools, publicUrl),
     files: new FilesService(database, new DiskFileStore(dataDir), now),
   };
 }

@@ -53,6 +53,25 @@ export class SheetReading {
     });
   }
 
+  /** A sheet with every step of it, as one person may see them. */
+  async details(who: SignedIn, id: string): Promise<{ sheet: Sheet; steps: StepDetail[] }> {
+    return this.database.readShop(who.shop.id, async (scope) => {
+      const row = await findSheet(who, scope, id);
+      const steps = await allSteps(scope, row);
+      const sheet = toSheet(
+        row,
+        steps.map((step) => step.row),
+        who.person,
+      );
+      return {
+        sheet,
+        steps: steps.map((step) =>
+          toStepDetail({ sheetId: id, version: row.version, step, person: who.person }),
+        ),
+      };
+    });
+  }
+
   /** A sheet whole and uncovered, for signing, within somebody else's work on the database. */
   async wholeIn(scope: ShopScope, who: SignedIn, id: string): Promise<WholeSheet> {
     const row = await findSheet(who, scope, id);
