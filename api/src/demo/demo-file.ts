@@ -2,6 +2,7 @@ import { readFile } from 'node:fs/promises';
 import type { Dialect, Role } from '@second-spanner/shared/contracts/people';
 import type { Tool } from '@second-spanner/shared/contracts/registers';
 import type { EditionState } from '@second-spanner/shared/contracts/spec';
+import type { DemoSightings, DemoWork } from './demo-sheet-file.js';
 
 /** A value of a spec's file that one edition has otherwise. A step in a list of keyed things is its key. */
 export interface Difference {
@@ -19,7 +20,7 @@ export interface DemoEdition {
   readonly differs: readonly Difference[];
 }
 
-export interface DemoShop {
+export interface DemoShop extends DemoWork {
   readonly key: string;
   readonly name: string;
   readonly dialect: Dialect;
@@ -56,6 +57,7 @@ export interface DemoShop {
 
 export interface DemoFile {
   readonly password: string;
+  readonly sightings: DemoSightings;
   readonly shops: readonly DemoShop[];
 }
 

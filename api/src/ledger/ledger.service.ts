@@ -5,26 +5,26 @@ import type { LedgerEvent } from './ledger-event.js';
 import type { LedgerLineEntity } from './ledger-line.entity.js';
 import { LedgerRepository } from './ledger.repository.js';
 
-/** Who did something, and when. */
-export interface Doing {
-  readonly by: PersonName;
+/** What happened, and when. */
+export interface DatedEvent {
   readonly at: Date;
+  readonly event: LedgerEvent;
 }
 
 /**
- * Appends what happened to a sheet's ledger, in the transaction in which it happened; the sheet's row must be
+ * Appends what a person did to a sheet's ledger, in the transaction in which it was done; the sheet's row must be
  * locked.
  */
 export async function appendToLedger(
   scope: ShopScope,
   sheetId: string,
-  { by, at }: Doing,
-  events: readonly LedgerEvent[],
+  by: PersonName,
+  events: readonly DatedEvent[],
 ): Promise<void> {
   if (events.length === 0) return;
   const ledger = new LedgerRepository(scope);
   let last: Pick<LedgerLine, 'seq' | 'hash'> | null = await ledger.last(sheetId);
-  const lines = events.map((event) => {
+  const lines = events.map(({ at, event }) => {
     const line = nextLine(last, { ...event, by, at: at.toISOString() });
     last = line;
     return { ...line, sheetId, at };

@@ -1,10 +1,12 @@
 import { randomUUID } from 'node:crypto';
 import { InputError } from '@second-spanner/shared/contracts/input-error';
 import type { NewEntryRequest } from '@second-spanner/shared/contracts/sheets';
+import type { Tool } from '@second-spanner/shared/contracts/registers';
 import type { Judgement } from '@second-spanner/shared/contracts/verdict';
 import { entryAt } from '@second-spanner/shared/sheet/current-entries';
 import { judgeEntry } from '@second-spanner/shared/sheet/judge-entry';
 import { slotKeyOf } from '@second-spanner/shared/sheet/slots';
+import { appendToLedger, type DatedEvent } from '../ledger/ledger.service.js';
 import type { LedgerEvent } from '../ledger/ledger-event.js';
 import { badInput, conflict, refusedByRules } from '../platform/errors/http-problem.js';
 import type { SignedIn } from '../platform/signing-in/signed-in.js';
@@ -15,8 +17,8 @@ import { whyPassShut } from './pass-order.js';
 import { PhotosRepository } from './photos.repository.js';
 import type { EntryRow } from './record.entity.js';
 import { RecordsRepository, type Once } from './records.repository.js';
-import type { Done, OpenSheet, SheetWork } from './sheet-work.service.js';
-import { raiseForFailure, settleByCorrection } from './snag-deeds.service.js';
+import type { Now, OpenSheet, SheetWork } from './sheet-work.service.js';
+import { raiseForFailure, settleByCorrection, type After } from './snag-deeds.service.js';
 import { currentOf, type StepAtHand } from './step-at-hand.js';
 import { whyNotRecord } from './step-rules.js';
 
@@ -25,6 +27,7 @@ export class EntriesService {
   constructor(
     private readonly work: SheetWork,
     private readonly tools: ToolsService,
+    private readonly now: Now,
   ) {}
 
   /** Whether the entry is new; false when it was sent before under the same key. */
@@ -39,16 +42,50 @@ export class EntriesService {
     return this.work.onStep(who, sheetId, code, async (open, step) => {
       const sentBefore = await new RecordsRepository(open.scope).sentUnder('entries', key);
       if (isReplay(sentBefore, once)) return null;
-      return this.keep(open, step, request, once);
+      const { content } = request;
+      const tool = 'toolId' in content ? await this.tools.findIn(open.scope, content.toolId) : null;
+      return this.keep(open, step, request, once, tool ? [tool] : []);
     });
   }
 
-  private async keep(open: OpenSheet, step: StepAtHand, request: NewEntryRequest, once: Once): Promise<Done> {
+  /** Records several entries of one step one after another, each dated by the clock, and answers their ids. */
+  async recordAll(
+    who: SignedIn,
+    sheetId: string,
+    code: string,
+    requests: readonly NewEntryRequest[],
+  ): Promise<string[]> {
+    const ids: string[] = [];
+    const events: DatedEvent[] = [];
+    await this.work.onStep(who, sheetId, code, async (open, first) => {
+      let step = first;
+      const tools = await this.tools.listIn(open.scope);
+      for (const request of requests) {
+        const at = this.now();
+        const once = onceFor(randomUUID(), { personId: who.person.id, sheetId, code, body: request });
+        const after = await this.keep({ ...open, at }, step, request, once, tools);
+        events.push(...after.events.map((event) => ({ at, event })));
+        step = after.step;
+        ids.push(step.records.entries.at(-1)?.id ?? '');
+      }
+      await appendToLedger(open.scope, sheetId, open.by, events);
+      return { events: [], step };
+    });
+    return ids;
+  }
+
+  private async keep(
+    open: OpenSheet,
+    step: StepAtHand,
+    request: NewEntryRequest,
+    once: Once,
+    tools: readonly Tool[],
+  ): Promise<After> {
     const { scope, sheet, by, at } = open;
     const why = whyNotRecord(step, by.id);
     if (why !== null) throw refusedByRules(why);
     requireItsPlace(step, request);
-    const judgement = await this.judge(open, step, request);
+    const judgement = await judge(open, step, request, tools);
     const round = roundOf(step, request);
     const { replaces = null, reason: replaceReason = null, content } = request;
     const entry: EntryRow = {
@@ -64,23 +101,25 @@ export class EntriesService {
         : await settleByCorrection(open, recorded, entry);
     return { events: [toEvent(step, entry), ...after.events], step: after.step };
   }
+}
 
-  private async judge(
-    { scope, at }: OpenSheet,
-    { records: { definition } }: StepAtHand,
-    { content }: NewEntryRequest,
-  ): Promise<Judgement> {
-    const tool = 'toolId' in content ? await this.tools.findIn(scope, content.toolId) : null;
-    if (content.kind === 'photo' && !(await new PhotosRepository(scope).isStored(content.fileId))) {
-      throw badInput({ field: 'content.fileId', message: 'There is no such photo: store it first.' });
-    }
-    const context = { tools: tool ? [tool] : [], on: at.toISOString().slice(0, 10) };
-    try {
-      const { verdict, reason } = judgeEntry(definition, content, context);
-      return { verdict, reason };
-    } catch (error) {
-      throw error instanceof InputError ? fromContent(error) : error;
-    }
+async function judge(
+  { scope, at }: OpenSheet,
+  { records: { definition } }: StepAtHand,
+  { content }: NewEntryRequest,
+  tools: readonly Tool[],
+): Promise<Judgement> {
+  if (content.kind === 'photo' && !(await new PhotosRepository(scope).isStored(content.fileId))) {
+    throw badInput({ field: 'content.fileId', message: 'There is no such photo: store it first.' });
+  }
+  try {
+    const { verdict, reason } = judgeEntry(definition, content, {
+      tools,
+      on: at.toISOString().slice(0, 10),
+    });
+    return { verdict, reason };
+  } catch (error) {
+    throw error instanceof InputError ? fromContent(error) : error;
   }
 }
 

@@ -51,7 +51,7 @@ export class LayOutService {
       await new StepsRepository(scope).insertAll(steps);
       const by = { id: who.person.id, name: who.person.name, role: who.person.role };
       const event = { kind: 'laid-out', specHash: edition.hash, steps: steps.length } as const;
-      await appendToLedger(scope, id, { by, at }, [event]);
+      await appendToLedger(scope, id, by, [{ at, event }]);
       return id;
     });
   }

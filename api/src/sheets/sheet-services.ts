@@ -43,7 +43,7 @@ export function createSheetServices({ database, specs, tools, people, now }: Nee
     reading,
     layOut: new LayOutService(database, specs, now),
     start: new StartService(work),
-    entries: new EntriesService(work, tools),
+    entries: new EntriesService(work, tools, now),
     secondReadings,
     countersigning: new CountersigningService(work, secondReadings),
     snags: new SnagsService(work),

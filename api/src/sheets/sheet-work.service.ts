@@ -81,7 +81,8 @@ async function close({ scope, sheet, by, at }: OpenSheet, { events, step, change
   const counted = step && (await closeStep(scope, step, at));
   const version = sheet.version + 1;
   // The ledger first: a sheet that is released takes no more lines.
-  await appendToLedger(scope, sheet.id, { by, at }, events);
+  const dated = events.map((event) => ({ at, event }));
+  await appendToLedger(scope, sheet.id, by, dated);
   await new SheetsRepository(scope).update(sheet.id, { ...counted, ...change, version, changedAt: at });
   notifySheetChanged(scope, sheet.id, version);
 }

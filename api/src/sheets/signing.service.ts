@@ -77,9 +77,8 @@ export class SigningService {
     const signature = { ...unbound, binding: bindingOf(sheet.id, unbound) };
     await new SignaturesRepository(scope).insert(randomUUID(), sheet.id, sheet.signRound, signature);
     const { binding } = signature;
-    await appendToLedger(scope, sheet.id, { by, at }, [
-      { kind: 'signed', meaning, contentHash: hash, binding },
-    ]);
+    const event = { kind: 'signed', meaning, contentHash: hash, binding } as const;
+    await appendToLedger(scope, sheet.id, by, [{ at, event }]);
     const change = { state: signing[meaning].to, contentHash: hash };
     if (meaning !== 'released') return { events: [], change };
     const signatures = [...row.signatures.map(dated), signature];
