@@ -9,11 +9,7 @@ export function buildSheetRoutes(buildSheets: BuildSheetsService): Router {
   const router = Router();
   router.get('/:id/build-sheet.pdf', allow('build-sheets.read'), async (request, response) => {
     const id = parseId(request.params['id'], 'sheet');
-    const { name, pdf } = await buildSheets.print(
-      signedIn(request),
-      sheetId(request),
-      request.query['paper'],
-    );
+    const { name, pdf } = await buildSheets.print(signedIn(request), id, request.query['paper']);
     response.type('application/pdf').set('Content-Disposition', `inline; filename="${name}"`).send(pdf);
   });
   return router;
