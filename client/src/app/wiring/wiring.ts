@@ -1,0 +1,168 @@
+import { DOCUMENT, NgTemplateOutlet } from '@angular/common';
+import { ChangeDetectionStrategy, Component, computed, inject, signal } from '@angular/core';
+import { rxResource } from '@angular/core/rxjs-interop';
+import { MatButton } from '@angular/material/button';
+import { tradeText } from '@second-spanner/shared/contracts/trade-words';
+import { drawCap } from '@second-spanner/shared/drawing/cap';
+import { drawSparkStrip } from '@second-spanner/shared/drawing/spark-strip';
+import { DrawingFigure } from '../drawing/drawing';
+import { toApiProblem, type ApiProblem } from '../http/api-problem';
+import { Cell } from '../layout/cell';
+import { TitleBlock } from '../layout/title-block';
+import { SessionStore } from '../session/session-store';
+import { Wide } from '../sheets/wide';
+import { LoadState } from '../states/load-state';
+import { ProblemLine } from '../states/problem-line';
+import { VerdictLine } from '../verdict/verdict';
+import { TradeWords } from '../words/trade-words';
+import { caseText } from './answer/case-text';
+import { Judgement } from './answer/judgement';
+import { LeadTable } from './answer/lead-table';
+import { workOut } from './answer/work-out';
+import { caseAddress } from './case-address';
+import { ChosenField } from './fields/chosen-field';
+import { EngineFields } from './fields/engine-fields';
+import { FittedCells } from './fields/fitted-cells';
+import { blankForm, isSameEngine, type WiringForm } from './form/wiring-form';
+import { editionName, SpecEngines } from './spec-engines';
+
+const typedIn = '';
+
+/** The wiring map by itself: an engine of the spec book or one typed in, its cap, and what is wrong with its leads. */
+@Component({
+  selector: 'ss-wiring',
+  imports: [
+    Cell,
+    ChosenField,
+    DrawingFigure,
+    EngineFields,
+    FittedCells,
+    Judgement,
+    LeadTable,
+    LoadState,
+    MatButton,
+    NgTemplateOutlet,
+    ProblemLine,
+    TitleBlock,
+    TradeWords,
+    VerdictLine,
+  ],
+  providers: [SpecEngines],
+  changeDetection: ChangeDetectionStrategy.OnPush,
+  templateUrl: './wiring.html',
+  styleUrl: './wiring.scss',
+})
+export class WiringPage {
+  private readonly document = inject(DOCUMENT);
+  private readonly sessions = inject(SessionStore);
+  protected readonly engines = inject(SpecEngines);
+  protected readonly isDesk = inject(Wide).isDesk;
+
+  protected readonly form = signal<WiringForm>(blankForm);
+  /** On the phone the engine's fields stand open until there is a map, and when they are opened. */
+  protected readonly engineOpen = signal(true);
+  protected readonly problem = signal<ApiProblem | null>(null);
+  protected readonly copied = signal<'yes' | 'by-hand' | null>(null);
+
+  private readonly address = caseAddress((form) => {
+    this.form.set(form);
+    this.engineOpen.set(workOut(form).map === null);
+  });
+
+  protected readonly answer = computed(() => workOut(this.form()));
+  protected readonly traced = computed(() => this.form().outlets === 'traced');
+  private readonly named = computed(() => editionName(this.form().spec, this.form().edition));
+  private readonly specEngine = rxResource({
+    params: () => (this.engines.has(this.named()) ? this.named() : undefined),
+    stream: ({ params }) => this.engines.engine(params),
+  });
+  /** The spec that the fields are still as in; another engine, or a changed one, is typed in. */
+  protected readonly spec = computed(() => {
+    const engine = this.specEngine.hasValue() ? this.specEngine.value() : undefined;
+    return engine !== undefined && isSameEngine(engine, this.form()) ? this.named() : typedIn;
+  });
+  protected readonly choices = computed(() => [
+    { value: typedIn, words: 'typed in' },
+    ...this.engines.choices(),
+  ]);
+  protected readonly engineName = computed(() => {
+    const { spec, edition } = this.form();
+    return this.spec() === typedIn ? 'typed in' : `${spec}, edition ${edition}`;
+  });
+  protected readonly person = computed(() => this.sessions.person()?.name ?? '');
+  protected readonly rotorWords = computed(() => {
+    const { turns, seenFrom } = this.form();
+    return `${turns === 'anticlockwise' ? '{anticlockwise}' : turns}, seen from the ${seenFrom}`;
+  });
+  protected readonly today = new Date().toISOString().slice(0, 10);
+
+  private readonly options = computed(() => ({ dialect: this.sessions.dialect() }));
+  protected readonly capDrawing = computed(() => {
+    const { map, cap, fitted, diagnosis } = this.answer();
+    if (map === null || cap === null) return null;
+    const asFitted = fitted === null ? {} : { fitted, fittedBy: 'outlet' as const };
+    return drawCap(
+      { map, request: cap, ...asFitted, diagnosis: diagnosis ?? undefined, showRequired: true },
+      this.options(),
+    );
+  });
+  protected readonly capCaption = computed(() =>
+    this.say(
+      this.traced()
+        ? 'Cap from above, where the {leads} plug in. Angles clockwise from the mark. Dashed: inside the cap.'
+        : 'Cap from above, where the {leads} plug in. Angles clockwise from the mark.',
+    ),
+  );
+  protected readonly strip = computed(() => {
+    const { diagnosis, valveTiming, advance } = this.answer();
+    return diagnosis === null
+      ? null
+      : drawSparkStrip({ request: { valveTiming, advance }, diagnosis }, this.options());
+  });
+  protected readonly text = computed(() =>
+    this.say(caseText(this.answer(), this.engineName(), this.document.location.href)),
+  );
+
+  protected change(changes: Partial<WiringForm>): void {
+    this.show({ ...this.form(), ...changes });
+  }
+
+  protected choose(name: string): void {
+    this.problem.set(null);
+    if (name === typedIn) {
+      this.change({ spec: '', edition: '' });
+      return;
+    }
+    this.engines.engine(name).subscribe({
+      next: (form) => this.show(form),
+      error: (error: unknown) => this.problem.set(toApiProblem(error)),
+    });
+  }
+
+  protected emptyFitted(): void {
+    this.change({ fitted: {} });
+  }
+
+  protected print(): void {
+    this.document.defaultView?.print();
+  }
+
+  protected async copy(): Promise<void> {
+    try {
+      await this.document.defaultView?.navigator.clipboard.writeText(this.text());
+      this.copied.set('yes');
+    } catch {
+      this.copied.set('by-hand');
+    }
+  }
+
+  private show(form: WiringForm): void {
+    this.copied.set(null);
+    this.form.set(form);
+    this.address.write(form);
+  }
+
+  private say(text: string): string {
+    return tradeText(text, this.sessions.dialect());
+  }
+}
