@@ -3,23 +3,21 @@ import { InputError } from '@second-spanner/shared/contracts/input-error';
 import type { NewEntryRequest } from '@second-spanner/shared/contracts/sheets';
 import type { Tool } from '@second-spanner/shared/contracts/registers';
 import type { Judgement } from '@second-spanner/shared/contracts/verdict';
-import { entryAt } from '@second-spanner/shared/sheet/current-entries';
 import { judgeEntry } from '@second-spanner/shared/sheet/judge-entry';
-import { slotKeyOf } from '@second-spanner/shared/sheet/slots';
 import { appendToLedger, type DatedEvent } from '../ledger/ledger.service.js';
 import type { LedgerEvent } from '../ledger/ledger-event.js';
-import { badInput, conflict, refusedByRules } from '../platform/errors/http-problem.js';
+import { badInput, refusedByRules } from '../platform/errors/http-problem.js';
 import type { SignedIn } from '../platform/signing-in/signed-in.js';
 import type { ToolsService } from '../registers/tools.service.js';
+import { requireItsPlace } from './entry-place.js';
 import { fromContent } from './from-content.js';
 import { isReplay, onceFor } from './once.service.js';
-import { whyPassShut } from './pass-order.js';
 import { PhotosRepository } from './photos.repository.js';
 import type { EntryRow } from './record.entity.js';
 import { RecordsRepository, type Once } from './records.repository.js';
 import type { Now, OpenSheet, SheetWork } from './sheet-work.service.js';
 import { raiseForFailure, settleByCorrection, type After } from './snag-deeds.service.js';
-import { currentOf, type StepAtHand } from './step-at-hand.js';
+import type { StepAtHand } from './step-at-hand.js';
 import { whyNotRecord } from './step-rules.js';
 
 /** Records what a builder read, pulled, saw or photographed. */
@@ -121,32 +119,6 @@ async function judge(
   } catch (error) {
     throw error instanceof InputError ? fromContent(error) : error;
   }
-}
-
-/** A slot holds one entry: the first, and then corrections of it, each with its reason. */
-function requireItsPlace(step: StepAtHand, { content, replaces, reason }: NewEntryRequest): void {
-  const current = currentOf(step);
-  const slot = slotKeyOf(content);
-  const holder = entryAt(current, slot);
-  if (replaces === undefined) {
-    if (reason !== undefined) throw badInput({ field: 'reason', message: 'Only a correction has a reason.' });
-    if (holder) throw conflict('This is recorded already. Correct it with a reason.');
-  } else {
-    if (reason === undefined) throw badInput({ field: 'reason', message: 'Say why it is corrected.' });
-    const old = step.records.entries.find(({ id }) => id === replaces);
-    if (!old) throw badInput({ field: 'replaces', message: 'There is no such entry on this step.' });
-    if (!current.some(({ id }) => id === replaces)) {
-      throw conflict('This entry counts no longer: it was corrected, or the step was done again.');
-    }
-    if (slotKeyOf(old.content) !== slot) {
-      throw badInput({
-        field: 'replaces',
-        message: 'A correction is of the same place as what it corrects.',
-      });
-    }
-  }
-  const shut = whyPassShut(step, content);
-  if (shut !== null) throw refusedByRules(shut);
 }
 
 /** A correction after a second reading of this round begins a new one: what was read again counts no longer. */

@@ -4,6 +4,7 @@ import type { ToolsService } from '../registers/tools.service.js';
 import type { SpecsService } from '../spec-book/specs.service.js';
 import { CountersigningService } from './countersigning.service.js';
 import { EntriesService } from './entries.service.js';
+import { HistoryService } from './history.service.js';
 import { LayOutService } from './lay-out.service.js';
 import { SecondReadingsService } from './second-readings.service.js';
 import { SheetReading } from './sheet-reading.service.js';
@@ -15,6 +16,7 @@ import { UnmarkingService } from './unmarking.service.js';
 
 export interface SheetServices {
   readonly reading: SheetReading;
+  readonly history: HistoryService;
   readonly layOut: LayOutService;
   readonly start: StartService;
   readonly entries: EntriesService;
@@ -41,6 +43,7 @@ export function createSheetServices({ database, specs, tools, people, now }: Nee
   const secondReadings = new SecondReadingsService(work, tools);
   return {
     reading,
+    history: new HistoryService(database),
     layOut: new LayOutService(database, specs, now),
     start: new StartService(work),
     entries: new EntriesService(work, tools, now),

@@ -13,7 +13,7 @@ import { stepRoutes } from './steps.routes.js';
 
 /** `/sheets`: assembly sheets. */
 export function sheetRoutes(services: SheetServices): Router {
-  const { reading, layOut, start, snags, signing } = services;
+  const { reading, history, layOut, start, snags, signing } = services;
   const router = Router();
   router.get('/', allow('sheets.read'), async (request, response) => {
     const paging = parsePaging(request.query, 2);
@@ -42,6 +42,10 @@ export function sheetRoutes(services: SheetServices): Router {
   });
   router.get('/:id/snags', allow('sheets.read'), async (request, response) => {
     response.json(await reading.snags(signedIn(request), sheetId(request)));
+  });
+  router.get('/:id/history', allow('sheets.read'), async (request, response) => {
+    const paging = parsePaging(request.query);
+    response.json(await history.lines(signedIn(request), sheetId(request), paging));
   });
   router.post('/:id/snags/:snagId/settlements', allow('snags.settle'), async (request, response) => {
     const [who, id] = [signedIn(request), sheetId(request)];

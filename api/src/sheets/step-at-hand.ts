@@ -69,7 +69,11 @@ export const readersOf = ({ row, records }: Pick<StepAtHand, 'row' | 'records'>)
   records.secondReadings.filter(({ round }) => round === row.round).map(({ by }) => by.id);
 
 /** Whether the first figures are kept from a person. */
-export const coveredFrom = (row: StepRow, secondReaders: readonly string[], personId: string): boolean =>
+export const coveredFrom = (
+  row: Pick<StepRow, 'critical' | 'secondCheck' | 'countersigned' | 'recorderIds'>,
+  secondReaders: readonly string[],
+  personId: string,
+): boolean =>
   isCovered(
     {
       critical: row.critical,

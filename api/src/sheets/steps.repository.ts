@@ -77,6 +77,14 @@ export type StepCounts = Pick<
   | ('openSnags' | 'awaiting' | 'awaitingSince' | 'critical' | 'uncriticalReason')
 >;
 
+export type CoverRow = Pick<
+  StepRow,
+  'code' | 'critical' | 'secondCheck' | 'countersigned' | 'recorderIds'
+> & {
+  /** Whose second reading of the round at hand is in. */
+  readonly readers: readonly string[];
+};
+
 /** The steps of sheets of one shop. */
 export class StepsRepository {
   constructor(private readonly scope: ShopScope) {}
@@ -102,6 +110,18 @@ export class StepsRepository {
   /** Every step of a sheet with its records, in the sheet's order. */
   async allWithRecords(sheetId: string): Promise<(StepRow & StepRecords)[]> {
     return this.scope.manager.query(`${records} ORDER BY s.position`, [this.scope.shopId, sheetId]);
+  }
+
+  /** What decides for every critical step from whom its figures are kept. */
+  async coverCases(sheetId: string): Promise<CoverRow[]> {
+    return this.scope.manager.query(
+      `SELECT s.code, s.critical, s.second_check AS "secondCheck", s.countersigned,
+         s.recorder_ids AS "recorderIds",
+         ARRAY(SELECT r.person_id FROM second_readings r
+           WHERE r.step_id = s.id AND r.round = s.round) AS readers
+       FROM steps s WHERE s.shop_id = $1 AND s.sheet_id = $2 AND s.critical AND NOT s.countersigned`,
+      [this.scope.shopId, sheetId],
+    );
   }
 
   async insertAll(steps: readonly Omit<StepEntity, 'shopId'>[]): Promise<void> {
