@@ -6,6 +6,7 @@ import { toApiProblem, type ApiProblem } from '../http/api-problem';
 import { Cell } from '../layout/cell';
 import { Light, lights, type LightName } from '../layout/light';
 import { TitleBlock } from '../layout/title-block';
+import { WaitingList } from '../offline/waiting-list';
 import { OwnKeypad } from '../reading/own-keypad';
 import { SessionStore } from '../session/session-store';
 import { ProblemLine } from '../states/problem-line';
@@ -21,7 +22,7 @@ const lightNames: Readonly<Record<LightName, string>> = { day: 'Day', lamp: 'Lam
 /** Who one is here, and how the pages should read, shine and be typed on. */
 @Component({
   selector: 'ss-account',
-  imports: [Cell, Choice, MatButton, ProblemLine, TitleBlock],
+  imports: [Cell, Choice, MatButton, ProblemLine, TitleBlock, WaitingList],
   changeDetection: ChangeDetectionStrategy.OnPush,
   templateUrl: './account.html',
   styleUrl: './account.scss',

@@ -1,4 +1,6 @@
+import { inject, provideEnvironmentInitializer } from '@angular/core';
 import type { Routes } from '@angular/router';
+import { WaitingTray } from '../offline/waiting-tray';
 import { needs } from '../session/signed-in';
 import { Frame } from './frame';
 import { provideIcons } from './icons';
@@ -8,7 +10,8 @@ export const frameRoutes: Routes = [
   {
     path: '',
     component: Frame,
-    providers: [provideIcons()],
+    // The tray sends what waits from whichever page is opened first.
+    providers: [provideIcons(), provideEnvironmentInitializer(() => inject(WaitingTray))],
     children: [
       {
         path: '',

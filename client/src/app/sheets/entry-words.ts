@@ -36,7 +36,8 @@ function pullWords(definition: StepDefinition, pull: Pull): string {
   return lastPass(definition) > 1 ? `Pass ${pull.pass}, ${name}` : withCapital(name);
 }
 
-function pullFigure({ setting, reading, angle }: Pull): string {
+/** What the wrench showed or was set to, or how far a fastener was turned on. */
+export function pullFigure({ setting, reading, angle }: Pull): string {
   if (angle !== undefined) return `turned ${angle}°`;
   if (reading !== undefined) return printQuantity(reading);
   return setting === undefined ? 'no figure' : `set to ${printQuantity(setting)}`;

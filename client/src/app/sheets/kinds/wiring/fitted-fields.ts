@@ -15,12 +15,6 @@ import { cylindersByOutlet, cylindersOf, outletsOf, type FittedDraft } from './f
   changeDetection: ChangeDetectionStrategy.OnPush,
   template: `
     <ss-drawing [of]="drawing()" [bare]="true" [widest]="480" />
-    <p class="small quiet">
-      {{
-        'Follow each {lead} from its {outlet} to its cylinder by hand. The map is shown when all are kept.'
-          | tradeWords
-      }}
-    </p>
     <div class="outlets">
       @for (outlet of outlets(); track outlet) {
         <label [class.twice]="isTwice(outlet)">

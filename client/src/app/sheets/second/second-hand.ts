@@ -1,0 +1,83 @@
+import { ChangeDetectionStrategy, Component, computed, inject, input, viewChild } from '@angular/core';
+import { MatButton } from '@angular/material/button';
+import { RouterLink } from '@angular/router';
+import { secondCheckWords } from '@second-spanner/shared/sheet/words';
+import { Foot } from '../../foot/foot';
+import { Sentence } from '../../quantity/sentence';
+import { SessionStore } from '../../session/session-store';
+import { withCapital } from '../entry-words';
+import { SayWhy } from '../say-why/say-why';
+import { SheetHead, type HeadCell } from '../sheet/sheet-head';
+import { SheetStore } from '../sheet-store';
+import type { ShownStep } from '../shown-step';
+import { Cautions } from '../step/cautions';
+import { CoveredPlate } from '../step/covered-plate';
+import { Compared } from './compared';
+import { Inspect } from './inspect';
+import { LookAgain } from './look-again';
+import { MeasureAgain } from './measure-again';
+import { ReadLeadsAgain } from './read-leads-again';
+import { ReadSetting } from './read-setting';
+import { SecondWork } from './second-work';
+
+/** The second check at hand: the person's own reading, blind; then both side by side, to countersign or dispute. */
+@Component({
+  selector: 'ss-second-hand',
+  imports: [
+    Cautions,
+    Compared,
+    CoveredPlate,
+    Foot,
+    Inspect,
+    LookAgain,
+    MatButton,
+    MeasureAgain,
+    ReadLeadsAgain,
+    ReadSetting,
+    RouterLink,
+    SayWhy,
+    Sentence,
+    SheetHead,
+  ],
+  providers: [SecondWork],
+  changeDetection: ChangeDetectionStrategy.OnPush,
+  templateUrl: './second-hand.html',
+  styleUrl: './second.scss',
+})
+export class SecondHand {
+  protected readonly store = inject(SheetStore);
+  protected readonly work = inject(SecondWork);
+  private readonly sessions = inject(SessionStore);
+  private readonly cannot = viewChild<SayWhy>('cannot');
+
+  readonly step = input.required<ShownStep>();
+
+  protected readonly kindWords = computed(() => {
+    const { secondCheck } = this.step();
+    return secondCheck === null ? 'Second check' : withCapital(secondCheckWords[secondCheck]);
+  });
+  protected readonly caption = computed(() => `Second check, ${this.sessions.person()?.name ?? ''}`);
+  protected readonly isBlind = computed(() => this.step().secondCheck !== 'inspected');
+  protected readonly cells = computed<readonly HeadCell[]>(() => {
+    const sheet = this.store.sheet.hasValue() ? this.store.sheet.value() : null;
+    const { stage, code } = this.step();
+    return [
+      { caption: 'Stage', value: String(stage), figures: true },
+      { caption: 'Step', value: code, figures: true },
+      ...(sheet === null ? [] : [{ caption: `${sheet.carName}, engine`, value: sheet.engineCode }]),
+    ];
+  });
+  /** Why there is nothing to do here, where that is so. */
+  protected readonly idle = computed(() => {
+    const { can, secondCheck, critical, status } = this.step();
+    if (can.readAgain || this.work.own() !== null) return null;
+    if (!critical || secondCheck === null) return 'No second person checks this step.';
+    if (status === 'done') return 'This step is countersigned.';
+    if (this.step().entries.length > 0) return 'You recorded on this step: somebody else must check it.';
+    return 'It can’t be checked yet: it is not recorded so far.';
+  });
+
+  protected async sayCannot(words: string): Promise<void> {
+    if (await this.work.sayCannot(words)) this.cannot()?.done();
+  }
+}
