@@ -3,7 +3,7 @@
 import { existsSync, readFileSync, writeFileSync } from 'node:fs';
 import { fingerprint } from './fingerprint.js';
 import { apiMain, clientBuilt, root } from './places.js';
-import { runTool } from './run.js';
+import { run, runQuietly, runTool } from './run.js';
 import { Trouble, say } from './say.js';
 
 const compiled = {
@@ -40,11 +40,11 @@ export const compile = async () => {
   return code;
 };
 
-/** Builds the pages. The exit code. */
-export const buildPages = async () => {
+/** Builds the pages. The exit code. @param {typeof run} [runner] */
+export const buildPages = async (runner = run) => {
   const current = fingerprint(pages.inputs);
   const env = { ...process.env, NG_CLI_ANALYTICS: 'false' };
-  const code = await runTool('@angular/cli/bin/ng.js', ['build', '--no-progress'], { env });
+  const code = await runTool('@angular/cli/bin/ng.js', ['build', '--no-progress'], { env, runner });
   if (code === 0) writeFileSync(pages.stamp, current);
   return code;
 };
@@ -63,7 +63,7 @@ export const ensureBuilt = async () => {
   await ensureCompiled();
   if (isUpToDate(pages)) return;
   say('Building the pages …');
-  if ((await buildPages()) !== 0) {
+  if ((await buildPages(runQuietly)) !== 0) {
     throw new Trouble('The pages could not be built; the compiler says why above.');
   }
 };

@@ -4,7 +4,7 @@ import { accessSync, constants, existsSync, readFileSync } from 'node:fs';
 import { delimiter, join } from 'node:path';
 import { root } from './places.js';
 import { findPostgres } from './postgres-binaries.js';
-import { ask, run } from './run.js';
+import { ask, run, runQuietly } from './run.js';
 import { Trouble, say } from './say.js';
 
 /** @typedef {{ version?: string, optional?: boolean, link?: boolean }} Locked */
@@ -78,9 +78,9 @@ const installFromDebian = async (name, purpose, otherwise) => {
   say(`Installing ${name} from Debian's packages …`);
   const quietly = ['DEBIAN_FRONTEND=noninteractive', 'apt-get', '-qq', '-o', 'DPkg::Lock::Timeout=120'];
   const command = isRoot ? ['env', ...quietly] : ['sudo', '-n', 'env', ...quietly];
-  await run(command[0] ?? '', [...command.slice(1), 'update']);
+  await runQuietly(command[0] ?? '', [...command.slice(1), 'update']);
   const install = ['install', '-y', '--no-install-recommends', name];
-  if ((await run(command[0] ?? '', [...command.slice(1), ...install])) !== 0) {
+  if ((await runQuietly(command[0] ?? '', [...command.slice(1), ...install])) !== 0) {
     throw new Trouble(`${name} could not be installed; apt-get says why above. ${otherwise}`);
   }
 };

@@ -11,7 +11,7 @@ import {
   removeRunNote,
   writeRunNote,
 } from './data-folder.js';
-import { installPackages } from './install.js';
+import { installPackages, installPostgres } from './install.js';
 import { endLeftOver, isScript } from './left-over.js';
 import { portToServe } from './ports.js';
 import { Trouble, say } from './say.js';
@@ -39,7 +39,8 @@ export const enter = async () => {
   makeDataFolder(folder);
   onClose(() => removeRunNote(folder));
   writeRunNote(folder, { pid: process.pid, address: `http://127.0.0.1:${port}` });
-  await installPackages();
+  // Side by side: one waits for the network while the other writes to the disk.
+  await Promise.all([process.env['DATABASE_URL'] ? undefined : installPostgres(), installPackages()]);
   return { folder, port };
 };
 

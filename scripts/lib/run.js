@@ -2,7 +2,7 @@
 // Runs other programs. Each gets a process group of its own, so that Ctrl-C reaches only us and
 // everything is ended in the right order.
 import { spawn, spawnSync } from 'node:child_process';
-import { onClose } from './closing.js';
+import { isClosing, onClose } from './closing.js';
 import { root } from './places.js';
 
 /** @typedef {import('node:child_process').ChildProcess} ChildProcess */
@@ -59,9 +59,31 @@ export const run = (command, args, options = {}) =>
     child.once('exit', (code) => resolve(code ?? 1));
   });
 
-/** Runs one of the tools that npm installed. @param {string} script its file below node_modules @param {string[]} args @param {SpawnOptions} [options] */
-export const runTool = (script, args, options = {}) =>
-  run(process.execPath, [`${root}/node_modules/${script}`, ...args], options);
+/**
+ * Runs one of the tools that npm installed.
+ * @param {string} script its file below node_modules @param {string[]} args
+ * @param {SpawnOptions & { runner?: typeof run }} [options] how it is run: aloud unless told otherwise
+ */
+export const runTool = (script, args, { runner = run, ...options } = {}) =>
+  runner(process.execPath, [`${root}/node_modules/${script}`, ...args], options);
+
+/**
+ * Runs a program to its end and keeps what it says to itself, unless it fails. Resolves to its exit code.
+ * @param {string} command @param {string[]} args @param {SpawnOptions} [options] @returns {Promise<number>}
+ */
+export const runQuietly = (command, args, options = {}) =>
+  new Promise((resolve) => {
+    const child = begin(command, args, { ...options, stdio: ['ignore', 'pipe', 'pipe'] });
+    /** @type {Buffer[]} */
+    const said = [];
+    child.stdout?.on('data', (chunk) => said.push(chunk));
+    child.stderr?.on('data', (chunk) => said.push(chunk));
+    child.once('error', () => resolve(1));
+    child.once('close', (code) => {
+      if (code !== 0 && !isClosing()) process.stderr.write(Buffer.concat(said));
+      resolve(code ?? 1);
+    });
+  });
 
 /**
  * Runs a short program and waits for it. What it printed, or undefined when it failed or is not there.

@@ -87,9 +87,7 @@ const runAll = async (steps, reports) => {
 
 await runBody(async () => {
   closeOnSignal(130);
-  await installPackages();
-  await installPostgres();
-  await installChromium();
+  await Promise.all([installPackages(), installPostgres().then(installChromium)]);
   const { folder, url } = await startThrowAway();
   const results = await runAll(stepsAgainst(url, await freePort()), join(folder, 'reports'));
   await closeAll();
