@@ -16,19 +16,27 @@ const secrets = [
 export const createLog = (level: string): Logger =>
   pino(
     { level, base: undefined, redact: { paths: secrets, censor: '[hidden]' } },
-    pino.destination({ dest: 1, sync: false, minLength: 4096, periodicFlush: 500 }),
+    pino.destination({ dest: 1, sync: false, minLength: 8192, periodicFlush: 500 }),
   );
+
+interface AskedFor {
+  readonly id: unknown;
+  readonly method: string;
+  readonly originalUrl?: string;
+  readonly url: string;
+}
 
 /** One line a request: what was asked, how it ended, how long it took. Headers and bodies stay out. */
 export const requestLog = (log: Logger): RequestHandler =>
   pinoHttp({
     logger: log,
-    quietReqLogger: true,
+    // The request itself, not a copy with all its headers.
+    wrapSerializers: false,
     serializers: {
-      req: ({ id, method, url }: { id: unknown; method: string; url: string }) => ({
+      req: ({ id, method, originalUrl, url }: AskedFor) => ({
         id,
         method,
-        path: url.split('?', 1)[0],
+        path: (originalUrl ?? url).split('?', 1)[0],
       }),
       res: ({ statusCode }: { statusCode: number }) => ({ statusCode }),
     },
