@@ -29,6 +29,15 @@ function secondCheckAct({ stepKind }: BenchItem): string {
 }
 
 /** The address of what an item asks for. */
-export function benchLink({ sheetId, stepCode }: BenchItem): readonly string[] {
-  return stepCode === null ? ['/sheets', sheetId] : ['/sheets', sheetId, 'steps', stepCode];
+export function benchLink({ kind, sheetId, stepCode }: BenchItem): readonly string[] {
+  const sheet = ['/sheets', sheetId];
+  if (stepCode !== null) {
+    return [...sheet, 'steps', stepCode, ...(kind === 'second-check' ? ['second'] : [])];
+  }
+  return kind === 'sign' || kind === 'release' ? [...sheet, 'sign-off'] : sheet;
+}
+
+/** Whether an item's step is something that has a shape. */
+export function hasDrawing({ stepKind }: BenchItem): boolean {
+  return stepKind !== null && stepKind !== 'check' && stepKind !== 'photo';
 }

@@ -14,7 +14,8 @@ import { When } from '../words/dates';
 import { roleNames, stateNames } from '../words/names';
 import { TradeWords } from '../words/trade-words';
 import { BenchStore } from './bench-store';
-import { benchLink, benchWords } from './bench-words';
+import { BenchDrawing } from './bench-drawing';
+import { benchLink, benchWords, hasDrawing } from './bench-words';
 
 const today = new Intl.DateTimeFormat('en-GB', { weekday: 'long', day: 'numeric', month: 'long' });
 
@@ -22,6 +23,7 @@ const today = new Intl.DateTimeFormat('en-GB', { weekday: 'long', day: 'numeric'
 @Component({
   selector: 'ss-bench',
   imports: [
+    BenchDrawing,
     Cell,
     EmptyState,
     LoadState,
@@ -51,9 +53,16 @@ export class BenchPage {
     const person = this.sessions.person();
     return person === null ? '' : `${person.name}, ${roleNames[person.role]}`;
   });
+  /** Where there is room beside the words. */
+  private readonly isWide = matchMedia('(min-width: 1200px)').matches;
   protected readonly items = computed(() =>
     this.bench.hasValue()
-      ? this.bench.value().items.map((item) => ({ ...item, words: benchWords(item), link: benchLink(item) }))
+      ? this.bench.value().items.map((item) => ({
+          ...item,
+          words: benchWords(item),
+          link: benchLink(item),
+          isDrawn: this.isWide && hasDrawing(item),
+        }))
       : [],
   );
   protected readonly onTheStand = computed(() =>

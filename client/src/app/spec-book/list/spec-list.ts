@@ -2,26 +2,18 @@ import { HttpClient } from '@angular/common/http';
 import { ChangeDetectionStrategy, Component, computed, inject } from '@angular/core';
 import { rxResource } from '@angular/core/rxjs-interop';
 import { RouterLink } from '@angular/router';
-import type { EditionState, SpecSummary } from '@second-spanner/shared/contracts/spec';
+import type { SpecSummary } from '@second-spanner/shared/contracts/spec';
 import { Cell } from '../../layout/cell';
 import { TitleBlock } from '../../layout/title-block';
 import { allPages } from '../../list/all-pages';
 import { EmptyState } from '../../states/empty-state';
 import { LoadState } from '../../states/load-state';
-import type { SignName } from '../../verdict/signs';
-import { VerdictLine } from '../../verdict/verdict';
 import { When } from '../../words/dates';
-
-const stateSigns: Readonly<Record<EditionState, { readonly sign: SignName; readonly word: string }>> = {
-  approved: { sign: 'pass', word: 'Approved' },
-  draft: { sign: 'waiting', word: 'Draft' },
-  superseded: { sign: 'hold', word: 'Superseded' },
-};
 
 /** The shop's engine specs, each with its editions, the newest first. */
 @Component({
   selector: 'ss-spec-list',
-  imports: [Cell, EmptyState, LoadState, RouterLink, TitleBlock, VerdictLine, When],
+  imports: [Cell, EmptyState, LoadState, RouterLink, TitleBlock, When],
   changeDetection: ChangeDetectionStrategy.OnPush,
   templateUrl: './spec-list.html',
   styleUrl: './spec-list.scss',
@@ -36,5 +28,4 @@ export class SpecList {
       editions: spec.editions.toSorted((a, b) => b.edition - a.edition),
     })),
   );
-  protected readonly stateSigns = stateSigns;
 }
