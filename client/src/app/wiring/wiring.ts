@@ -16,6 +16,8 @@ import { ProblemLine } from '../states/problem-line';
 import { VerdictLine } from '../verdict/verdict';
 import { TradeWords } from '../words/trade-words';
 import { caseText } from './answer/case-text';
+import { EngineFacts } from './answer/engine-facts';
+import { rotorWords } from './answer/fact-words';
 import { Judgement } from './answer/judgement';
 import { LeadTable } from './answer/lead-table';
 import { workOut } from './answer/work-out';
@@ -35,6 +37,7 @@ const typedIn = '';
     Cell,
     ChosenField,
     DrawingFigure,
+    EngineFacts,
     EngineFields,
     FittedCells,
     Judgement,
@@ -59,7 +62,7 @@ export class WiringPage {
   protected readonly isDesk = inject(Wide).isDesk;
 
   protected readonly form = signal<WiringForm>(blankForm);
-  /** On the phone the engine's fields stand open until there is a map, and when they are opened. */
+  /** The engine's fields stand open until there is a map, and when they are asked for. */
   protected readonly engineOpen = signal(true);
   protected readonly problem = signal<ApiProblem | null>(null);
   protected readonly copied = signal<'yes' | 'by-hand' | null>(null);
@@ -90,10 +93,7 @@ export class WiringPage {
     return this.spec() === typedIn ? 'typed in' : `${spec}, edition ${edition}`;
   });
   protected readonly person = computed(() => this.sessions.person()?.name ?? '');
-  protected readonly rotorWords = computed(() => {
-    const { turns, seenFrom } = this.form();
-    return `${turns === 'anticlockwise' ? '{anticlockwise}' : turns}, seen from the ${seenFrom}`;
-  });
+  protected readonly rotor = computed(() => rotorWords(this.form()));
   protected readonly today = new Date().toISOString().slice(0, 10);
 
   private readonly options = computed(() => ({ dialect: this.sessions.dialect() }));
@@ -134,7 +134,10 @@ export class WiringPage {
       return;
     }
     this.engines.engine(name).subscribe({
-      next: (form) => this.show(form),
+      next: (form) => {
+        this.engineOpen.set(false);
+        this.show(form);
+      },
       error: (error: unknown) => this.problem.set(toApiProblem(error)),
     });
   }

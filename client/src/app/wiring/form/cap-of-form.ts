@@ -92,7 +92,12 @@ function errorsOf({ form, count, order, posts, intervals }: Readings): FormError
     if (form.spacing === 'even') errors.firstAngle = 'Write the angle of one post in degrees, such as 45.';
     else errors.angles = 'Write the angles in degrees, such as 45, 135, 225, 315.';
   }
-  if (posts !== null && form.first !== '' && !posts.some(({ key }) => key === form.first)) {
+  if (
+    posts !== null &&
+    posts.length > 0 &&
+    form.first !== '' &&
+    !posts.some(({ key }) => key === form.first)
+  ) {
     errors.first = `No post stands at ${form.first}° now. Choose the post for the first cylinder.`;
   }
   if (intervals === null) errors.intervals = 'Write the intervals in degrees, such as 90-150-90-150.';
