@@ -1,6 +1,7 @@
 import cookieParser from 'cookie-parser';
 import express, { Router, type Express } from 'express';
 import type { Logger } from 'pino';
+import { benchRoutes } from './bench/bench.routes.js';
 import { buildSheetRoutes } from './build-sheets/build-sheets.routes.js';
 import { calculationRoutes } from './calculations/calculations.routes.js';
 import { carRoutes } from './car-files/cars.routes.js';
@@ -14,20 +15,26 @@ import { healthRoutes } from './platform/http/health.routes.js';
 import { jsonBody } from './platform/http/json-body.js';
 import { generalLimit } from './platform/http/rate-limits.js';
 import { staticClient } from './platform/http/static-client.js';
+import type { SheetEvents } from './platform/live-events/sheet-events.js';
 import { requestLog } from './platform/log.js';
 import { accessClaims, authentication } from './platform/signing-in/authentication.js';
 import { SessionCookies } from './platform/signing-in/cookies.js';
 import { xsrf } from './platform/signing-in/xsrf.js';
 import { toolRoutes } from './registers/tools.routes.js';
 import type { Services } from './services.js';
+import { sheetEventRoutes } from './sheets/sheet-events.routes.js';
 import { sheetRoutes } from './sheets/sheets.routes.js';
 import { specRoutes } from './spec-book/specs.routes.js';
+import { verificationRoutes } from './verification/verification.routes.js';
 
 export interface AppDependencies {
   readonly config: Pick<Config, 'publicUrl' | 'clientDir' | 'trustedProxies' | 'requestsPerMinute'>;
   readonly log: Logger;
   readonly database: Database;
   readonly services: Services;
+  readonly events: SheetEvents;
+  /** How often a stream of events shows that it lives. */
+  readonly heartbeatMs?: number;
 }
 
 /** The whole application as one request handler; it listens nowhere by itself. */
@@ -44,7 +51,7 @@ export function createApp(deps: AppDependencies): Express {
   return app;
 }
 
-function apiRoutes({ config, database, services }: AppDependencies): Router {
+function apiRoutes({ config, database, services, events, heartbeatMs = 15_000 }: AppDependencies): Router {
   const { sessions, people, cars, specs, tools, sheets, buildSheets } = services;
   const cookies = new SessionCookies(config.publicUrl);
   const api = Router();
@@ -65,7 +72,11 @@ function apiRoutes({ config, database, services }: AppDependencies): Router {
   api.use('/cars', carRoutes(cars));
   api.use('/specs', specRoutes(specs));
   api.use('/tools', toolRoutes(tools));
-  api.use('/sheets', sheetRoutes(sheets), buildSheetRoutes(buildSheets));
+  const { readSession } = services;
+  const live = { events, readSession, reading: sheets.reading, heartbeatMs };
+  api.use('/sheets', sheetEventRoutes(live), sheetRoutes(sheets), buildSheetRoutes(buildSheets));
+  api.use('/bench', benchRoutes(services.bench));
+  api.use('/verifications', verificationRoutes(services.verification));
   api.use('/calculations', calculationRoutes());
   api.use(unknownRoute);
   return api;

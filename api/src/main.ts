@@ -5,6 +5,8 @@ import type { Logger } from 'pino';
 import { createApp } from './app.js';
 import { readConfig, type Config } from './config.js';
 import { loadWholeDemo } from './demo/load-demo.js';
+import { HashingThread } from './people/hashing-thread.js';
+import { createMailer } from './mail/mailer.js';
 import { createDataSource } from './platform/database/data-source.js';
 import { Database } from './platform/database/database.js';
 import { fillWhenEmpty } from './platform/database/loading.js';
@@ -29,11 +31,14 @@ async function main(): Promise<void> {
     events.publish(changes);
   });
   await events.start();
-  const services = createServices(config, database);
+  const hashing = new HashingThread();
+  const services = createServices({ ...config, hashing }, database, {
+    sendMail: createMailer(config.smtpUrl, config.publicUrl, log),
+  });
   if (config.demo) {
-    await loadDemo(dataSource, (now) => createServices(config, database, now), log);
+    await loadDemo(dataSource, (now) => createServices({ ...config, hashing }, database, { now }), log);
   }
-  const server = createServer(createApp({ config, log, database, services }));
+  const server = createServer(createApp({ config, log, database, services, events }));
   closeGracefully(server, log, {
     endStreams: () => events.stop(),
     close: () => dataSource.destroy(),

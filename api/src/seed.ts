@@ -21,7 +21,7 @@ async function seed(): Promise<void> {
   await dataSource.initialize();
   try {
     const database = new Database(dataSource);
-    await refill(dataSource, () => loadWholeDemo((now) => createServices(config, database, now)));
+    await refill(dataSource, () => loadWholeDemo((now) => createServices(config, database, { now })));
   } finally {
     await dataSource.destroy();
   }

@@ -1,8 +1,11 @@
+import { BenchService } from './bench/bench.service.js';
 import { BuildSheetsService } from './build-sheets/build-sheets.service.js';
 import { CarsService } from './car-files/cars.service.js';
 import type { Config } from './config.js';
 import { DiskFileStore } from './files/file-store.js';
 import { FilesService } from './files/files.service.js';
+import { hashingHere, type Hashing } from './people/hashing.js';
+import type { SendMail } from './mail/mailer.js';
 import { PeopleService } from './people/people.service.js';
 import { Passwords } from './people/passwords.js';
 import { sessionReader } from './people/read-sessions.js';
@@ -13,6 +16,7 @@ import type { ReadSession } from './platform/signing-in/authentication.js';
 import { ToolsService } from './registers/tools.service.js';
 import { createSheetServices, type SheetServices } from './sheets/sheet-services.js';
 import { SpecsService } from './spec-book/specs.service.js';
+import { VerificationService } from './verification/verification.service.js';
 
 export interface Services {
   readonly tokens: AccessTokens;
@@ -25,26 +29,35 @@ export interface Services {
   readonly sheets: SheetServices;
   readonly buildSheets: BuildSheetsService;
   readonly files: FilesService;
+  readonly bench: BenchService;
+  readonly verification: VerificationService;
 }
 
-type ServiceConfig = Pick<Config, 'secret' | 'passwordCost' | 'dataDir' | 'publicUrl'>;
+type ServiceConfig = Pick<Config, 'secret' | 'passwordCost' | 'dataDir' | 'publicUrl'> & {
+  /** Where passwords are hashed; by default on the thread at hand. */
+  readonly hashing?: Hashing;
+};
 
-/**
- * All services, each made once and given what it needs.
- * @param now the clock that everything recorded on sheets is dated by
- */
+/** What comes from outside, and what stands for it where nothing is given. */
+export interface Outside {
+  /** The clock that everything recorded on sheets is dated by. */
+  readonly now?: () => Date;
+  readonly sendMail?: SendMail;
+}
+
+/** All services, each made once and given what it needs. */
 export function createServices(
-  { secret, passwordCost, dataDir, publicUrl }: ServiceConfig,
+  { secret, passwordCost, dataDir, publicUrl, hashing = hashingHere }: ServiceConfig,
   database: Database,
-  now = (): Date => new Date(),
+  { now = () => new Date(), sendMail = () => Promise.resolve(false) }: Outside = {},
 ): Services {
-  const passwords = new Passwords(passwordCost);
+  const passwords = new Passwords(passwordCost, hashing);
   const tokens = new AccessTokens(secret);
   const readSession = sessionReader(database);
   const specs = new SpecsService(database);
   const tools = new ToolsService(database);
   const people = new PeopleService(database, passwords);
-  const sheets = createSheetServices({ database, specs, tools, people, now });
+  const sheets = createSheetServices({ database, specs, tools, people, now, sendMail, publicUrl });
   return {
     tokens,
     readSession,
@@ -52,6 +65,8 @@ export function createServices(
     cars: new CarsService(database, sheets.reading.ofCar),
     ...{ people, specs, tools, sheets },
     buildSheets: new BuildSheetsService(sheets.reading, tools, publicUrl),
+    bench: new BenchService(database, sheets.reading),
+    verification: new VerificationService(database),
     files: new FilesService(database, new DiskFileStore(dataDir), now),
   };
 }

@@ -59,7 +59,7 @@ async function layOut(
     builderId: idOf(people, sheet.builder),
     countersignerId: idOf(people, sheet.countersigner),
   };
-  return sheets.layOut.layOut(builder, request, sheet.code);
+  return sheets.layOut.layOut(builder, request, { code: sheet.code });
 }
 
 /** Photos are stored only for sheets that are worked. */

@@ -11,7 +11,7 @@ import { partiesOf, type SecondReadingsService } from './second-readings.service
 import type { Done, OpenSheet, SheetWork } from './sheet-work.service.js';
 import { raiseSnag } from './snag-deeds.service.js';
 import { hasOpenDisagreement, type StepAtHand } from './step-at-hand.js';
-import { whyNotAgree, whyNotCountersign } from './step-rules.js';
+import { whyNotAgree, whyNotCountersign, whySheetClosed } from './step-rules.js';
 
 /** Countersigns steps, or disputes them. */
 export class CountersigningService {
@@ -32,6 +32,8 @@ export class CountersigningService {
     return this.work.onStep(who, sheetId, code, async (open, step) => {
       const sentBefore = await new RecordsRepository(open.scope).sentUnder('countersignatures', key);
       if (isReplay(sentBefore, once)) return null;
+      const closed = whySheetClosed(step.sheetState);
+      if (closed !== null) throw refusedByRules(closed);
       refuseSecondTime(open, step);
       const why = whyNotCountersign(step, open.by.id);
       if (why !== null) throw refusedByRules(why);

@@ -6,7 +6,7 @@ import type { NewSheetRequest } from '@second-spanner/shared/contracts/sheets';
 import type { SpecEdition } from '@second-spanner/shared/contracts/spec';
 import type { StepDefinition } from '@second-spanner/shared/contracts/steps';
 import { nextStep } from '@second-spanner/shared/sheet/gates';
-import { proposeSheet } from '@second-spanner/shared/sheet/proposal/propose-sheet';
+import { proposeSheet, type ProposedSheet } from '@second-spanner/shared/sheet/proposal/propose-sheet';
 import { slotsOf } from '@second-spanner/shared/sheet/slots';
 import { appendToLedger } from '../ledger/ledger.service.js';
 import type { Database, ShopScope } from '../platform/database/database.js';
@@ -20,6 +20,12 @@ import { toGateStep } from './step-at-hand.js';
 import type { StepEntity } from './step.entity.js';
 import { StepsRepository } from './steps.repository.js';
 
+/** What is given for a sheet beside the request. */
+export interface Given {
+  readonly code?: string;
+  readonly proposal?: ProposedSheet;
+}
+
 /** Lays out sheets from approved editions. */
 export class LayOutService {
   constructor(
@@ -29,16 +35,16 @@ export class LayOutService {
   ) {}
 
   /**
-   * Lays out a planned sheet and answers its id.
-   * @param code the sheet's code where it is given; otherwise the next number of the shop
+   * Lays out a planned sheet and answers its id. Its code is the next number of the shop, and its steps are what
+   * the spec proposes, where nothing else is given.
    */
-  async layOut(who: SignedIn, request: NewSheetRequest, code?: string): Promise<string> {
+  async layOut(who: SignedIn, request: NewSheetRequest, given: Given = {}): Promise<string> {
     return this.database.withShop(who.shop.id, async (scope) => {
       const edition = await this.checked(scope, request);
       const sheets = new SheetsRepository(scope);
       const id = randomUUID();
       const at = this.now();
-      const { stages, steps: definitions } = proposeSheet(edition.document);
+      const { stages, steps: definitions } = given.proposal ?? proposeSheet(edition.document);
       const steps = definitions.map((definition, index) => toStep(id, definition, index + 1));
       await sheets.insert({
         ...{ id, carId: request.carId, specEditionId: edition.id, builderId: request.builderId },
@@ -46,7 +52,8 @@ export class LayOutService {
         ...{ changedAt: at, state: 'planned', version: 1, signRound: 1, stages },
         ...{ stepsDone: 0, stepsTotal: steps.length, openSnags: 0 },
         ...{ nextStep: nextStep(steps.map(toGateStep)), contentHash: null, verificationCode: null },
-        code: code ?? `${initials(who.shop.name)}-${String(await sheets.nextNumber()).padStart(4, '0')}`,
+        code:
+          given.code ?? `${initials(who.shop.name)}-${String(await sheets.nextNumber()).padStart(4, '0')}`,
       });
       await new StepsRepository(scope).insertAll(steps);
       const by = { id: who.person.id, name: who.person.name, role: who.person.role };

@@ -1,7 +1,9 @@
+import type { SendMail } from '../mail/mailer.js';
 import type { Database } from '../platform/database/database.js';
 import type { PeopleService } from '../people/people.service.js';
 import type { ToolsService } from '../registers/tools.service.js';
 import type { SpecsService } from '../spec-book/specs.service.js';
+import { CallsService } from './calls.service.js';
 import { CountersigningService } from './countersigning.service.js';
 import { EntriesService } from './entries.service.js';
 import { HistoryService } from './history.service.js';
@@ -25,6 +27,7 @@ export interface SheetServices {
   readonly snags: SnagsService;
   readonly unmarking: UnmarkingService;
   readonly signing: SigningService;
+  readonly calls: CallsService;
 }
 
 interface Needs {
@@ -34,10 +37,13 @@ interface Needs {
   readonly people: PeopleService;
   /** What everything recorded is dated by. */
   readonly now: Now;
+  readonly sendMail: SendMail;
+  readonly publicUrl: URL;
 }
 
 /** Everything that can be done with sheets, one service a deed. */
-export function createSheetServices({ database, specs, tools, people, now }: Needs): SheetServices {
+export function createSheetServices(needs: Needs): SheetServices {
+  const { database, specs, tools, people, now, sendMail, publicUrl } = needs;
   const work = new SheetWork(database, now);
   const reading = new SheetReading(database, tools);
   const secondReadings = new SecondReadingsService(work, tools);
@@ -52,5 +58,6 @@ export function createSheetServices({ database, specs, tools, people, now }: Nee
     snags: new SnagsService(work),
     unmarking: new UnmarkingService(work),
     signing: new SigningService(work, reading, people),
+    calls: new CallsService(work, sendMail, publicUrl),
   };
 }

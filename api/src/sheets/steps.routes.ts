@@ -1,4 +1,5 @@
 import { Router, type Request, type Response } from 'express';
+import type { CallAnswer } from '@second-spanner/shared/contracts/sheets';
 import { allow } from '../platform/signing-in/authentication.js';
 import { signedIn, type SignedIn } from '../platform/signing-in/signed-in.js';
 import { parseBody } from '../platform/validation/parse-body.js';
@@ -23,7 +24,7 @@ const statusFor = (isNew: boolean): number => (isNew ? 201 : 200);
 
 /** `/sheets/:id/steps/:code`: one step, and what is recorded on it. Every answer is the step as it then stands. */
 export function stepRoutes(services: SheetServices): Router {
-  const { reading, entries, secondReadings, countersigning, snags, unmarking } = services;
+  const { reading, entries, secondReadings, countersigning, snags, unmarking, calls } = services;
   const router = Router({ mergeParams: true });
   const answer = async (response: Response, place: Place, status: number): Promise<void> => {
     response.status(status).json(await reading.step(...place));
@@ -56,6 +57,12 @@ export function stepRoutes(services: SheetServices): Router {
     const place = placeOf(request);
     await unmarking.unmark(...place, parseBody(UnmarkCriticalDto, request.body));
     await answer(response, place, 200);
+  });
+  router.post('/calls', allow('entries.record'), async (request, response) => {
+    const place = placeOf(request);
+    const mailed = await calls.call(...place);
+    const answered: CallAnswer = { ...(await reading.step(...place)), mailed };
+    response.json(answered);
   });
   return router;
 }

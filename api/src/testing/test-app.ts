@@ -5,6 +5,7 @@ import type { AddressInfo } from 'node:net';
 import { tmpdir } from 'node:os';
 import { join } from 'node:path';
 import { createApp } from '../app.js';
+import type { Mail } from '../mail/mailer.js';
 import { Database } from '../platform/database/database.js';
 import { SheetEvents } from '../platform/live-events/sheet-events.js';
 import { createLog } from '../platform/log.js';
@@ -17,6 +18,8 @@ export interface TestApp {
   readonly db: TestDatabase;
   readonly database: Database;
   readonly services: Services;
+  /** Mails that would have gone out. */
+  readonly sent: readonly Mail[];
   close(): Promise<void>;
 }
 
@@ -24,6 +27,8 @@ export interface TestAppOptions {
   readonly clientDir?: string;
   readonly publicUrl?: string;
   readonly requestsPerMinute?: number;
+  /** The mail server refuses everything. */
+  readonly mailFails?: boolean;
 }
 
 /** The whole application on a database of its own, listening on a free port. */
@@ -45,14 +50,20 @@ export async function startTestApp(options: TestAppOptions = {}): Promise<TestAp
     events.publish(changes);
   });
   await events.start();
-  const services = createServices(config, database);
-  const server = createServer(createApp({ config, log, database, services }));
+  const sent: Mail[] = [];
+  const services = createServices(config, database, {
+    sendMail: (mail) => {
+      sent.push(mail);
+      return Promise.resolve(options.mailFails !== true);
+    },
+  });
+  const server = createServer(createApp({ config, log, database, services, events, heartbeatMs: 300 }));
   await new Promise<void>((listening) => {
     server.listen(0, '127.0.0.1', listening);
   });
   const { port } = server.address() as AddressInfo;
   return {
-    ...{ db, database, services },
+    ...{ db, database, services, sent },
     address: `http://127.0.0.1:${port}`,
     close: async () => {
       await events.stop();

@@ -1,0 +1,90 @@
+import { Router, type Request, type Response } from 'express';
+import { may } from '@second-spanner/shared/contracts/permissions';
+import type { SheetEvents } from '../platform/live-events/sheet-events.js';
+import { allow, type ReadSession } from '../platform/signing-in/authentication.js';
+import { signedIn, type SignedIn } from '../platform/signing-in/signed-in.js';
+import { parseId } from '../platform/validation/parse-id.js';
+import type { SheetReading } from './sheet-reading.service.js';
+
+export interface LiveDependencies {
+  readonly events: SheetEvents;
+  readonly readSession: ReadSession;
+  readonly reading: SheetReading;
+  /** How often a stream shows that it lives, and is asked whether it still may. */
+  readonly heartbeatMs: number;
+}
+
+/** `/sheets/:id/events`: told when something on the sheet changed, never what. */
+export function sheetEventRoutes(live: LiveDependencies): Router {
+  const router = Router();
+  router.get('/:id/events', allow('sheets.read'), async (request, response) => {
+    const who = signedIn(request);
+    const id = parseId(request.params['id'], 'sheet');
+    const version = await live.reading.version(who, id);
+    open(response);
+    // What happened before the stream stood would otherwise be missed.
+    tell(response, id, version);
+    follow(live, who, id, request, response);
+  });
+  return router;
+}
+
+function open(response: Response): void {
+  response.set({
+    'Content-Type': 'text/event-stream; charset=utf-8',
+    'Cache-Control': 'no-store',
+    // A proxy that gathers the answer would hold the events back.
+    'X-Accel-Buffering': 'no',
+  });
+  response.flushHeaders();
+  response.write('retry: 2000\n\n');
+}
+
+const tell = (response: Response, sheetId: string, version: number): void => {
+  response.write(`event: changed\ndata: ${JSON.stringify({ sheetId, version })}\n\n`);
+};
+
+function follow(
+  live: LiveDependencies,
+  who: SignedIn,
+  id: string,
+  request: Request,
+  response: Response,
+): void {
+  const unsubscribe = live.events.subscribe(id, {
+    changed: (change) => {
+      tell(response, change.sheetId, change.version);
+    },
+    // The client connects again by itself and is then told where the sheet stands.
+    interrupted: () => {
+      response.end();
+    },
+  });
+  const heartbeat = setInterval(() => {
+    void stillMay(live, who, id).then((may) => {
+      if (may) response.write(': here\n\n');
+      else response.end();
+    });
+  }, live.heartbeatMs);
+  request.once('close', () => {
+    clearInterval(heartbeat);
+    unsubscribe();
+  });
+}
+
+/** Whether the session still runs and the person may still read the sheet; false too when nobody can tell. */
+async function stillMay(
+  { readSession, reading }: LiveDependencies,
+  who: SignedIn,
+  id: string,
+): Promise<boolean> {
+  try {
+    const { sessionId, person, shop } = who;
+    const now = await readSession({ sessionId, personId: person.id, shopId: shop.id });
+    if (!now || !may(now.person.role, 'sheets.read')) return false;
+    await reading.version(now, id);
+    return true;
+  } catch {
+    return false;
+  }
+}
