@@ -96,6 +96,16 @@ describe('a head in two rows of five', () => {
     },
   );
 
+  it('counts its bores by the columns of fasteners when it is not told', () => {
+    const plain = drawTightening({
+      plan: { sequence: ['1', '2', '3', '4', '5', '6', '7', '8', '9', '10'], basis: 'maker' },
+      positions: fastenerPositions({ pattern: 'grid', rows: 2, columns: 5 }),
+      outline: 'head',
+    });
+    expect(partsOf(plain, 'bore')).toHaveLength(4);
+    expect(wordsOf(plain)).toContain('front');
+  });
+
   it('has its bores dashed between the fasteners', () => {
     const bores = partsOf(drawing, 'bore') as readonly CircleShape[];
     expect(bores.map(({ pen }) => pen)).toEqual(['hidden', 'hidden', 'hidden', 'hidden']);

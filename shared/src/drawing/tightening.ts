@@ -21,13 +21,13 @@ export interface TighteningDrawingInput {
   /** Plain units, y downwards; `fastenerPositions` gives those of a pattern. */
   readonly positions: readonly FastenerPosition[];
   readonly outline: PartOutline;
-  /** How many bores lie under a head. */
+  /** How many bores lie under a head; by default one between each two columns of its fasteners. */
   readonly bores?: number;
   /** What is not named is to come; without any, the drawing shows the order alone. */
   readonly states?: Readonly<Record<string, FastenerState>>;
   /** Numbers are places in the order, or the fasteners' own names. */
   readonly numbers?: 'order' | 'name';
-  /** Which way the front lies, and what the upper and the lower side are called. */
+  /** Which way the front lies, to the left on a head by default, and what the two sides are called. */
   readonly labels?: { readonly front?: 'left' | 'right'; readonly top?: string; readonly bottom?: string };
   /** What is being tightened. */
   readonly title?: string;
@@ -35,7 +35,9 @@ export interface TighteningDrawingInput {
 
 /** The tightening order on the part's outline, which is generic and drawn from where the fasteners stand. */
 export function drawTightening(input: TighteningDrawingInput, options?: DrawingOptions): Drawing {
-  const { states, labels = {} } = input;
+  const { states } = input;
+  const labels =
+    input.outline === 'head' ? { front: 'left' as const, ...input.labels } : (input.labels ?? {});
   const { say } = wording(options);
   const top = labels.front === undefined && labels.top === undefined ? 8 : 38;
   const layout = layOutFasteners(input.positions, input.outline, top);
@@ -70,8 +72,14 @@ function bodyBottom({ box }: TighteningLayout, outline: PartOutline): number {
   return box.bottom + edgeMargin + (outline === 'head' ? 8 : 4);
 }
 
+/** One bore between each two columns, where the fasteners stand in columns of two or more. */
+function boresUnder(positions: readonly FastenerPosition[]): number {
+  const columns = new Set(positions.map(({ x }) => x)).size;
+  return columns * 2 <= positions.length ? columns - 1 : 0;
+}
+
 function outlineOf(
-  { outline, bores = 0, labels }: TighteningDrawingInput,
+  { outline, positions, bores = boresUnder(positions), labels }: TighteningDrawingInput,
   { box, places }: TighteningLayout,
 ): readonly Shape[] {
   switch (outline) {
