@@ -1,14 +1,16 @@
-import { httpResource } from '@angular/common/http';
 import { computed, DestroyRef, effect, inject, Injectable, signal, untracked } from '@angular/core';
-import { takeUntilDestroyed } from '@angular/core/rxjs-interop';
+import { rxResource, takeUntilDestroyed } from '@angular/core/rxjs-interop';
 import type { Sheet, SnagView, StepDetail, StepLine } from '@second-spanner/shared/contracts/sheets';
-import type { Subscription } from 'rxjs';
+import { catchError, concatMap, EMPTY, from, type Subscription } from 'rxjs';
+import { KeptCopies } from '../offline/kept-copies';
 import { WaitingTray } from '../offline/waiting-tray';
 import { SessionStore } from '../session/session-store';
 import { sheetNews, type SheetNews } from './sheet-events';
 import { stepUrl } from './sheet-api';
 import { shownStep, type ShownStep } from './shown-step';
 import { ToolsStore } from './tools/tools-store';
+
+const stepsAhead = 8;
 
 /**
  * One sheet while one works on it: the sheet, the step at hand with what waits in the tray laid over it, and its
@@ -17,6 +19,7 @@ import { ToolsStore } from './tools/tools-store';
 @Injectable()
 export class SheetStore {
   private readonly tray = inject(WaitingTray);
+  private readonly copies = inject(KeptCopies);
   private readonly sessions = inject(SessionStore);
   private readonly tools = inject(ToolsStore);
   private readonly openId = signal<string | null>(null);
@@ -24,18 +27,22 @@ export class SheetStore {
   private readonly wantsSnags = signal(false);
   /** Told of a change while a reading of it was under way: it must be read once more. */
   private readonly isStale = signal(false);
+  private aheadOf: string | null = null;
 
-  readonly sheet = httpResource<Sheet>(() => {
-    const id = this.openId();
-    return id === null ? undefined : `/api/sheets/${id}`;
+  readonly sheet = rxResource({
+    params: () => this.openId() ?? undefined,
+    stream: ({ params: id }) => this.copies.read<Sheet>(`/api/sheets/${id}`),
   });
-  readonly detail = httpResource<StepDetail>(() => {
-    const [id, code] = [this.openId(), this.openCode()];
-    return id === null || code === null ? undefined : stepUrl(id, code);
+  readonly detail = rxResource({
+    params: () => {
+      const [id, code] = [this.openId(), this.openCode()];
+      return id === null || code === null ? undefined : stepUrl(id, code);
+    },
+    stream: ({ params: url }) => this.copies.read<StepDetail>(url),
   });
-  readonly snags = httpResource<readonly SnagView[]>(() => {
-    const id = this.openId();
-    return id === null || !this.wantsSnags() ? undefined : `/api/sheets/${id}/snags`;
+  readonly snags = rxResource({
+    params: () => (this.wantsSnags() ? (this.openId() ?? undefined) : undefined),
+    stream: ({ params: id }) => this.copies.read<readonly SnagView[]>(`/api/sheets/${id}/snags`),
   });
 
   readonly id = computed(() => this.openId() ?? '');
@@ -66,6 +73,10 @@ export class SheetStore {
       if (!this.isStale() || this.sheet.isLoading() || this.detail.isLoading()) return;
       untracked(() => this.refresh());
     });
+    effect(() => {
+      const [id, isRead] = [this.openId(), this.sheet.hasValue()];
+      if (id !== null && isRead) untracked(() => this.readAhead(id));
+    });
     this.tray.sent.pipe(takeUntilDestroyed()).subscribe((step) => this.take(step));
   }
 
@@ -86,13 +97,29 @@ export class SheetStore {
     if (step.sheetId !== this.openId()) return;
     const isOlder = this.detail.hasValue() && this.detail.value().version > step.version;
     if (step.code === this.openCode() && !isOlder) this.detail.set(step);
+    void this.copies.keep(stepUrl(step.sheetId, step.code), step);
     this.sheet.reload();
     this.snags.reload();
   }
 
   takeSheet(sheet: Sheet): void {
     this.sheet.set(sheet);
+    void this.copies.keep(`/api/sheets/${sheet.id}`, sheet);
     this.detail.reload();
+  }
+
+  /** Once a sheet: copies of the steps that come next, so that they can be opened where there is no network. */
+  private readAhead(id: string): void {
+    if (this.aheadOf === id || !this.sessions.may('entries.record')) return;
+    this.aheadOf = id;
+    const ahead = this.lines().filter(({ status }) => status !== 'done');
+    from(ahead.slice(0, stepsAhead))
+      .pipe(
+        concatMap(({ code }) =>
+          this.copies.read<StepDetail>(stepUrl(id, code)).pipe(catchError(() => EMPTY)),
+        ),
+      )
+      .subscribe();
   }
 
   private hear(news: SheetNews): void {

@@ -4,10 +4,13 @@ import type { NewEntryRequest } from '@second-spanner/shared/contracts/sheets';
 import type { EntryContent, StepDefinition } from '@second-spanner/shared/contracts/steps';
 import type { Judgement } from '@second-spanner/shared/contracts/verdict';
 import { judgeEntry } from '@second-spanner/shared/sheet/judge-entry';
+import { takesEntries } from '@second-spanner/shared/sheet/sheet-states';
 import { slotKeyOf } from '@second-spanner/shared/sheet/slots';
 import { WaitingTray } from '../offline/waiting-tray';
+import { SessionStore } from '../session/session-store';
 import { draft } from './drafts/draft';
 import { entryWords } from './entry-words';
+import { opensByTray } from './open-offline';
 import { failingSlot, filledSlots, nextSlot, slotAfter } from './next-slot';
 import { Saving } from './saving/save-state';
 import { SheetStore } from './sheet-store';
@@ -28,6 +31,7 @@ export class StepWork {
   private readonly store = inject(SheetStore);
   private readonly tray = inject(WaitingTray);
   private readonly tools = inject(ToolsStore);
+  private readonly sessions = inject(SessionStore);
 
   readonly saving = new Saving();
   /** Why an entry is replaced, as typed. */
@@ -69,8 +73,18 @@ export class StepWork {
   /** Whether this person may record here now. */
   readonly isOpen = computed(() => {
     const step = this.step();
-    return step !== null && step.can.record && !step.covered;
+    if (step === null || step.covered) return false;
+    return (
+      step.can.record || (this.takesEntries() && opensByTray(step, this.store.lines(), this.tray.items()))
+    );
   });
+
+  private readonly takesEntries = computed(
+    () =>
+      this.sessions.may('entries.record') &&
+      this.store.sheet.hasValue() &&
+      takesEntries(this.store.sheet.value().state),
+  );
 
   draftKey(part: string): string {
     return `${this.store.id()}/${this.store.code() ?? ''}/${part}`;

@@ -1,4 +1,5 @@
 import { ChangeDetectionStrategy, Component, input } from '@angular/core';
+import type { ApiProblem } from '../../http/api-problem';
 import { Sentence } from '../../quantity/sentence';
 import { Sign } from '../../verdict/sign';
 import { When } from '../../words/dates';
@@ -27,7 +28,7 @@ import type { SaveState } from './save-state';
       @case ('failed') {
         <p class="small line">
           <ss-sign [name]="save.problem.noNetwork ? 'waiting' : 'fail'" />
-          <ss-sentence [text]="'Not kept. ' + save.problem.sentence" />
+          <ss-sentence [text]="failedWords(save.problem)" />
         </p>
       }
     }
@@ -42,4 +43,9 @@ import type { SaveState } from './save-state';
 })
 export class SaveLine {
   readonly of = input.required<SaveState>();
+
+  /** What belongs to a field stands there; here it is only said that nothing was kept. */
+  protected failedWords(problem: ApiProblem): string {
+    return problem.errors.length > 0 ? 'Not kept: see above.' : `Not kept. ${problem.sentence}`;
+  }
 }

@@ -59,6 +59,11 @@ export class Compared {
   );
   protected readonly isCountersigned = computed(() => this.work.countersigned() !== null);
   protected readonly isBlind = computed(() => this.step().secondCheck !== 'inspected');
+  protected readonly foundWords = computed(() => {
+    const { verdict } = this.own().agreement;
+    if (!this.isBlind()) return verdict === 'pass' ? 'seen and right' : 'something is wrong';
+    return verdict === 'pass' ? 'the two readings agree' : 'the two readings do not agree';
+  });
   private readonly current = computed(() => this.step().entries.filter((entry) => entry.current));
   protected readonly firstBy = computed(() =>
     [...new Set(this.current().map(({ by }) => by.name))].join(', '),
@@ -104,6 +109,11 @@ export class Compared {
     const pulls = this.witnessing()?.pulls ?? [];
     return pulls.every(({ fastener }) => this.witnessed().includes(fastener));
   });
+
+  /** The normalised error without its sign, which only says who read more. */
+  protected size(en: number): string {
+    return Math.abs(en).toFixed(2);
+  }
 
   protected witness(fastener: string, isSeen: boolean): void {
     this.witnessed.update((seen) =>

@@ -87,6 +87,7 @@ export class MeasureAgain {
   private readonly memory = computed(() => `second.${this.definition().method}`);
 
   protected type(place: string, text: string): void {
+    this.work.touched();
     this.typed.update((typed) => ({ ...typed, [place]: text }));
   }
 
@@ -96,6 +97,7 @@ export class MeasureAgain {
   }
 
   protected takeTool(toolId: string): void {
+    this.work.touched();
     this.toolId.set(toolId);
     this.register.rememberFor(this.memory(), toolId);
   }

@@ -30,7 +30,7 @@ const isText = (value: unknown): value is string => typeof value === 'string';
         [tools]="wrenches()"
         [chosen]="toolId()"
         [error]="work.errorAt('content.toolId')"
-        (chosenChange)="toolId.set($event)"
+        (chosenChange)="takeTool($event)"
       />
       <ss-reading
         label="It is set to"
@@ -38,7 +38,7 @@ const isText = (value: unknown): value is string => typeof value === 'string';
         [unit]="unit()"
         [text]="typed()"
         [error]="work.errorAt('content.setting')"
-        (textChange)="typed.set($event)"
+        (textChange)="type($event)"
         (unitChange)="takeUnit($event)"
       />
       <ss-foot>
@@ -75,6 +75,16 @@ export class ReadSetting {
     if (quantity === null || this.toolId() === '') return null;
     return { kind: 'setting-and-pull-witnessed' as const, toolId: this.toolId(), setting: quantity };
   });
+
+  protected type(text: string): void {
+    this.work.touched();
+    this.typed.set(text);
+  }
+
+  protected takeTool(toolId: string): void {
+    this.work.touched();
+    this.toolId.set(toolId);
+  }
 
   protected takeUnit(unit: Unit): void {
     this.unit.set(unit);

@@ -3,9 +3,11 @@ import { MatButton } from '@angular/material/button';
 import { RouterLink } from '@angular/router';
 import { secondCheckWords } from '@second-spanner/shared/sheet/words';
 import { Foot } from '../../foot/foot';
+import { Network } from '../../http/network';
 import { Sentence } from '../../quantity/sentence';
 import { SessionStore } from '../../session/session-store';
 import { withCapital } from '../entry-words';
+import { Sign } from '../../verdict/sign';
 import { SayWhy } from '../say-why/say-why';
 import { SheetHead, type HeadCell } from '../sheet/sheet-head';
 import { SheetStore } from '../sheet-store';
@@ -38,6 +40,7 @@ import { SecondWork } from './second-work';
     SayWhy,
     Sentence,
     SheetHead,
+    Sign,
   ],
   providers: [SecondWork],
   changeDetection: ChangeDetectionStrategy.OnPush,
@@ -49,6 +52,8 @@ export class SecondHand {
   protected readonly work = inject(SecondWork);
   private readonly sessions = inject(SessionStore);
   private readonly cannot = viewChild<SayWhy>('cannot');
+
+  protected readonly reachable = inject(Network).reachable;
 
   readonly step = input.required<ShownStep>();
 

@@ -40,6 +40,11 @@ export class SecondWork {
     return `${this.store.id()}/${this.store.code() ?? ''}/second-${part}`;
   }
 
+  /** Something is changed: what was said of it before no longer counts. */
+  touched(): void {
+    this.saving.set({ state: 'none' });
+  }
+
   errorAt(field: string): string | null {
     const standing = this.saving.state();
     return standing.state === 'failed' ? standing.problem.errorAt(field) : null;

@@ -16,7 +16,7 @@ import { stateSentence } from './state-sentence';
       <ul>
         @for (wait of sentences(); track wait.sentence) {
           <li>
-            <ss-sign [name]="wait.what === 'hold' ? 'hold' : 'waiting'" />
+            <ss-sign [name]="wait.what === 'hold' ? 'hold' : wait.what === 'snag' ? 'fail' : 'waiting'" />
             <span>
               <ss-sentence [text]="wait.sentence" />
               @if (wait.code; as code) {

@@ -1,6 +1,7 @@
-import { httpResource } from '@angular/common/http';
 import { computed, inject, Injectable } from '@angular/core';
+import { rxResource } from '@angular/core/rxjs-interop';
 import type { Tool } from '@second-spanner/shared/contracts/registers';
+import { KeptCopies } from '../../offline/kept-copies';
 import { recall, remember } from '../../remembered/remembered';
 import { SessionStore } from '../../session/session-store';
 
@@ -8,10 +9,12 @@ import { SessionStore } from '../../session/session-store';
 @Injectable({ providedIn: 'root' })
 export class ToolsStore {
   private readonly sessions = inject(SessionStore);
+  private readonly copies = inject(KeptCopies);
 
-  readonly tools = httpResource<readonly Tool[]>(() =>
-    this.sessions.may('tools.read') ? '/api/tools' : undefined,
-  );
+  readonly tools = rxResource({
+    params: () => (this.sessions.may('tools.read') ? '/api/tools' : undefined),
+    stream: ({ params: url }) => this.copies.read<readonly Tool[]>(url),
+  });
   readonly all = computed<readonly Tool[]>(() => (this.tools.hasValue() ? this.tools.value() : []));
 
   byId(id: string): Tool | undefined {

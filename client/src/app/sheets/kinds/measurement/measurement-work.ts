@@ -16,9 +16,9 @@ import { readFigure } from '../../../reading/read-figure';
 import { Reading } from '../../../reading/reading';
 import { Sentence } from '../../../quantity/sentence';
 import { SessionStore } from '../../../session/session-store';
-import { VerdictLine } from '../../../verdict/verdict';
 import { Correction } from '../../correction/correction';
 import { draft } from '../../drafts/draft';
+import { Judged } from '../../judged/judged';
 import { SaveLine } from '../../saving/save-line';
 import type { ShownStep } from '../../shown-step';
 import { StepFrame } from '../../step/step-frame';
@@ -38,6 +38,7 @@ import { isReadingDraft, noReading } from './reading-draft';
     Correction,
     DrawingFigure,
     Foot,
+    Judged,
     MatButton,
     Places,
     Reading,
@@ -45,7 +46,6 @@ import { isReadingDraft, noReading } from './reading-draft';
     Sentence,
     StepFrame,
     ToolSelect,
-    VerdictLine,
   ],
   changeDetection: ChangeDetectionStrategy.OnPush,
   templateUrl: './measurement-work.html',

@@ -24,40 +24,54 @@ const conditionWords = {
   'thread-lock': 'with thread-lock',
 } as const;
 
+export interface PullCells {
+  readonly desk: readonly HeadCell[];
+  readonly phone: readonly HeadCell[];
+}
+
 /** The cells in a tightening's head: aim, limits and thread on the desk; pass and wrench on the phone. */
 export function pullCells(
   definition: TighteningStepDefinition | null,
   pull: TighteningStep | null,
   tool: Tool | undefined,
   unit: Unit,
-  isEntering: boolean,
-): { readonly desk: readonly HeadCell[]; readonly phone: readonly HeadCell[] } {
+): PullCells {
   if (definition === null) return { desk: [], phone: [] };
   const { group } = definition;
-  const thread = `${group.thread.value}, ${conditionWords[group.condition.value]}`;
   const passes = lastPass(definition);
-  const torque = pull?.target ?? definition.torque;
+  const isLimited = pull?.low !== undefined || pull?.high !== undefined;
   return {
     desk: [
-      pull?.angle === undefined
-        ? {
-            caption: isEntering ? `Aim, ${group.noun} ${pull?.fastener ?? ''}` : 'Torque',
-            value: printQuantity(convert(torque, unit)),
-          }
-        : { caption: `Aim, ${group.noun} ${pull.fastener}`, value: `${pull.angle}° on` },
-      ...(pull?.low !== undefined || pull?.high !== undefined
-        ? [{ caption: 'From, to', value: limitsInWords(pull, unit) }]
-        : []),
-      { caption: withCapital(`${group.noun}s`), value: thread },
+      aimCell(definition, pull, unit),
+      ...(isLimited ? [{ caption: 'From, to', value: limitsInWords(pull, unit) }] : []),
+      {
+        caption: withCapital(`${group.noun}s`),
+        value: `${group.thread.value}, ${conditionWords[group.condition.value]}`,
+      },
     ],
     phone: [
       ...(pull !== null && passes > 1 ? [{ caption: 'Pass', value: `${pull.pass} of ${passes}` }] : []),
-      tool === undefined
-        ? { caption: 'Wrench', value: 'not chosen' }
-        : {
-            caption: `Wrench ${tool.code}, ${kindWords[tool.kind] ?? ''}`,
-            value: `due ${printDay(tool.calibrationDue)}`,
-          },
+      wrenchCell(tool),
     ],
+  };
+}
+
+function aimCell(
+  { group, torque }: TighteningStepDefinition,
+  pull: TighteningStep | null,
+  unit: Unit,
+): HeadCell {
+  const value = printQuantity(convert(pull?.target ?? torque, unit));
+  if (pull === null) return { caption: 'Torque', value };
+  const caption = `Aim, ${group.noun} ${pull.fastener}`;
+  return { caption, value: pull.angle === undefined ? value : `${pull.angle}° on` };
+}
+
+function wrenchCell(tool: Tool | undefined): HeadCell {
+  if (tool === undefined) return { caption: 'Wrench', value: 'not chosen' };
+  const kind = kindWords[tool.kind];
+  return {
+    caption: `Wrench ${tool.code}${kind === undefined ? '' : `, ${kind}`}`,
+    value: `due ${printDay(tool.calibrationDue)}`,
   };
 }

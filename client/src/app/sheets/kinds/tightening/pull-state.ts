@@ -168,7 +168,7 @@ export class PullState {
   );
 
   private readonly cells = computed(() =>
-    pullCells(this.definition(), this.pull(), this.tool(), this.unit(), this.isEntering()),
+    pullCells(this.definition(), this.pull(), this.tool(), this.unit()),
   );
   readonly deskCells = computed(() => this.cells().desk);
   readonly phoneCells = computed(() => this.cells().phone);

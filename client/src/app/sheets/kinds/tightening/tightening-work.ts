@@ -6,8 +6,8 @@ import { Foot } from '../../../foot/foot';
 import { QuantityText } from '../../../quantity/quantity';
 import { Reading } from '../../../reading/reading';
 import { Sign } from '../../../verdict/sign';
-import { VerdictLine } from '../../../verdict/verdict';
 import { Correction } from '../../correction/correction';
+import { Judged } from '../../judged/judged';
 import { SaveLine } from '../../saving/save-line';
 import type { ShownStep } from '../../shown-step';
 import { StepFrame } from '../../step/step-frame';
@@ -24,6 +24,7 @@ import { PullState } from './pull-state';
     Correction,
     DrawingFigure,
     Foot,
+    Judged,
     MatButton,
     QuantityText,
     Reading,
@@ -31,7 +32,6 @@ import { PullState } from './pull-state';
     Sign,
     StepFrame,
     ToolSelect,
-    VerdictLine,
   ],
   providers: [PullState],
   changeDetection: ChangeDetectionStrategy.OnPush,

@@ -29,7 +29,7 @@ const answers = {
       @if (answer(); as told) {
         <ss-verdict [of]="told.sign" [word]="told.word" [sentence]="told.reason" />
         @if (told.next; as next) {
-          <p class="next"><strong>Next:</strong> <ss-sentence [text]="next" /></p>
+          <p class="next"><strong>Next:</strong>&ngsp;<ss-sentence [text]="next" /></p>
         }
       } @else if (problem(); as sentence) {
         <ss-verdict of="waiting" [sentence]="sentence" />
