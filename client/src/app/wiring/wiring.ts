@@ -14,6 +14,7 @@ import { Wide } from '../sheets/wide';
 import { LoadState } from '../states/load-state';
 import { ProblemLine } from '../states/problem-line';
 import { VerdictLine } from '../verdict/verdict';
+import { printMoment } from '../words/dates';
 import { TradeWords } from '../words/trade-words';
 import { caseText } from './answer/case-text';
 import { EngineFacts } from './answer/engine-facts';
@@ -29,6 +30,7 @@ import { blankForm, isSameEngine, type WiringForm } from './form/wiring-form';
 import { editionName, SpecEngines } from './spec-engines';
 
 const typedIn = '';
+const longestInHead = 16;
 
 /** The wiring map by itself: an engine of the spec book or one typed in, its cap, and what is wrong with its leads. */
 @Component({
@@ -92,9 +94,18 @@ export class WiringPage {
     const { spec, edition } = this.form();
     return this.spec() === typedIn ? 'typed in' : `${spec}, edition ${edition}`;
   });
+  /** Longer orders stand with the engine's facts alone. */
+  protected readonly order = computed(() => {
+    const order = this.answer().cap?.firingOrder.join('-') ?? '';
+    return order.length <= longestInHead ? order : '';
+  });
   protected readonly person = computed(() => this.sessions.person()?.name ?? '');
   protected readonly rotor = computed(() => rotorWords(this.form()));
-  protected readonly today = new Date().toISOString().slice(0, 10);
+  /** When the answer that is shown was worked out: for the paper. */
+  protected readonly workedOut = computed(() => {
+    this.answer();
+    return printMoment(new Date().toISOString());
+  });
 
   private readonly options = computed(() => ({ dialect: this.sessions.dialect() }));
   protected readonly capDrawing = computed(() => {

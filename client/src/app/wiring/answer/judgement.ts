@@ -1,7 +1,9 @@
 import { ChangeDetectionStrategy, Component, computed, input } from '@angular/core';
+import { cureInWords } from '@second-spanner/shared/ignition/cure-in-words';
 import { causeTitles, swapCaption, swapLines } from '../../sheets/kinds/wiring/diagnosis-words';
 import { CautionSign } from '../../sheets/step/caution-sign';
 import { Sentence } from '../../quantity/sentence';
+import { signOf, signWords } from '../../verdict/signs';
 import { VerdictLine } from '../../verdict/verdict';
 import { TradeWords } from '../../words/trade-words';
 import { spoken } from './spoken';
@@ -24,12 +26,18 @@ export class Judgement {
     return {
       verdict: diagnosis.verdict,
       title: causeTitles[diagnosis.cause],
-      reason: spoken(diagnosis.reason),
+      // The swap plate says the cure, step by step.
+      reason: spoken(diagnosis.reason.replace(cureInWords(diagnosis.swaps), '').trim()),
       swapTitle: swapCaption(diagnosis.swaps.length),
       swaps: swapLines(fitted, diagnosis.swaps),
       alsoFits: diagnosis.alsoFits.map((cause) => causeTitles[cause]).join(', '),
       cautions: diagnosis.cautions.map(spoken),
     };
+  });
+  /** Told aloud when it changes: the verdict in short, not the whole of it at every key. */
+  protected readonly aloud = computed(() => {
+    const found = this.found();
+    return found === null ? this.toGo() : `${signWords[signOf(found.verdict)]}: ${found.title}`;
   });
   protected readonly mapReason = computed(() => spoken(this.answer().map?.reason ?? ''));
   protected readonly toGo = computed(() => {

@@ -1,0 +1,34 @@
+import { readFileSync } from 'node:fs';
+import { createRequire } from 'node:module';
+import { expect, type Page } from '@playwright/test';
+import type { AxeResults, RunOptions } from 'axe-core';
+
+declare global {
+  interface Window {
+    axe: { run(options: RunOptions): Promise<AxeResults> };
+  }
+}
+
+const source = readFileSync(createRequire(import.meta.url).resolve('axe-core/axe.min.js'), 'utf8');
+
+const rules: RunOptions = {
+  runOnly: ['wcag2a', 'wcag2aa', 'wcag21a', 'wcag21aa', 'wcag22aa', 'best-practice'],
+  resultTypes: ['violations'],
+};
+
+/** Looks a page over as it stands, in daylight and in lamplight, and expects nothing to be found. */
+export async function expectNoAxeViolations(page: Page): Promise<void> {
+  await page.evaluate(source);
+  const before = await page.evaluate(() => document.body.dataset['light']);
+  for (const light of ['day', 'lamp']) {
+    await page.evaluate((name) => {
+      document.body.dataset['light'] = name;
+    }, light);
+    const { violations } = await page.evaluate((options) => window.axe.run(options), rules);
+    const found = violations.map(({ id, nodes }) => `${id}: ${nodes.map(({ html }) => html).join(' | ')}`);
+    expect(found, `in ${light}light`).toEqual([]);
+  }
+  await page.evaluate((name) => {
+    document.body.dataset['light'] = name;
+  }, before);
+}
