@@ -27,6 +27,7 @@ export default defineConfig(
       ],
       'import-x/parsers': { '@typescript-eslint/parser': ['.ts'] },
       'import-x/extensions': ['.ts', '.js'],
+      'import-x/ignore': ['/dist/', '/node_modules/'],
     },
     rules: language,
   },

@@ -41,7 +41,7 @@ export const language = {
   'max-depth': ['error', 4],
   'max-lines': ['error', { max: 300 }],
   'max-lines-per-function': ['error', { max: 70, skipBlankLines: true, skipComments: true }],
-  'import-x/no-cycle': 'error',
+  'import-x/no-cycle': ['error', { ignoreExternal: true }],
   'import-x/no-self-import': 'error',
   'import-x/no-mutable-exports': 'error',
 };
