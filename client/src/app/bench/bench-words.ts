@@ -18,7 +18,10 @@ const words: Readonly<Record<Exclude<BenchItem['kind'], 'second-check'>, BenchWo
 };
 
 export function benchWords(item: BenchItem): BenchWords {
-  if (item.kind !== 'second-check') return words[item.kind];
+  if (item.kind !== 'second-check') {
+    const isOfSheet = item.kind === 'next-step' && item.stepCode === null;
+    return isOfSheet ? { ...words['next-step'], word: 'Planned', act: 'Open the sheet' } : words[item.kind];
+  }
   return { sign: 'hold', word: 'Hold', act: secondCheckAct(item) };
 }
 
