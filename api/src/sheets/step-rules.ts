@@ -52,6 +52,11 @@ export function whyNotReadAgain(step: StepAtHand, personId: string): WhyNot {
   if (row.recorderIds.includes(personId)) {
     return 'You recorded on this step: the second reading is another person’s.';
   }
+  if (
+    records.snags.some(({ settled }) => settled?.how === 'accepted-as-it-is' && settled.by.id === personId)
+  ) {
+    return 'You accepted a reading of this step as it is: the second reading is another person’s.';
+  }
   if (row.countersigned) return 'This step is countersigned already.';
   if (!mayReadAgain(records.definition, currentOf(step), factsOf(step))) {
     return row.secondCheck === 'setting-and-pull-witnessed'

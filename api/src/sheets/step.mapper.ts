@@ -77,7 +77,9 @@ const toSecondReadings = ({ secondReadings }: StepRecords): StepDetail['secondRe
 
 /** A snag as one person may see it: words that tell a covered figure are kept from them. */
 export function toSnag(step: StepAtHand, snag: SnagRow, person: Person): SnagView {
-  const covered = snag.cause !== 'raised' && coveredFrom(step.row, readersOf(step), person.id);
+  // Who must decide on a failed reading has to see it; whoever accepts it gives no second reading of it.
+  const decides = snag.cause === 'failed' && may(person.role, 'snags.accept');
+  const covered = snag.cause !== 'raised' && !decides && coveredFrom(step.row, readersOf(step), person.id);
   const { id, cause, by, at, settled } = snag;
   return {
     ...{ id, cause, by, at: iso(at), stepCode: step.row.code },
