@@ -36,13 +36,14 @@ export const vitestTally = (exitCode, reportPath) => {
   if (!report) return { passed: 0, failed: 1 };
   /** @type {VitestFile[]} */
   const files = report.testResults;
-  const tests = files.flatMap(({ assertionResults }) => assertionResults);
-  const withStatus = (/** @type {string} */ status) => tests.filter((test) => test.status === status).length;
-  const unread = files.filter((file) => file.status === 'failed' && file.assertionResults.length === 0);
-  return atLeastTheExitCode(exitCode, {
-    passed: withStatus('passed'),
-    failed: withStatus('failed') + unread.length,
+  const count = (/** @type {VitestFile} */ file, /** @type {string} */ status) =>
+    file.assertionResults.filter((test) => test.status === status).length;
+  const tallies = files.map((file) => {
+    const failed = count(file, 'failed');
+    // A file that could not be read, or whose preparation failed, has failed without a failed test in it.
+    return { passed: count(file, 'passed'), failed: file.status === 'failed' ? Math.max(failed, 1) : failed };
   });
+  return atLeastTheExitCode(exitCode, sum(tallies));
 };
 
 /** @param {number} exitCode @param {string} reportPath @returns {Tally} */
