@@ -46,7 +46,7 @@ export class SendItem {
     const { photo, request } = item;
     if (photo === undefined || request.content.kind !== 'photo') return item;
     const form = new FormData();
-    form.append('file', photo, 'photo');
+    form.append('file', new Blob([photo.bytes], { type: photo.type }), 'photo');
     const upload = this.http
       .post<StoredFile>('/api/files', form, { reportProgress: true, observe: 'events' })
       .pipe(

@@ -32,12 +32,6 @@ export class TrayDb {
     await (await this.open()).delete('waiting', seq);
   }
 
-  /** Closed between tests; the page never needs it. */
-  async close(): Promise<void> {
-    (await this.opened)?.close();
-    this.opened = null;
-  }
-
   private open(): Promise<IDBPDatabase<TraySchema>> {
     this.opened ??= openDB<TraySchema>(databaseName, 1, {
       upgrade: (database) => {

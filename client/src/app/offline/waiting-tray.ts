@@ -62,7 +62,8 @@ export class WaitingTray {
   /** Keeps an entry on the device and sends it, behind those that wait already. */
   async keep(what: ToKeep): Promise<Sent> {
     const personId = this.sessions.person()?.id ?? '';
-    const item: NewTrayItem = { ...what, key: newKey(), personId, keptAt: new Date().toISOString() };
+    const photo = what.photo && { bytes: await what.photo.arrayBuffer(), type: what.photo.type };
+    const item: NewTrayItem = { ...what, photo, key: newKey(), personId, keptAt: new Date().toISOString() };
     try {
       await this.db.add(item);
     } catch {

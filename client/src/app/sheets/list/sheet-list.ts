@@ -9,6 +9,7 @@ import { sheetStates, type SheetSummary } from '@second-spanner/shared/contracts
 import { Cell } from '../../layout/cell';
 import { TitleBlock } from '../../layout/title-block';
 import { allPages } from '../../list/all-pages';
+import { arrange, type Columns } from '../../list/arrange';
 import { listAddress } from '../../list/list-address';
 import { EmptyState } from '../../states/empty-state';
 import { LoadState } from '../../states/load-state';
@@ -16,6 +17,16 @@ import { stateNames } from '../../words/names';
 import { SheetTable } from './sheet-table';
 
 const pageSize = 25;
+
+const columns: Columns<SheetSummary> = {
+  code: ({ code }) => code,
+  car: ({ carName }) => carName,
+  state: ({ state }) => sheetStates.indexOf(state),
+  builder: ({ builder }) => builder.name,
+  second: ({ countersigner }) => countersigner.name,
+  done: ({ stepsDone, stepsTotal }) => stepsDone / Math.max(1, stepsTotal),
+  changed: ({ changedAt }) => changedAt,
+};
 
 /** The shop's sheets, those changed last first; by state and by car. */
 @Component({
@@ -49,8 +60,19 @@ export class SheetList {
       ...(this.cursor() === '' ? {} : { cursor: this.cursor() }),
     },
   }));
-  protected readonly rows = computed(() => (this.sheets.hasValue() ? this.sheets.value().items : []));
-  protected readonly next = computed(() => (this.sheets.hasValue() ? this.sheets.value().next : null));
+  private readonly page = computed(() => (this.sheets.hasValue() ? this.sheets.value() : null));
+  protected readonly next = computed(() => this.page()?.next ?? null);
+  /** Only a list that stands whole on the page is sorted here: a part of it would only seem to be. */
+  protected readonly sort = computed(() => {
+    if (this.next() !== null || this.cursor() !== '') return null;
+    return this.address.params().get('sort') ?? '-changed';
+  });
+  protected readonly rows = computed(() => {
+    const [items, sort] = [this.page()?.items ?? [], this.sort()];
+    return sort === null
+      ? items
+      : arrange(items, { search: '', sort, page: 1 }, columns, Math.max(1, items.length)).rows;
+  });
   protected readonly isFiltered = computed(() => this.state() !== '' || this.car() !== '');
 
   protected choose(filter: 'state' | 'car', event: Event): void {

@@ -34,7 +34,7 @@ export class PhotoOnDevice {
   constructor() {
     effect((onCleanup) => {
       const photo = this.photo();
-      const url = photo === null ? null : URL.createObjectURL(photo);
+      const url = photo === null ? null : URL.createObjectURL(new Blob([photo.bytes], { type: photo.type }));
       this.url.set(url);
       onCleanup(() => {
         if (url !== null) URL.revokeObjectURL(url);
