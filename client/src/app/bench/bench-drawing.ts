@@ -31,6 +31,6 @@ export class BenchDrawing {
   /** Tall drawings are kept to the row's height. */
   protected readonly widest = computed(() => {
     const drawing = this.drawing();
-    return drawing === null ? null : Math.min(286, (190 * drawing.width) / drawing.height);
+    return drawing === null ? null : Math.min(286, (210 * drawing.width) / drawing.height);
   });
 }

@@ -59,6 +59,8 @@ export class BenchPage {
     this.bench.hasValue()
       ? this.bench.value().items.map((item) => ({
           ...item,
+          // The rule of a judgement is read on the step's own page.
+          sentence: item.sentence.split(' Rule: ')[0] ?? '',
           words: benchWords(item),
           link: benchLink(item),
           isDrawn: this.isWide && hasDrawing(item),

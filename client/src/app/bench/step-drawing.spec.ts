@@ -27,7 +27,7 @@ function step(definition: StepDefinition, contents: readonly EntryContent[]): St
     replaceReason: null,
     current: true,
   }));
-  return { definition, entries } as unknown as StepDetail;
+  return { definition, entries, covered: contents.length === 0 } as unknown as StepDetail;
 }
 
 const wiring: StepDefinition = {
@@ -81,6 +81,7 @@ describe('a step’s drawing on the bench', () => {
     const words = JSON.stringify(stepDrawing(step(definition, [pull]), 'british')?.table);
     expect(words).toContain('done');
     expect(words).toContain('next');
+    expect(JSON.stringify(stepDrawing(step(definition, []), 'british')?.table)).not.toContain('to come');
   });
 
   it('shows nothing of how leads ought to be before somebody has entered how they are', () => {

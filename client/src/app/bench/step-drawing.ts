@@ -29,20 +29,20 @@ type Content<K extends EntryContent['kind']> = Extract<EntryContent, { kind: K }
 type Recorded<K extends EntryContent['kind']> = EntryView & { readonly content: Content<K> };
 
 /** A step's drawing as it stands, out of what the person may see of it; null for what has no shape. */
-export function stepDrawing({ definition, entries }: StepDetail, dialect: Dialect): Drawing | null {
+export function stepDrawing({ definition, entries, covered }: StepDetail, dialect: Dialect): Drawing | null {
   const options = { dialect };
   const current = entries.filter((entry) => entry.current);
-  return drawn(definition, current, options);
+  return definition.kind === 'tightening'
+    ? tightening(definition, covered ? null : ofKind(current, 'tightening'), options)
+    : drawn(definition, current, options);
 }
 
 function drawn(
-  definition: StepDefinition,
+  definition: Exclude<StepDefinition, TighteningStepDefinition>,
   current: readonly EntryView[],
   options: DrawingOptions,
 ): Drawing | null {
   switch (definition.kind) {
-    case 'tightening':
-      return tightening(definition, ofKind(current, 'tightening'), options);
     case 'measurement':
       return band(definition, ofKind(current, 'measurement'), options);
     case 'wiring':
@@ -62,37 +62,35 @@ function ofKind<K extends EntryContent['kind']>(
   return entries.filter((entry): entry is Recorded<K> => entry.content.kind === kind);
 }
 
-/** The pass that was begun last: what is done of it, and which fastener is next. */
+/** The pass that was begun last: what is done of it, and which is next; the order alone while it is covered. */
 function tightening(
   definition: TighteningStepDefinition,
-  pulls: readonly Recorded<'tightening'>[],
+  pulls: readonly Recorded<'tightening'>[] | null,
   options: DrawingOptions,
 ): Drawing {
   const plan = planOf(definition);
+  const { title, group } = definition;
+  const positions = fastenerPositions(definition.plan.fasteners);
+  const states = pulls === null ? undefined : fastenerStates(plan.sequence, pulls);
+  return drawTightening({ plan, positions, outline: group.outline, numbers: 'name', states, title }, options);
+}
+
+function fastenerStates(
+  sequence: readonly string[],
+  pulls: readonly Recorded<'tightening'>[],
+): Readonly<Record<string, FastenerState>> {
   const pass = Math.max(1, ...pulls.map(({ content }) => content.pass));
   const done = new Set(
     pulls
       .filter(({ content, verdict }) => content.pass === pass && verdict === 'pass')
       .map(({ content }) => content.fastener),
   );
-  const next = plan.sequence.find((fastener) => !done.has(fastener));
-  const states = plan.sequence.map((fastener): [string, FastenerState] => {
+  const next = sequence.find((fastener) => !done.has(fastener));
+  const states = sequence.map((fastener): [string, FastenerState] => {
     if (done.has(fastener)) return [fastener, 'done'];
     return [fastener, fastener === next && done.size > 0 ? 'next' : 'to-come'];
   });
-  const positions = fastenerPositions(definition.plan.fasteners);
-  const { outline } = definition.group;
-  return drawTightening(
-    {
-      plan,
-      positions,
-      outline,
-      numbers: 'name',
-      states: Object.fromEntries(states),
-      title: definition.title,
-    },
-    options,
-  );
+  return Object.fromEntries(states);
 }
 
 /** The last reading on its limits. */
