@@ -1,4 +1,5 @@
 import { randomUUID } from 'node:crypto';
+import type { EntryContent } from '@second-spanner/shared/contracts/steps';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { scenes } from '../testing/sheet-scenes.js';
 import { openStage, recordClearances, type Hands, type SheetStage } from '../testing/sheet-stage.js';
@@ -15,6 +16,27 @@ async function checkClearances(hands: Hands): Promise<void> {
   await hands.imogen.readAgain('1.2', scenes.clearanceAgain(stage.small.tools, 0.045, 0.044)).expect(201);
   await hands.imogen.countersign('1.2').expect(201);
 }
+
+describe('a failed reading that the foreman accepts', () => {
+  it('is shown to the foreman, who then gives no second reading of it, and is read again blind', async () => {
+    const hands = await stage.newSheet();
+    const { tomasz, imogen, nell } = hands;
+    const { tools } = stage.small;
+    await tomasz.record('1.1', scenes.check()).expect(201);
+    await tomasz.record('1.2', scenes.clearance(tools, 'Main 1', 0.09)).expect(201);
+    await tomasz.record('1.2', scenes.clearance(tools, 'Main 2', 0.044)).expect(201);
+    const hidden = await imogen.step('1.2');
+    expect(JSON.stringify(hidden.body)).not.toContain('0.09');
+    const [snag] = (await nell.step('1.2')).body.snags;
+    expect(snag.words).toContain('0.09');
+    await nell.settle(snag.id, { how: 'accepted-as-it-is', reason: 'Within the wear limit.' }).expect(200);
+    const own = await nell.readAgain('1.2', scenes.clearanceAgain(tools, 0.09, 0.044));
+    expect(own.status).toBe(422);
+    const again = await imogen.readAgain('1.2', scenes.clearanceAgain(tools, 0.09, 0.044)).expect(201);
+    expect(again.body.secondReadings[0].agreement.verdict).toBe('pass');
+    await imogen.countersign('1.2').expect(201);
+  });
+});
 
 describe('a second check', () => {
   it('is not given by who recorded', async () => {
@@ -65,10 +87,10 @@ describe('a second check', () => {
     await checkClearances(hands);
     for (const nut of ['1', '2']) await tomasz.record('1.3', scenes.pull(tools, 1, nut, 30)).expect(201);
     await imogen.readAgain('1.3', scenes.settingSeen(tools, 55)).expect(201);
-    const other = {
+    const other: EntryContent = {
       ...{ kind: 'tightening', pass: 2, fastener: '1', toolId: tools['T-10'] },
       reading: { value: 55, unit: 'N·m' },
-    } as const;
+    };
     await tomasz.record('1.3', other).expect(201);
     await tomasz.record('1.3', scenes.pull(tools, 2, '2', 55)).expect(201);
     const refused = await imogen.countersign('1.3', ['1', '2']);
@@ -172,7 +194,7 @@ describe('a disagreement', () => {
     await hands.imogen.readAgain('1.2', scenes.clearanceAgain(tools, 0.05, 0.05)).expect(201);
     expect((await hands.imogen.countersign('1.2').expect(201)).body.status).toBe('done');
     const late = await hands.bea.settle(snag.id, { how: 'redone', reason: 'Again.' });
-    expect([late.status, late.body.detail]).toEqual([409, 'This {snag} was settled by Bea Holm already.']);
+    expect([late.status, late.body.detail]).toEqual([409, 'This snag was settled by Bea Holm already.']);
   });
 
   it('accepted as it is by the foreman lets the second person countersign', async () => {

@@ -78,7 +78,8 @@ const toSecondReadings = ({ secondReadings }: StepRecords): StepDetail['secondRe
 /** A snag as one person may see it: words that tell a covered figure are kept from them. */
 export function toSnag(step: StepAtHand, snag: SnagRow, person: Person): SnagView {
   // Who must decide on a failed reading has to see it; whoever accepts it gives no second reading of it.
-  const decides = snag.cause === 'failed' && may(person.role, 'snags.accept');
+  const undecided = snag.settled === null || snag.settled.how === 'accepted-as-it-is';
+  const decides = snag.cause === 'failed' && undecided && may(person.role, 'snags.accept');
   const covered = snag.cause !== 'raised' && !decides && coveredFrom(step.row, readersOf(step), person.id);
   const { id, cause, by, at, settled } = snag;
   return {

@@ -64,9 +64,8 @@ function requireFineEnough(tool: Tool, value: Quantity, limits: Limits, field: s
 }
 
 function compareAt(step: Case, at: string, value: Quantity, tool: Tool, ownTool: boolean) {
-  const first = step.entries.find(
-    ({ content }) => content.kind === 'measurement' && content.at === at,
-  )?.content;
+  const entry = step.entries.find(({ content }) => content.kind === 'measurement' && content.at === at);
+  const first = entry?.content;
   if (first?.kind !== 'measurement') throw new InputError('content', `${at} has no first reading yet.`);
   if (ownTool && first.toolId === tool.id) {
     throw new InputError(
@@ -81,7 +80,8 @@ function compareAt(step: Case, at: string, value: Quantity, tool: Tool, ownTool:
   });
   const limits = limitDecision({ value, ...step.definition.limits, uncertainty: uncertaintyAt(tool, value) });
   const ofTool = toolJudgement(tool, value, step.on);
-  const within = limits.verdict !== 'fail' && !ofTool;
+  // A first reading that does not pass stands only because the foreman accepted it: then agreement is all.
+  const within = !ofTool && (limits.verdict !== 'fail' || entry?.verdict !== 'pass');
   return {
     label: at,
     first: printQuantity(first.value),

@@ -65,6 +65,20 @@ describe('a clearance measured again', () => {
     expect(compareSecond(check, again(0.27)).verdict).toBe('fail');
   });
 
+  it('asks only for agreement where the foreman accepted the first reading as it is', () => {
+    const accepted = { ...first, value: { value: 0.27, unit: 'mm' } } as const;
+    const entry = {
+      id: 'e',
+      content: accepted,
+      verdict: 'fail',
+      round: 1,
+      replaces: null,
+      by: 'builder',
+    } as const;
+    expect(compareSecond({ ...check, entries: [entry] }, again(0.275)).verdict).toBe('pass');
+    expect(compareSecond({ ...check, entries: [entry] }, again(0.3)).verdict).toBe('fail');
+  });
+
   it('refuses the first tool, a tool too coarse, and a reading left out', () => {
     expect(() => compareSecond(check, again(0.18, 'first'))).toThrow(/not independent/);
     expect(() => compareSecond(check, again(0.18, 'coarse'))).toThrow(/finer/);

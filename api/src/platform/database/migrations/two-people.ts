@@ -62,6 +62,10 @@ const guardSecondReadings = `
     IF NOT EXISTS (SELECT FROM steps WHERE id = NEW.step_id AND round = NEW.round) THEN
       RAISE EXCEPTION 'A second reading belongs to the round at hand.' USING ERRCODE = 'SP002';
     END IF;
+    IF EXISTS (SELECT FROM snag_settlements WHERE step_id = NEW.step_id AND settled_by = NEW.person_id
+        AND how = 'accepted-as-it-is') THEN
+      RAISE EXCEPTION 'Who accepted a reading as it is does not give the second one.' USING ERRCODE = 'SP002';
+    END IF;
     RETURN NEW;
   END $$;
   CREATE TRIGGER c_guard BEFORE INSERT ON second_readings
