@@ -1,5 +1,7 @@
 import { BenchService } from './bench/bench.service.js';
+import type { RenderBuildSheet } from './build-sheets/build-sheet.js';
 import { BuildSheetsService } from './build-sheets/build-sheets.service.js';
+import { renderBuildSheet } from './build-sheets/render.js';
 import { CarsService } from './car-files/cars.service.js';
 import type { Config } from './config.js';
 import { DiskFileStore } from './files/file-store.js';
@@ -36,6 +38,8 @@ export interface Services {
 type ServiceConfig = Pick<Config, 'secret' | 'passwordCost' | 'dataDir' | 'publicUrl'> & {
   /** Where passwords are hashed; by default on the thread at hand. */
   readonly hashing?: Hashing;
+  /** Where build sheets are rendered; by default on the thread at hand. */
+  readonly render?: RenderBuildSheet;
 };
 
 /** What comes from outside, and what stands for it where nothing is given. */
@@ -47,10 +51,11 @@ export interface Outside {
 
 /** All services, each made once and given what it needs. */
 export function createServices(
-  { secret, passwordCost, dataDir, publicUrl, hashing = hashingHere }: ServiceConfig,
+  { secret, passwordCost, dataDir, publicUrl, ...places }: ServiceConfig,
   database: Database,
   { now = () => new Date(), sendMail = () => Promise.resolve(false) }: Outside = {},
 ): Services {
+  const { hashing = hashingHere, render = renderBuildSheet } = places;
   const passwords = new Passwords(passwordCost, hashing);
   const tokens = new AccessTokens(secret);
   const readSession = sessionReader(database);
@@ -64,7 +69,7 @@ export function createServices(
     sessions: new SessionsService(database, passwords, tokens, readSession),
     cars: new CarsService(database, sheets.reading.ofCar),
     ...{ people, specs, tools, sheets },
-    buildSheets: new BuildSheetsService(sheets.reading, tools, publicUrl),
+    buildSheets: new BuildSheetsService(sheets.reading, tools, publicUrl, render),
     bench: new BenchService(database, sheets.reading),
     verification: new VerificationService(database),
     files: new FilesService(database, new DiskFileStore(dataDir), now),

@@ -18,3 +18,6 @@ export interface BuildSheet {
   readonly verificationAddress: string;
   readonly paper: Paper;
 }
+
+/** Makes the PDF of a build sheet, on whichever thread. */
+export type RenderBuildSheet = (build: BuildSheet) => Promise<Uint8Array>;

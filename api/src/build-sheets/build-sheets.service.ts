@@ -2,12 +2,11 @@ import { requireOneOf } from '@second-spanner/shared/quantities/require';
 import type { SignedIn } from '../platform/signing-in/signed-in.js';
 import type { ToolsService } from '../registers/tools.service.js';
 import type { SheetReading } from '../sheets/sheet-reading.service.js';
-import { papers, type Paper } from './build-sheet.js';
-import { renderBuildSheet } from './render.js';
+import { papers, type Paper, type RenderBuildSheet } from './build-sheet.js';
 
 export interface PrintedSheet {
   readonly name: string;
-  readonly pdf: Buffer;
+  readonly pdf: Uint8Array;
 }
 
 /** Prints sheets as the person who asks may see them: what is covered from them is covered on paper. */
@@ -16,13 +15,14 @@ export class BuildSheetsService {
     private readonly sheets: SheetReading,
     private readonly tools: ToolsService,
     private readonly publicUrl: URL,
+    private readonly render: RenderBuildSheet,
   ) {}
 
   /** @throws InputError on `paper`; a problem when there is no such sheet for this person */
   async print(who: SignedIn, id: string, paper: unknown): Promise<PrintedSheet> {
     const size: Paper = paper === undefined ? 'a4' : requireOneOf(paper, papers, 'paper');
     const [{ sheet, steps }, tools] = await Promise.all([this.sheets.details(who, id), this.tools.list(who)]);
-    const pdf = await renderBuildSheet({
+    const pdf = await this.render({
       ...{ sheet, steps, tools, paper: size },
       ...{ shopName: who.shop.name, demo: who.shop.demo, dialect: who.shop.dialect },
       verificationAddress: new URL('/v', this.publicUrl).href,

@@ -12,7 +12,7 @@ import { Wording } from './words.js';
 
 /**
  * The build sheet as a PDF. Two renderings of the same sheet are the same to the byte.
- * Gives way to other requests between the stages.
+ * Gives way between the stages to whatever else this thread has to do.
  */
 export async function renderBuildSheet(build: BuildSheet): Promise<Buffer> {
   const pages = new Pages(build);

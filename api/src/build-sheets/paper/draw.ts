@@ -18,7 +18,7 @@ const ink = (role: ColourRole): string => colours[role].print;
 export function draw(document: Document, drawing: Drawing, x: number, y: number, width: number): void {
   const scale = width / drawing.width;
   document.save();
-  document.translate(x, y).scale(scale);
+  document.translate(x, y).scale(scale).lineJoin('round');
   for (const shape of drawing.shapes) drawShape(document, shape, scale);
   document.restore();
 }
@@ -71,12 +71,11 @@ function paint(document: Document, pen: Pen | undefined, fill: string | undefine
   const style: PenStyle = pens[pen];
   const dash = style.dash;
   document.lineWidth(style.scales ? style.width : (style.width * 0.75) / scale);
-  document.lineJoin('round').lineCap(dash ? 'butt' : 'round');
+  document.lineCap(dash ? 'butt' : 'round');
   if (dash) document.dash(dash[0] ?? 1, { space: dash[1] ?? 1 });
-  else document.undash();
   if (fill) document.fillAndStroke(fill, ink(style.colour));
   else document.stroke(ink(style.colour));
-  document.undash();
+  if (dash) document.undash();
 }
 
 const fontOf: Record<TextShape['face'], Record<TextShape['weight'], FontName>> = {

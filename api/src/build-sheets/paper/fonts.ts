@@ -1,11 +1,33 @@
 import { createRequire } from 'node:module';
 import { readFileSync } from 'node:fs';
+import { create, type Font } from 'fontkit';
 import { unwrapWoff } from './woff.js';
 
-const require = createRequire(import.meta.url);
-const read = (file: string): Buffer => unwrapWoff(readFileSync(require.resolve(file)));
+/** What the Latin subsets can draw: ASCII, Latin 1, dashes, quotation marks, bullet and ellipsis. */
+const drawable: readonly number[] = [
+  ...range(0x20, 0x7e),
+  ...range(0xa0, 0xff),
+  ...[0x2013, 0x2014, 0x2018, 0x2019, 0x201c, 0x201d, 0x2022, 0x2026],
+];
 
-/** The faces on paper. WOFF, for pdfkit takes no WOFF2; Latin subsets, so every text goes through `printable`. */
+function range(first: number, last: number): readonly number[] {
+  return Array.from({ length: last - first + 1 }, (_, index) => first + index);
+}
+
+const require = createRequire(import.meta.url);
+
+/**
+ * Parsed once, for every sheet that is printed. A glyph keeps the character that it was first asked for by, and none
+ * when that was another glyph, as an Á asks for the A: so all are asked for here, or an A could not be found in the
+ * sheets printed after.
+ */
+function read(file: string): Font {
+  const font = create(unwrapWoff(readFileSync(require.resolve(file))));
+  for (const character of drawable) font.glyphForCodePoint(character);
+  return font;
+}
+
+/** The faces on paper. Latin subsets, so every text goes through `printable`. */
 export const fonts = {
   text: read('@fontsource/barlow/files/barlow-latin-400-normal.woff'),
   'text-medium': read('@fontsource/barlow/files/barlow-latin-500-normal.woff'),
@@ -30,11 +52,11 @@ const replacements: Readonly<Record<string, string>> = {
   '☑': 'x',
 };
 
-const hasGlyph = /[\u0020-\u007E\u00A0-\u00FF\u2013\u2014\u2018\u2019\u201C\u201D\u2022\u2026]/;
+const hasGlyph = new Set(drawable.map((code) => String.fromCodePoint(code)));
 
 /** A text with only characters that every face can draw; what is unknown becomes a question mark. */
 export function printable(text: string): string {
   return [...text]
-    .map((character) => (hasGlyph.test(character) ? character : (replacements[character] ?? '?')))
+    .map((character) => (hasGlyph.has(character) ? character : (replacements[character] ?? '?')))
     .join('');
 }

@@ -1,9 +1,9 @@
 import PDFDocument from 'pdfkit';
 import { mark } from '@second-spanner/shared/drawing/mark';
-import { encode } from 'uqr';
 import type { BuildSheet } from '../build-sheet.js';
 import { draw } from './draw.js';
 import { fonts, printable, type FontName } from './fonts.js';
+import { drawCode, runsOf, type Run } from './quick-response.js';
 
 /** Points. More than the 10 mm that must be kept. */
 export const margin = 32;
@@ -25,6 +25,7 @@ export class Pages {
   readonly document: PDFKit.PDFDocument;
   /** Where the next thing stands. */
   y = 0;
+  private code: readonly Run[] | undefined;
 
   constructor(private readonly build: BuildSheet) {
     const { sheet } = build;
@@ -35,8 +36,8 @@ export class Pages {
       autoFirstPage: false,
       lang: 'en',
       displayTitle: true,
-      // Given here, or Helvetica slips in.
-      font: fonts.text as unknown as string,
+      // None, or Helvetica slips in.
+      font: '',
       info: {
         Title: `Build sheet ${sheet.code}, ${sheet.carName}, engine ${sheet.engineCode}`,
         Author: build.shopName,
@@ -46,7 +47,7 @@ export class Pages {
         CreationDate: new Date(sheet.changedAt),
       },
     });
-    for (const [name, data] of Object.entries(fonts)) this.document.registerFont(name, data);
+    for (const [name, font] of Object.entries(fonts)) this.document.registerFont(name, font);
     this.next();
   }
 
@@ -76,16 +77,36 @@ export class Pages {
     const { font = 'text', size = 9, colour = '#000000', width = this.width, align = 'left' } = style;
     const printed = printable(words);
     this.document.font(font).fontSize(size).fillColor(colour);
-    const height = this.document.heightOfString(printed, { width, align });
-    this.document.text(printed, x, y, { width, align });
-    return height;
+    const long = this.lineWidth(printed, width);
+    if (long === undefined) {
+      this.document.text(printed, x, y, { width, align });
+      return this.document.y - y;
+    }
+    const room = { left: 0, center: (width - long) / 2, right: width - long }[align];
+    this.document.text(printed, x + room, y, { lineBreak: false });
+    return this.document.currentLineHeight(true);
+  }
+
+  /** The height that a text takes, broken into lines of a width. */
+  heightOf(words: string, width: number, font: FontName, size: number): number {
+    const printed = printable(words);
+    this.document.font(font).fontSize(size);
+    return this.lineWidth(printed, width) === undefined
+      ? this.document.heightOfString(printed, { width })
+      : this.document.currentLineHeight(true);
+  }
+
+  /** The width of a text that fits on one line, as most do: those need not be broken into lines, which is slow. */
+  private lineWidth(printed: string, width: number): number | undefined {
+    if (printed.includes('\n')) return undefined;
+    const long = this.document.widthOfString(printed);
+    return long <= width ? long : undefined;
   }
 
   /** A text across the page, below what stands; moves down. */
   paragraph(words: string, style: TextStyle = {}): void {
     const { font = 'text', size = 9, width = this.width } = style;
-    this.document.font(font).fontSize(size);
-    this.need(this.document.heightOfString(printable(words), { width }));
+    this.need(this.heightOf(words, width, font, size));
     this.y += this.text(words, this.left, this.y, style) + 3;
   }
 
@@ -150,7 +171,7 @@ export class Pages {
     const x = this.left;
     if (this.isReleased && sheet.verificationCode) {
       const address = `${verificationAddress}/${sheet.verificationCode}`;
-      this.quickResponse(address, x, top + 8, 44);
+      drawCode(this.document, (this.code ??= runsOf(address)), x, top + 8, 44);
       this.text('To check that this is the sheet that was signed', x + 54, top + 9, {
         font: 'plate',
         size: 8,
@@ -176,16 +197,5 @@ export class Pages {
     const rightX = this.left + this.width - 180;
     this.text(note, rightX, top + 20, { ...right, font: 'plate', size: 8, colour: grey });
     this.text(`Page ${page} of ${count}`, rightX, top + 32, { ...right, font: 'text-medium', size: 10.5 });
-  }
-
-  private quickResponse(address: string, x: number, y: number, side: number): void {
-    const { size, data } = encode(address, { border: 0 });
-    const module = side / size;
-    data.forEach((row, r) => {
-      row.forEach((dark, c) => {
-        if (dark) this.document.rect(x + c * module, y + r * module, module, module);
-      });
-    });
-    this.document.fill('#000000');
   }
 }

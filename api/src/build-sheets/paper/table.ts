@@ -1,6 +1,6 @@
 import { drawSign, signWords, type SignKind } from '@second-spanner/shared/drawing/signs';
 import { draw } from './draw.js';
-import { printable, type FontName } from './fonts.js';
+import type { FontName } from './fonts.js';
 import type { Pages } from './page.js';
 
 export interface Column {
@@ -83,13 +83,11 @@ function heightOf(
 ): number {
   const heights = row.cells.map((cell, index) => {
     if (typeof cell !== 'string') return 11;
-    pages.document.font(columns[index]?.font ?? 'text').fontSize(size);
-    return pages.document.heightOfString(printable(cell), { width: (places[index]?.width ?? 0) - pad });
+    return pages.heightOf(cell, (places[index]?.width ?? 0) - pad, columns[index]?.font ?? 'text', size);
   });
   const underWidth = area.x + area.width - (places[1]?.x ?? area.x);
-  pages.document.font('text').fontSize(8);
   const under = (row.under ?? []).reduce(
-    (sum, words) => sum + pages.document.heightOfString(printable(words), { width: underWidth - pad }) + 1,
+    (sum, words) => sum + pages.heightOf(words, underWidth - pad, 'text', 8) + 1,
     0,
   );
   return Math.max(11, ...heights) + under + 6;
