@@ -1,4 +1,4 @@
-import sharp from 'sharp';
+import sharp, { type Sharp } from 'sharp';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { openStage, type SheetStage } from '../testing/sheet-stage.js';
 
@@ -16,7 +16,7 @@ const countFiles = async (): Promise<number> => {
   return (await stage.app.db.sql<{ count: number }>(stage.workshop.shop, statement))[0]?.count ?? -1;
 };
 
-const picture = (width: number, height: number): sharp.Sharp =>
+const picture = (width: number, height: number): Sharp =>
   sharp({ create: { width, height, channels: 3, background: '#335577' } });
 
 describe('photos', () => {

@@ -60,10 +60,12 @@ describe('a ledger', () => {
     fc.assert(
       fc.property(ledgers, fc.nat(), fc.nat(), (lines, a, b) => {
         const [i, j] = [a % lines.length, b % lines.length];
-        if (i < lines.length - 1) expect(ledgerTrouble(lines.toSpliced(i, 1))).not.toBeNull();
-        expect(ledgerTrouble(lines.toSpliced(i, 0, lines[j]!))).not.toBeNull();
+        const [one, other] = [lines[i]!, lines[j]!];
+        const without = lines.filter((line) => line !== one);
+        if (i < lines.length - 1) expect(ledgerTrouble(without)).not.toBeNull();
+        expect(ledgerTrouble([...lines.slice(0, i), other, ...lines.slice(i)])).not.toBeNull();
         fc.pre(i !== j);
-        const swapped = lines.with(i, lines[j]!).with(j, lines[i]!);
+        const swapped = lines.map((line) => (line === one ? other : line === other ? one : line));
         expect(ledgerTrouble(swapped)).not.toBeNull();
       }),
     );

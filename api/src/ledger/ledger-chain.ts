@@ -1,5 +1,5 @@
 import { canonicalJson, sha256 } from '../platform/hashing/canonical.js';
-import type { LedgerBody } from './ledger-event.js';
+import type { LedgerBody, LedgerEvent } from './ledger-event.js';
 
 /** One line of a ledger: its body as canonical JSON, bound to the line before it. */
 export interface LedgerLine {
@@ -17,7 +17,7 @@ export const ledgerStart = '0'.repeat(64);
 /** The line that follows a ledger's last one. */
 export function nextLine(
   last: Pick<LedgerLine, 'seq' | 'hash'> | null,
-  body: Omit<LedgerBody, 'seq'>,
+  body: LedgerEvent & Pick<LedgerBody, 'at' | 'by'>,
 ): LedgerLine {
   const seq = (last?.seq ?? 0) + 1;
   const prevHash = last?.hash ?? ledgerStart;

@@ -56,6 +56,26 @@ export function contentOf(
 export const contentHash = (content: SheetContent, ledgerHead: string): string =>
   canonicalHash({ content, ledgerHead });
 
+/** A sheet's row with the head that was frozen with it. */
+export function withFrozenHead(row: WholeSheetRow, content: SheetContent): WholeSheetRow {
+  const { carName, engineCode, engineNumber, ownerName, specTitle, specEdition, specHash } = content;
+  const { builder, countersigner, stages } = content;
+  return {
+    ...row,
+    ...{ carName, engineCode, engineNumber, ownerName, specTitle, specEdition, specHash },
+    ...{ builder, countersigner, stages },
+  };
+}
+
+/** Steps with the records that were frozen with their sheet. */
+export function withFrozenRecords(steps: readonly StepAtHand[], content: SheetContent): StepAtHand[] {
+  const frozen = new Map(content.steps.map((step) => [step.code, step]));
+  return steps.map((step) => {
+    const records = frozen.get(step.row.code);
+    return records ? { ...step, records: { ...records, calls: [] } } : step;
+  });
+}
+
 function toContentStep({ row, records }: StepAtHand): ContentStep {
   const { code, critical, uncriticalReason, round, entriesFromRound } = row;
   const { definition, entries, secondReadings, countersignatures, snags } = records;

@@ -1,11 +1,12 @@
 import type { Page } from '@second-spanner/shared/contracts/paging';
 import type { Sheet, SheetSummary, SnagView, StepDetail } from '@second-spanner/shared/contracts/sheets';
+import type { Tool } from '@second-spanner/shared/contracts/registers';
 import type { Database, ShopScope } from '../platform/database/database.js';
 import { notFound } from '../platform/errors/http-problem.js';
 import type { SignedIn } from '../platform/signing-in/signed-in.js';
 import { pageOf, type Paging } from '../platform/validation/paging.js';
 import type { ToolsService } from '../registers/tools.service.js';
-import { contentOf, type SheetContent } from './sheet-content.js';
+import { contentOf, withFrozenHead, withFrozenRecords, type SheetContent } from './sheet-content.js';
 import type { WholeSheetRow } from './sheet.entity.js';
 import { toSheet, toSheetSummary } from './sheet.mapper.js';
 import { SheetsRepository, type SheetFilter } from './sheets.repository.js';
@@ -53,21 +54,26 @@ export class SheetReading {
     });
   }
 
-  /** A sheet with every step of it, as one person may see them. */
-  async details(who: SignedIn, id: string): Promise<{ sheet: Sheet; steps: StepDetail[] }> {
+  /**
+   * A sheet with all its steps and the tools they were read with, for paper. A released one comes as it was frozen,
+   * whatever became of people, cars and tools since.
+   */
+  async details(who: SignedIn, id: string): Promise<SheetDetails> {
     return this.database.readShop(who.shop.id, async (scope) => {
-      const row = await findSheet(who, scope, id);
-      const steps = await allSteps(scope, row);
-      const sheet = toSheet(
-        row,
-        steps.map((step) => step.row),
-        who.person,
-      );
+      const found = await findSheet(who, scope, id);
+      const content = found.state === 'released' ? await sheetsFor(who, scope).frozenContent(id) : null;
+      const row = content ? withFrozenHead(found, content) : found;
+      const read = await allSteps(scope, row);
+      const steps = content ? withFrozenRecords(read, content) : read;
+      const { person } = who;
       return {
-        sheet,
-        steps: steps.map((step) =>
-          toStepDetail({ sheetId: id, version: row.version, step, person: who.person }),
+        sheet: toSheet(
+          row,
+          steps.map((step) => step.row),
+          person,
         ),
+        steps: steps.map((step) => toStepDetail({ sheetId: id, version: row.version, step, person })),
+        tools: content?.tools ?? (await this.tools.listIn(scope)),
       };
     });
   }
@@ -90,6 +96,13 @@ export class SheetReading {
         .sort((a, b) => a.at.localeCompare(b.at));
     });
   }
+}
+
+/** A sheet with all its steps, as one person may see them. */
+export interface SheetDetails {
+  readonly sheet: Sheet;
+  readonly steps: readonly StepDetail[];
+  readonly tools: readonly Tool[];
 }
 
 /** A sheet with its steps, and its content as it would be signed. */

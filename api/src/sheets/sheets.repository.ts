@@ -1,6 +1,7 @@
 import type { SheetState } from '@second-spanner/shared/contracts/sheets';
 import type { ShopScope } from '../platform/database/database.js';
 import type { Paging } from '../platform/validation/paging.js';
+import type { SheetContent } from './sheet-content.js';
 import { SheetEntity, type LockedSheetRow, type SheetRow, type WholeSheetRow } from './sheet.entity.js';
 
 const name = (alias: string): string =>
@@ -71,6 +72,16 @@ export class SheetsRepository {
       [this.scope.shopId, this.ownerId, id],
     );
     return rows[0] ?? null;
+  }
+
+  /** What a released sheet was frozen with; null for any other. */
+  async frozenContent(id: string): Promise<SheetContent | null> {
+    const rows: { content: SheetContent | null }[] = await this.scope.manager.query(
+      `SELECT s.frozen -> 'content' AS content FROM sheets s JOIN cars c ON c.id = s.car_id
+       WHERE ${visible} AND s.id = $3`,
+      [this.scope.shopId, this.ownerId, id],
+    );
+    return rows[0]?.content ?? null;
   }
 
   /** Only the version, for somebody who has the sheet already. */

@@ -1,3 +1,4 @@
+import type { Verification } from '@second-spanner/shared/contracts/sheets';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { scenes } from '../testing/sheet-scenes.js';
 import { openStage, workAll, type Hands, type SheetStage } from '../testing/sheet-stage.js';
@@ -54,13 +55,9 @@ describe('the whole job, by three people', () => {
     const { verificationCode } = (await sheet.nell.sheet()).body;
     const typed = verificationCode.toLowerCase().replace('-', ' ');
     const answer = await fetch(`${stage.app.address}/api/verifications/${encodeURIComponent(typed)}`);
-    const body = await answer.json();
+    const body = (await answer.json()) as Verification;
     expect(body).toMatchObject({ verdict: 'pass', verificationCode, carName: 'Aldwyn Tern LM-C01' });
-    expect(body.signatures.map((each: { name: string }) => each.name)).toEqual([
-      'Tomasz Brandt',
-      'Imogen Vale',
-      'Nell Okafor',
-    ]);
+    expect(body.signatures.map(({ name }) => name)).toEqual(['Tomasz Brandt', 'Imogen Vale', 'Nell Okafor']);
     expect((await fetch(`${stage.app.address}/api/verifications/0000-0000`)).status).toBe(404);
   });
 

@@ -1,5 +1,7 @@
-import type { ErrorRequestHandler, RequestHandler } from 'express';
+import type { ErrorRequestHandler, Request, RequestHandler } from 'express';
 import type { Logger } from 'pino';
+import type { Problem } from '@second-spanner/shared/contracts/problem';
+import { tradeText } from '@second-spanner/shared/contracts/trade-words';
 import { notFound } from './http-problem.js';
 import { toProblem } from './to-problem.js';
 
@@ -21,5 +23,18 @@ export const errorHandler =
     response
       .status(problem.status)
       .type('application/problem+json')
-      .send(JSON.stringify(problem.toProblem()));
+      .send(JSON.stringify(inWordsOf(request, problem.toProblem())));
   };
+
+/** The problem's sentences in the trade words of the person who asks. */
+function inWordsOf({ signedIn }: Request, problem: Problem): Problem {
+  const dialect = signedIn?.person.dialect ?? signedIn?.shop.dialect ?? 'british';
+  const { detail, errors } = problem;
+  return {
+    ...problem,
+    ...(detail !== undefined && { detail: tradeText(detail, dialect) }),
+    ...(errors && {
+      errors: errors.map(({ field, message }) => ({ field, message: tradeText(message, dialect) })),
+    }),
+  };
+}
