@@ -69,7 +69,7 @@ export function createServices(
     sessions: new SessionsService(database, passwords, tokens, readSession),
     cars: new CarsService(database, sheets.reading.ofCar),
     ...{ people, specs, tools, sheets },
-    buildSheets: new BuildSheetsService(sheets.reading, tools, publicUrl, render),
+    buildSheets: new BuildSheetsService(sheets.reading, publicUrl, render),
     bench: new BenchService(database, sheets.reading),
     verification: new VerificationService(database),
     files: new FilesService(database, new DiskFileStore(dataDir), now),

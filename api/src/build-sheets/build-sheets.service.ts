@@ -1,6 +1,5 @@
 import { requireOneOf } from '@second-spanner/shared/quantities/require';
 import type { SignedIn } from '../platform/signing-in/signed-in.js';
-import type { ToolsService } from '../registers/tools.service.js';
 import type { SheetReading } from '../sheets/sheet-reading.service.js';
 import { papers, type Paper, type RenderBuildSheet } from './build-sheet.js';
 
@@ -13,7 +12,6 @@ export interface PrintedSheet {
 export class BuildSheetsService {
   constructor(
     private readonly sheets: SheetReading,
-    private readonly tools: ToolsService,
     private readonly publicUrl: URL,
     private readonly render: RenderBuildSheet,
   ) {}
@@ -21,12 +19,13 @@ export class BuildSheetsService {
   /** @throws InputError on `paper`; a problem when there is no such sheet for this person */
   async print(who: SignedIn, id: string, paper: unknown): Promise<PrintedSheet> {
     const size: Paper = paper === undefined ? 'a4' : requireOneOf(paper, papers, 'paper');
-    const [{ sheet, steps }, tools] = await Promise.all([this.sheets.details(who, id), this.tools.list(who)]);
+    const details = await this.sheets.details(who, id);
     const pdf = await this.render({
-      ...{ sheet, steps, tools, paper: size },
+      ...details,
+      paper: size,
       ...{ shopName: who.shop.name, demo: who.shop.demo, dialect: who.shop.dialect },
       verificationAddress: new URL('/v', this.publicUrl).href,
     });
-    return { name: `build-sheet-${sheet.code}.pdf`, pdf };
+    return { name: `build-sheet-${details.sheet.code}.pdf`, pdf };
   }
 }
