@@ -2,11 +2,14 @@ import { ChangeDetectionStrategy, Component, computed, inject, input, linkedSign
 import { MatButton } from '@angular/material/button';
 import type { Unit } from '@second-spanner/shared/contracts/quantity';
 import type { MeasurementStep } from '@second-spanner/shared/contracts/steps';
+import { DrawingFigure } from '../../drawing/drawing';
 import { Foot } from '../../foot/foot';
 import { Sentence } from '../../quantity/sentence';
 import { readFigure } from '../../reading/read-figure';
 import { Reading } from '../../reading/reading';
+import { SessionStore } from '../../session/session-store';
 import { draft } from '../drafts/draft';
+import { placeDrawing } from '../kinds/measurement/place-drawing';
 import { SaveLine } from '../saving/save-line';
 import { ToolSelect } from '../tools/tool-select';
 import { toolsForReading } from '../tools/tools-for';
@@ -20,9 +23,12 @@ const nothing: TextByPlace = {};
 /** Measured again with one's own tool, or the strip read again: each place, without the first figure in sight. */
 @Component({
   selector: 'ss-measure-again',
-  imports: [Foot, MatButton, Reading, SaveLine, Sentence, ToolSelect],
+  imports: [DrawingFigure, Foot, MatButton, Reading, SaveLine, Sentence, ToolSelect],
   changeDetection: ChangeDetectionStrategy.OnPush,
   template: `
+    @if (where(); as drawing) {
+      <ss-drawing [of]="drawing" [bare]="true" [widest]="480" />
+    }
     <form (submit)="keep($event)">
       <p class="small quiet">From, to <ss-sentence [text]="limits()" /></p>
       <ss-tool-select
@@ -62,6 +68,7 @@ const nothing: TextByPlace = {};
 export class MeasureAgain {
   protected readonly work = inject(SecondWork);
   private readonly register = inject(ToolsStore);
+  private readonly sessions = inject(SessionStore);
 
   readonly definition = input.required<MeasurementStep>();
   readonly isStrip = input.required<boolean>();
@@ -74,6 +81,9 @@ export class MeasureAgain {
     const { unit, method } = this.definition();
     return toolsForReading(this.register.all(), unit, method);
   });
+  protected readonly where = computed(() =>
+    placeDrawing(this.definition(), null, { dialect: this.sessions.dialect() }),
+  );
   protected readonly limits = computed(() => limitsInWords(this.definition().limits, this.unit()));
   protected readonly content = computed(() => {
     const readings = this.definition().at.flatMap((at) => {

@@ -15,9 +15,11 @@ import { StageList } from './stage-list';
   template: `
     <ng-template ssFrameAside>
       <div class="aside">
-        <nav aria-label="Stages and steps"><ss-stage-list /></nav>
+        <nav aria-label="Stages and steps">
+          <ss-stage-list />
+          <p class="small key"><ss-sign name="hold" />hold point: a second person countersigns</p>
+        </nav>
         <nav class="links" aria-label="This sheet"><ss-sheet-links /></nav>
-        <p class="small key"><ss-sign name="hold" />hold point: a second person countersigns</p>
       </div>
     </ng-template>
     <router-outlet />

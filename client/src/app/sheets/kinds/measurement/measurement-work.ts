@@ -28,6 +28,7 @@ import { toolsForReading } from '../../tools/tools-for';
 import { ToolsStore } from '../../tools/tools-store';
 import { chosenUnit, limitsInWords, rememberUnit, unitsLike } from '../../units/chosen-unit';
 import { bandIn } from './band';
+import { placeDrawing } from './place-drawing';
 import { Places } from './places';
 import { isReadingDraft, noReading } from './reading-draft';
 
@@ -104,6 +105,12 @@ export class MeasurementWork {
           ]
         : [];
     return bandIn(this.definition().limits, this.unit(), readings, { dialect: this.sessions.dialect() });
+  });
+  protected readonly where = computed(() => {
+    if (this.step().covered) return null;
+    const content = this.content();
+    const reading = content?.kind === 'measurement' && this.judged()?.error === null ? content.value : null;
+    return placeDrawing(this.definition(), reading, { dialect: this.sessions.dialect() });
   });
   protected readonly cells = computed(() => [{ caption: 'From, to', value: this.limits() }]);
   protected readonly keepWords = computed(() => {
