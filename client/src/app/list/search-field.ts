@@ -13,6 +13,7 @@ import { ChangeDetectionStrategy, Component, input, output } from '@angular/core
   styles: `
     label {
       display: block;
+      margin-bottom: var(--ss-3);
     }
 
     .caption {
