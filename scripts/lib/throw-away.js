@@ -12,8 +12,10 @@ import { canReach } from './reach.js';
 
 const prefix = 'second-spanner-test-';
 
+/** As a database that is kept runs: what it has acknowledged is on the disk. */
+export const careful = { max_connections: '200' };
 // The tests can be run again; a crash may cost them their data, never a wait for the disk.
-const careless = { fsync: 'off', synchronous_commit: 'off', full_page_writes: 'off', max_connections: '200' };
+const careless = { ...careful, fsync: 'off', synchronous_commit: 'off', full_page_writes: 'off' };
 
 /** @param {number} pid */
 const isAlive = (pid) => {
@@ -43,8 +45,11 @@ const sweep = async (parent) => {
   }
 };
 
-/** Starts a throw-away cluster. Where it lies, and the address of its superuser's database. */
-export const startThrowAway = async () => {
+/**
+ * Starts a throw-away cluster. Where it lies, its log, and the address of its superuser's database.
+ * @param {Record<string, string>} [settings]
+ */
+export const startThrowAway = async (settings = careless) => {
   const account = serverAccount('');
   const parent = [tmpdir(), '/tmp', '/var/tmp'].find((place) => canReach(place, account)) ?? tmpdir();
   await sweep(parent);
@@ -55,6 +60,6 @@ export const startThrowAway = async () => {
   await makeCluster(cluster, { lasting: false });
   const port = await freePort();
   onClose(() => stopCluster(cluster));
-  await startCluster(cluster, port, careless);
-  return { folder, url: ownerUrl(cluster, port, 'postgres') };
+  await startCluster(cluster, port, settings);
+  return { folder, log: cluster.log, url: ownerUrl(cluster, port, 'postgres') };
 };

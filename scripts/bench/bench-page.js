@@ -1,0 +1,95 @@
+// @ts-check
+// The bench of a shop with very many sheets: how long it takes, and whether PostgreSQL finds it the same way as with a tenth.
+import { say } from '../lib/say.js';
+import { addSheets } from './blank-sheets.js';
+import { ms } from './figures.js';
+import { plansOf } from './heard.js';
+import { run } from './load.js';
+import { asLoader } from './sheets.js';
+import { get, signIn } from './sign-in.js';
+import { notMeasured } from './table.js';
+
+/** @typedef {import('./stage.js').Stage} Stage */
+/** @typedef {import('./table.js').Row} Row */
+
+const allSheets = 2000;
+const steps = 400;
+const readers = 4;
+const prefix = 'L-';
+
+/** One sheet in forty is on the stand, one each signed by one, by two, and planned; the rest is released. */
+const state = `CASE n % 40 WHEN 0 THEN 'on-the-stand' WHEN 1 THEN 'countersigning' WHEN 2 THEN 'signed-off'
+  WHEN 3 THEN 'planned' ELSE 'released' END`;
+
+/** Two and a half entries a step; on the stand some steps wait for a second person, and one for the foreman. */
+const records = [
+  `INSERT INTO entries (id, shop_id, sheet_id, step_id, round, content, verdict, reason, recorded_by, idempotency_key, body_hash)
+   SELECT gen_random_uuid(), s.shop_id, s.sheet_id, s.id, 1,
+     jsonb_build_object('kind', 'measurement', 'at', 'Place ' || n, 'value', '{"value": 0.045, "unit": "mm"}'::jsonb),
+     'pass', 'Well inside.', h.builder_id, gen_random_uuid(), repeat('0', 64)
+   FROM sheets h JOIN steps s ON s.sheet_id = h.id, LATERAL generate_series(1, 2 + s.position % 2) n
+   WHERE h.id = ANY ($1)`,
+  `UPDATE steps s SET done = of_total, verdict = 'pass', recorder_ids = ARRAY[h.builder_id]
+   FROM sheets h WHERE h.id = s.sheet_id AND h.id = ANY ($1)`,
+  `UPDATE steps s SET critical = true, second_check = 'measured-again', awaiting = 'second-check',
+     awaiting_since = h.changed_at
+   FROM sheets h WHERE h.id = s.sheet_id AND h.id = ANY ($1) AND h.state = 'on-the-stand' AND s.position % 50 = 0`,
+  `UPDATE steps s SET verdict = 'fail', open_snags = 1, awaiting = 'snag', awaiting_since = h.changed_at
+   FROM sheets h WHERE h.id = s.sheet_id AND h.id = ANY ($1) AND h.state = 'on-the-stand' AND s.position = 120`,
+  `INSERT INTO snags (id, shop_id, sheet_id, step_id, round, cause, words, raised_by)
+   SELECT gen_random_uuid(), s.shop_id, s.sheet_id, s.id, 1, 'failed', 'Too tight.', h.builder_id
+   FROM steps s JOIN sheets h ON h.id = s.sheet_id WHERE h.id = ANY ($1) AND s.awaiting = 'snag'`,
+];
+
+/** Fills the shop up, a hundred sheets at a time. @param {Stage} stage @param {number} from @param {number} to */
+const fill = async (stage, from, to) => {
+  await asLoader(stage.database, async (client) => {
+    for (let first = from; first <= to; first += 100) {
+      const last = Math.min(to, first + 99);
+      const sheets = await addSheets(client, { prefix, from: first, to: last, steps, places: 3, state });
+      for (const text of records) await client.query(text, [sheets]);
+      say(`  ${last} sheets, ${last * steps} steps, ${last * steps * 2.5} entries`);
+    }
+    await client.query('VACUUM ANALYZE sheets, steps, entries, snags');
+  });
+};
+
+/** @param {import('./heard.js').Plan[]} some @param {import('./heard.js').Plan[]} all @returns {string[]} what differs */
+const differences = (some, all) => {
+  if (some.length !== all.length) return [`${some.length} queries became ${all.length}`];
+  return all
+    .filter(({ shape }, index) => JSON.stringify(shape) !== JSON.stringify(some[index]?.shape))
+    .map(({ text }) => text.replace(/\s+/g, ' ').trim());
+};
+
+/** @param {Stage} stage @returns {Promise<Row[]>} */
+export const measureBenchPage = async (stage) => {
+  const most = stage.full ? allSheets : allSheets / 10;
+  const url = `${stage.address}/api/bench`;
+  const headers = await signIn(stage.address, 'nell');
+  const plans = () => (stage.explains ? plansOf(stage, () => get(url, headers)) : undefined);
+  say('Filling the shop …');
+  await fill(stage, 1, most / 10);
+  const some = await plans();
+  await fill(stage, most / 10 + 1, most);
+  const again = await signIn(stage.address, 'nell');
+  const all = await plans();
+  await run({ url, headers: again, connections: readers, seconds: 2 });
+  const found = await run({ url, headers: again, connections: readers, seconds: stage.seconds });
+  const other = some && all && differences(some, all);
+  for (const text of other ?? []) say(`  Found another way than in a tenth: ${text}`);
+  return [
+    {
+      what: `bench page, ${most} sheets, ${most * steps} steps, ${most * steps * 2.5} entries, ${readers} readers`,
+      goal: 'p95 ≤ 60 ms',
+      measured: ms(found.p95),
+      met: found.p95 <= 60,
+    },
+    {
+      what: `bench page, plans of ${all?.length ?? 0} queries`,
+      goal: 'the same as with a tenth',
+      measured: other ? (other.length === 0 ? 'the same' : `${other.length} differ`) : notMeasured,
+      ...(other && { met: other.length === 0 }),
+    },
+  ];
+};
