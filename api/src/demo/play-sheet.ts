@@ -1,3 +1,4 @@
+import type { StepDetail } from '@second-spanner/shared/contracts/sheets';
 import { HttpProblem } from '../platform/errors/http-problem.js';
 import type { SheetServices } from '../sheets/sheet-services.js';
 import { workingTime, type DemoClock } from './demo-clock.js';
@@ -17,34 +18,34 @@ export async function playSheet({ sheet, play, clock, today }: SheetToPlay): Pro
   const { services, sheetId, builder } = play;
   if (sheet.state === 'planned' || sheet.upTo === null) return;
   await services.start.start(builder, sheetId);
-  const { stages } = await services.reading.sheet(builder, sheetId);
-  const codes = stages.flatMap(({ steps }) => steps.map(({ code }) => code));
-  const count = codes.indexOf(sheet.upTo.step) + 1;
-  if (count === 0) throw new Error(`${sheet.code} has no step ${sheet.upTo.step}.`);
-  for (const [index, code] of codes.slice(0, count).entries()) {
-    if (sheet.notDone?.includes(code)) continue;
+  const { steps } = await services.reading.details(builder, sheetId);
+  const last = sheet.upTo.step;
+  const count = steps.findIndex(({ code }) => code === last) + 1;
+  if (count === 0) throw new Error(`${sheet.code} has no step ${last}.`);
+  for (const [index, step] of steps.slice(0, count).entries()) {
+    if (sheet.notDone?.includes(step.code)) continue;
     const share = (index + 1) / count;
     clock.moveTo(workingTime(today, sheet.begunDaysAgo, sheet.lastWorkedDaysAgo, share));
-    await playOne(play, sheet, code);
+    await playOne(play, sheet, step);
   }
   await signUpTo(services, sheet, play);
 }
 
-async function playOne(play: Play, sheet: DemoSheet, code: string): Promise<void> {
-  const { services, sheetId, builder, person } = play;
+async function playOne(play: Play, sheet: DemoSheet, step: StepDetail): Promise<void> {
+  const { services, sheetId, person } = play;
+  const { code } = step;
   const events = sheet.events.filter((event) => event.step === code);
   const uncritical = events.find((event) => event.what === 'uncritical');
   if (uncritical) {
     const { by, reason } = uncritical;
     await services.unmarking.unmark(person(by), sheetId, code, { reason });
   }
-  const step = await services.reading.step(builder, sheetId, code);
   const lastPull = sheet.upTo?.step === code ? sheet.upTo.pull : undefined;
   const isOpen = sheet.notCountersigned?.includes(code) ?? false;
   const left = events.some(({ what }) => what === 'left-open');
   const how: PlayedStep = {
     ...{ events, lastPull, readings: sheet.readings.find((each) => each.step === code) },
-    isChecked: step.critical && !isOpen && !left && lastPull === undefined,
+    isChecked: step.critical && !uncritical && !isOpen && !left && lastPull === undefined,
   };
   try {
     await playStep(play, step, how);

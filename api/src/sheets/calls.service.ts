@@ -1,5 +1,6 @@
 import { randomUUID } from 'node:crypto';
 import { may } from '@second-spanner/shared/contracts/permissions';
+import type { CallAnswer } from '@second-spanner/shared/contracts/sheets';
 import { callMail } from '../mail/call-mail.js';
 import type { Mail, SendMail } from '../mail/mailer.js';
 import { conflict, refusedByRules } from '../platform/errors/http-problem.js';
@@ -21,10 +22,10 @@ export class CallsService {
     private readonly publicUrl: URL,
   ) {}
 
-  /** Whether the mail went off. The call is kept first, and stands whatever becomes of the mail. */
-  async call(who: SignedIn, sheetId: string, code: string): Promise<boolean> {
+  /** The call is kept first, and stands whatever becomes of the mail. */
+  async call(who: SignedIn, sheetId: string, code: string): Promise<CallAnswer> {
     let mail: Mail | null = null;
-    await this.work.onStep(who, sheetId, code, async (open, step) => {
+    const { detail } = await this.work.onStep(who, sheetId, code, async (open, step) => {
       const { scope, sheet, by, at } = open;
       const why = whyNotCall(step);
       if (why !== null) throw refusedByRules(why);
@@ -40,9 +41,11 @@ export class CallsService {
         ...{ stepCode: code, stepTitle: step.row.title },
       });
       const { id, name, role } = to;
-      return { events: [{ kind: 'called', step: code, to: { id, name, role } }] };
+      const call = { to: { id, name, role }, at: at.toISOString() };
+      const records = { ...step.records, calls: [...step.records.calls, call] };
+      return { events: [{ kind: 'called', step: code, to: call.to }], step: { ...step, records } };
     });
-    return mail !== null && this.send(mail);
+    return { ...detail, mailed: mail !== null && (await this.send(mail)) };
   }
 }
 

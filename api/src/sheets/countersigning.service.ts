@@ -8,7 +8,7 @@ import { isReplay, onceFor } from './once.service.js';
 import type { CountersignatureRow } from './record.entity.js';
 import { RecordsRepository, type Once } from './records.repository.js';
 import { partiesOf, type SecondReadingsService } from './second-readings.service.js';
-import type { Done, OpenSheet, SheetWork } from './sheet-work.service.js';
+import type { Done, OpenSheet, SheetWork, StepAnswer } from './sheet-work.service.js';
 import { raiseSnag } from './snag-deeds.service.js';
 import { hasOpenDisagreement, type StepAtHand } from './step-at-hand.js';
 import { whyNotAgree, whyNotCountersign, whySheetClosed } from './step-rules.js';
@@ -20,14 +20,13 @@ export class CountersigningService {
     private readonly readings: SecondReadingsService,
   ) {}
 
-  /** Whether the countersignature is new; false when it was sent before under the same key. */
   async countersign(
     who: SignedIn,
     sheetId: string,
     code: string,
     request: NewCountersignatureRequest,
     key: string,
-  ): Promise<boolean> {
+  ): Promise<StepAnswer> {
     const once = onceFor(key, { personId: who.person.id, sheetId, code, body: request });
     return this.work.onStep(who, sheetId, code, async (open, step) => {
       const sentBefore = await new RecordsRepository(open.scope).sentUnder('countersignatures', key);

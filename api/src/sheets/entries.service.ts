@@ -15,7 +15,7 @@ import { isReplay, onceFor } from './once.service.js';
 import { PhotosRepository } from './photos.repository.js';
 import type { EntryRow } from './record.entity.js';
 import { RecordsRepository, type Once } from './records.repository.js';
-import type { Now, OpenSheet, SheetWork } from './sheet-work.service.js';
+import type { Now, OpenSheet, SheetWork, StepAnswer } from './sheet-work.service.js';
 import { raiseForFailure, settleByCorrection, type After } from './snag-deeds.service.js';
 import type { StepAtHand } from './step-at-hand.js';
 import { whyNotRecord } from './step-rules.js';
@@ -28,14 +28,13 @@ export class EntriesService {
     private readonly now: Now,
   ) {}
 
-  /** Whether the entry is new; false when it was sent before under the same key. */
   async record(
     who: SignedIn,
     sheetId: string,
     code: string,
     request: NewEntryRequest,
     key: string,
-  ): Promise<boolean> {
+  ): Promise<StepAnswer> {
     const once = onceFor(key, { personId: who.person.id, sheetId, code, body: request });
     return this.work.onStep(who, sheetId, code, async (open, step) => {
       const sentBefore = await new RecordsRepository(open.scope).sentUnder('entries', key);

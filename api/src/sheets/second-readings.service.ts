@@ -10,7 +10,7 @@ import { fromContent } from './from-content.js';
 import { isReplay, onceFor } from './once.service.js';
 import type { SecondReadingRow } from './record.entity.js';
 import { RecordsRepository, type Once } from './records.repository.js';
-import type { Done, OpenSheet, SheetWork } from './sheet-work.service.js';
+import type { Done, OpenSheet, SheetWork, StepAnswer } from './sheet-work.service.js';
 import { raiseSnag, type After } from './snag-deeds.service.js';
 import { currentOf, hasOpenDisagreement, readersOf, type StepAtHand } from './step-at-hand.js';
 import { whyNotReadAgain } from './step-rules.js';
@@ -22,14 +22,13 @@ export class SecondReadingsService {
     private readonly tools: ToolsService,
   ) {}
 
-  /** Whether the reading is new; false when it was sent before under the same key. */
   async keep(
     who: SignedIn,
     sheetId: string,
     code: string,
     request: NewSecondReadingRequest,
     key: string,
-  ): Promise<boolean> {
+  ): Promise<StepAnswer> {
     const once = onceFor(key, { personId: who.person.id, sheetId, code, body: request });
     return this.work.onStep(who, sheetId, code, async (open, step) => {
       const sentBefore = await new RecordsRepository(open.scope).sentUnder('second_readings', key);

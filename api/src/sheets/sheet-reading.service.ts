@@ -122,11 +122,9 @@ export async function findSheet(who: SignedIn, scope: ShopScope, id: string): Pr
 }
 
 async function findStep(scope: ShopScope, sheet: WholeSheetRow, code: string): Promise<StepAtHand> {
-  const repository = new StepsRepository(scope);
-  const steps = await repository.list(sheet.id);
-  const found = await repository.withRecords(sheet.id, code);
+  const found = await new StepsRepository(scope).atHand(sheet.id, code);
   if (!found) throw notFound('step');
-  return { ...onSheet(sheet, steps), row: found, records: found };
+  return { ...onSheet(sheet, found.steps), ...found };
 }
 
 /** Every step of a sheet with its records. */

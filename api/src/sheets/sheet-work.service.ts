@@ -1,4 +1,5 @@
 import type { PersonName } from '@second-spanner/shared/contracts/people';
+import type { StepDetail } from '@second-spanner/shared/contracts/sheets';
 import { isDone, nextStep } from '@second-spanner/shared/sheet/gates';
 import { mayReadAgain } from '@second-spanner/shared/sheet/second-check';
 import { appendToLedger } from '../ledger/ledger.service.js';
@@ -11,6 +12,7 @@ import type { LockedSheetRow, SheetEntity } from './sheet.entity.js';
 import { SheetsRepository } from './sheets.repository.js';
 import { currentOf, factsOf, toGateStep, type StepAtHand } from './step-at-hand.js';
 import type { StepRow } from './step.entity.js';
+import { toStepDetail } from './step.mapper.js';
 import { StepsRepository, type StepCounts } from './steps.repository.js';
 
 /** The clock that everything recorded is dated by. */
@@ -32,69 +34,85 @@ export interface Done {
   readonly change?: Partial<SheetEntity>;
 }
 
-/** Opens sheets for deeds. A deed that answers null did nothing, and nobody is told. */
+/** A step after a deed on it, as the person who did it may see it. */
+export interface StepAnswer {
+  /** False when the request was sent before: then nothing was done again. */
+  readonly isNew: boolean;
+  readonly detail: StepDetail;
+}
+
+/** Opens sheets for deeds. A deed on a step that answers null did nothing, and nobody is told. */
 export class SheetWork {
   constructor(
     private readonly database: Database,
     private readonly now: Now,
   ) {}
 
-  /** Whether the deed did something. */
-  async onSheet(
+  async onSheet(who: SignedIn, sheetId: string, deed: (open: OpenSheet) => Promise<Done>): Promise<void> {
+    await this.open(who, sheetId, async (open) => close(open, await deed(open)));
+  }
+
+  /** @param code of the step, or how to find it on the open sheet */
+  async onStep(
+    who: SignedIn,
+    sheetId: string,
+    code: string | ((open: OpenSheet) => Promise<string>),
+    deed: (open: OpenSheet, step: StepAtHand) => Promise<Done | null>,
+  ): Promise<StepAnswer> {
+    return this.open(who, sheetId, async (open) => {
+      const step = await openStep(open, typeof code === 'string' ? code : await code(open));
+      const done = await deed(open, step);
+      const { version } = open.sheet;
+      const after = done === null ? { version, step } : await close(open, done);
+      const detail = { sheetId, person: who.person, version: after.version, step: after.step ?? step };
+      return { isNew: done !== null, detail: toStepDetail(detail) };
+    });
+  }
+
+  private async open<T>(
     { shop, person }: SignedIn,
     sheetId: string,
-    deed: (open: OpenSheet) => Promise<Done | null>,
-  ): Promise<boolean> {
+    work: (open: OpenSheet) => Promise<T>,
+  ): Promise<T> {
     return this.database.withShop(shop.id, async (scope) => {
       const sheet = await new SheetsRepository(scope).lock(sheetId);
       if (!sheet) throw notFound('sheet');
       const by = { id: person.id, name: person.name, role: person.role };
-      const open = { scope, sheet, by, at: this.now() };
-      const done = await deed(open);
-      if (done !== null) await close(open, done);
-      return done !== null;
+      return work({ scope, sheet, by, at: this.now() });
     });
-  }
-
-  async onStep(
-    who: SignedIn,
-    sheetId: string,
-    code: string,
-    deed: (open: OpenSheet, step: StepAtHand) => Promise<Done | null>,
-  ): Promise<boolean> {
-    return this.onSheet(who, sheetId, async (open) => deed(open, await openStep(open, code)));
   }
 }
 
 /** A step of an open sheet with its records. */
-export async function openStep({ scope, sheet }: OpenSheet, code: string): Promise<StepAtHand> {
-  const repository = new StepsRepository(scope);
-  const steps = await repository.list(sheet.id);
-  const found = await repository.withRecords(sheet.id, code);
+async function openStep({ scope, sheet }: OpenSheet, code: string): Promise<StepAtHand> {
+  const found = await new StepsRepository(scope).atHand(sheet.id, code);
   if (!found) throw notFound('step');
   const { state: sheetState, countersigner } = sheet;
-  return { sheetState, secondPerson: countersigner.name, steps, row: found, records: found };
+  return { sheetState, secondPerson: countersigner.name, ...found };
+}
+
+/** A sheet after a deed on it. */
+interface Closed {
+  readonly version: number;
+  readonly step: StepAtHand | undefined;
 }
 
 /** Counts again what the deed changed, appends to the ledger, and lets everybody who looks know. */
-async function close({ scope, sheet, by, at }: OpenSheet, { events, step, change }: Done): Promise<void> {
-  const counted = step && (await closeStep(scope, step, at));
+async function close({ scope, sheet, by, at }: OpenSheet, { events, step, change }: Done): Promise<Closed> {
+  const counted = step && recounted(step, at);
+  if (counted) await new StepsRepository(scope).setCounts(counted.row.id, countsOf(counted.row));
   const version = sheet.version + 1;
   // The ledger first: a sheet that is released takes no more lines.
   const dated = events.map((event) => ({ at, event }));
   await appendToLedger(scope, sheet.id, by, dated);
-  await new SheetsRepository(scope).update(sheet.id, { ...counted, ...change, version, changedAt: at });
+  const sums = counted && sumsOf(counted.steps);
+  await new SheetsRepository(scope).update(sheet.id, { ...sums, ...change, version, changedAt: at });
   notifySheetChanged(scope, sheet.id, version);
+  return { version, step: counted };
 }
 
-async function closeStep(
-  scope: ShopScope,
-  step: StepAtHand,
-  at: Date,
-): Promise<Pick<SheetEntity, 'stepsDone' | 'openSnags' | 'nextStep'>> {
-  const counts = countStep(step, at);
-  await new StepsRepository(scope).setCounts(step.row.id, counts);
-  const steps = step.steps.map((row): StepRow => (row.id === step.row.id ? { ...row, ...counts } : row));
+/** What a sheet counts of its steps. */
+function sumsOf(steps: readonly StepRow[]): Pick<SheetEntity, 'stepsDone' | 'openSnags' | 'nextStep'> {
   const gates = steps.map(toGateStep);
   return {
     stepsDone: gates.filter(isDone).length,
@@ -103,9 +121,24 @@ async function closeStep(
   };
 }
 
-function countStep(step: StepAtHand, at: Date): StepCounts {
+/** A step with everything that is counted of its records counted again. */
+function recounted(step: StepAtHand, at: Date): StepAtHand {
+  const row = { ...step.row, ...countStep(step, at) };
+  return { ...step, row, steps: step.steps.map((each) => (each.id === row.id ? row : each)) };
+}
+
+function countsOf(row: StepRow): StepCounts {
+  const { round, entriesFromRound, done, verdict, recorderIds, countersigned } = row;
+  const { openSnags, awaiting, awaitingSince, critical, uncriticalReason } = row;
+  return {
+    ...{ round, entriesFromRound, done, verdict, recorderIds, countersigned },
+    ...{ openSnags, awaiting, awaitingSince, critical, uncriticalReason },
+  };
+}
+
+function countStep(step: StepAtHand, at: Date): Partial<StepCounts> {
   const { row, records } = step;
-  const { round, entriesFromRound, critical, uncriticalReason } = row;
+  const { critical } = row;
   const facts = factsOf(step);
   const { done, verdict, recorders, countersigned, openSnags } = facts;
   const waitsForSecond =
@@ -113,7 +146,7 @@ function countStep(step: StepAtHand, at: Date): StepCounts {
   const awaiting = openSnags > 0 ? 'snag' : waitsForSecond ? 'second-check' : null;
   const since = awaiting === row.awaiting ? row.awaitingSince : at;
   return {
-    ...{ round, entriesFromRound, critical, uncriticalReason, done, verdict, countersigned, openSnags },
+    ...{ done, verdict, countersigned, openSnags },
     recorderIds: [...recorders],
     awaiting,
     awaitingSince: awaiting === null ? null : since,

@@ -50,8 +50,8 @@ export function sheetRoutes(services: SheetServices): Router {
   router.post('/:id/snags/:snagId/settlements', allow('snags.settle'), async (request, response) => {
     const [who, id] = [signedIn(request), sheetId(request)];
     const snagId = parseId(request.params['snagId'], 'snag');
-    const code = await snags.settle(who, id, snagId, parseBody(SettleSnagDto, request.body));
-    response.json(await reading.step(who, id, code));
+    const { detail } = await snags.settle(who, id, snagId, parseBody(SettleSnagDto, request.body));
+    response.json(detail);
   });
   router.post('/:id/signatures', signedInOnly, passwordLimit(), async (request, response) => {
     const [who, id] = [signedIn(request), sheetId(request)];

@@ -3,7 +3,7 @@ import { may } from '@second-spanner/shared/contracts/permissions';
 import { conflict, forbidden, notFound, refusedByRules } from '../platform/errors/http-problem.js';
 import type { SignedIn } from '../platform/signing-in/signed-in.js';
 import type { SnagRow } from './record.entity.js';
-import { openStep, type SheetWork } from './sheet-work.service.js';
+import type { OpenSheet, SheetWork, StepAnswer } from './sheet-work.service.js';
 import { raiseSnag, settle } from './snag-deeds.service.js';
 import { SnagsRepository } from './snags.repository.js';
 import type { StepAtHand } from './step-at-hand.js';
@@ -13,25 +13,29 @@ import { whyNotSettle, whySheetClosed } from './step-rules.js';
 export class SnagsService {
   constructor(private readonly work: SheetWork) {}
 
-  async raise(who: SignedIn, sheetId: string, code: string, { words }: NewSnagRequest): Promise<void> {
-    await this.work.onStep(who, sheetId, code, async (open, step) => {
+  async raise(who: SignedIn, sheetId: string, code: string, { words }: NewSnagRequest): Promise<StepAnswer> {
+    return this.work.onStep(who, sheetId, code, async (open, step) => {
       const closed = whySheetClosed(step.sheetState);
       if (closed !== null) throw refusedByRules(closed);
       return raiseSnag(open, step, { cause: 'raised', words, parties: [], entryId: null });
     });
   }
 
-  /** Settles a snag and answers the code of its step. */
-  async settle(who: SignedIn, sheetId: string, snagId: string, request: SettleSnagRequest): Promise<string> {
+  async settle(
+    who: SignedIn,
+    sheetId: string,
+    snagId: string,
+    request: SettleSnagRequest,
+  ): Promise<StepAnswer> {
     if (request.how === 'accepted-as-it-is' && !may(who.person.role, 'snags.accept')) {
       throw forbidden('Only a foreman accepts a {snag} as it is.');
     }
-    let stepCode = '';
-    await this.work.onSheet(who, sheetId, async (open) => {
-      const code = await new SnagsRepository(open.scope).stepOf(sheetId, snagId);
+    const stepOf = async ({ scope }: OpenSheet): Promise<string> => {
+      const code = await new SnagsRepository(scope).stepOf(sheetId, snagId);
       if (code === null) throw notFound('snag');
-      stepCode = code;
-      const step = await openStep(open, code);
+      return code;
+    };
+    return this.work.onStep(who, sheetId, stepOf, async (open, step) => {
       const snag = step.records.snags.find(({ id }) => id === snagId);
       if (!snag) throw notFound('snag');
       if (snag.settled) throw conflict(`This {snag} was settled by ${snag.settled.by.name} already.`);
@@ -40,7 +44,6 @@ export class SnagsService {
       const { step: settled, events } = await settle(open, step, snag, request);
       return { events, step: withRounds(settled, snag, request) };
     });
-    return stepCode;
   }
 }
 

@@ -66,10 +66,23 @@ const snags = listOf(
 
 const calls = listOf('calls', { to: by('r.to_id'), at: 'r.called_at' }, 'r.called_at');
 
-const records = `
-  SELECT ${lines}, s.definition, ${entries} AS entries, ${secondReadings} AS "secondReadings",
-    ${countersignatures} AS countersignatures, ${snags} AS snags, ${calls} AS calls
-  FROM steps s WHERE s.shop_id = $1 AND s.sheet_id = $2`;
+const columns = { definition: 's.definition', entries, secondReadings, countersignatures, snags, calls };
+
+const whole = Object.entries(columns)
+  .map(([name, value]) => `${value} AS "${name}"`)
+  .join(', ');
+
+/** Worked out for the one step whose code is the third parameter. */
+const atHand = Object.entries(columns)
+  .map(([name, value]) => `CASE WHEN s.code = $3 THEN ${value} END AS "${name}"`)
+  .join(', ');
+
+/** One step among the steps of its sheet. */
+export interface StepOfSheet {
+  readonly steps: readonly StepRow[];
+  readonly row: StepRow;
+  readonly records: StepRecords;
+}
 
 export type StepCounts = Pick<
   StepEntity,
@@ -97,19 +110,24 @@ export class StepsRepository {
     );
   }
 
-  /** One step with everything that was recorded on it, as of one moment. */
-  async withRecords(sheetId: string, code: string): Promise<(StepRow & StepRecords) | null> {
-    const values = [this.scope.shopId, sheetId, code];
-    const rows: (StepRow & StepRecords)[] = await this.scope.manager.query(
-      `${records} AND s.code = $3`,
-      values,
+  /** All steps of a sheet, and one of them with everything that was recorded on it, as of one moment. */
+  async atHand(sheetId: string, code: string): Promise<StepOfSheet | null> {
+    const steps: (StepRow & Partial<StepRecords>)[] = await this.scope.manager.query(
+      `SELECT ${lines}, ${atHand} FROM steps s
+       WHERE s.shop_id = $1 AND s.sheet_id = $2 ORDER BY s.position`,
+      [this.scope.shopId, sheetId, code],
     );
-    return rows[0] ?? null;
+    const found = steps.find((step): step is StepRow & StepRecords => step.code === code);
+    return found ? { steps, row: found, records: found } : null;
   }
 
   /** Every step of a sheet with its records, in the sheet's order. */
   async allWithRecords(sheetId: string): Promise<(StepRow & StepRecords)[]> {
-    return this.scope.manager.query(`${records} ORDER BY s.position`, [this.scope.shopId, sheetId]);
+    return this.scope.manager.query(
+      `SELECT ${lines}, ${whole} FROM steps s
+       WHERE s.shop_id = $1 AND s.sheet_id = $2 ORDER BY s.position`,
+      [this.scope.shopId, sheetId],
+    );
   }
 
   /** What decides for every critical step from whom its figures are kept. */
