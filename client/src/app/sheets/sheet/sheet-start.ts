@@ -59,6 +59,12 @@ export class SheetStart {
     const code = stepToOpen(sheet.nextStep, sheet.stages);
     return this.store.lines().find((line) => line.code === code) ?? null;
   });
+  /** The desk goes on at once, but for a sheet that is to be put on the stand. */
+  private readonly goesOn = computed(() => {
+    const sheet = this.sheet();
+    return sheet !== null && this.isDesk() && !(sheet.state === 'planned' && this.mayStart());
+  });
+  protected readonly shown = computed(() => (this.goesOn() ? null : this.sheet()));
   protected readonly cells = computed(() => {
     const sheet = this.sheet();
     if (sheet === null) return [];
@@ -73,7 +79,7 @@ export class SheetStart {
     this.store.openStep(null);
     effect(() => {
       const sheet = this.sheet();
-      if (sheet === null || !this.isDesk() || (sheet.state === 'planned' && this.mayStart())) return;
+      if (sheet === null || !this.goesOn()) return;
       const step = this.toOpen();
       const page = step === null ? ['sign-off'] : ['steps', step.code];
       void this.router.navigate(['/sheets', sheet.id, ...page], { replaceUrl: true });
