@@ -1,18 +1,19 @@
-import { ChangeDetectionStrategy, Component, inject, input, signal } from '@angular/core';
-import { FormControl, FormGroup, ReactiveFormsModule, Validators } from '@angular/forms';
+import { ChangeDetectionStrategy, Component, computed, inject, input, signal } from '@angular/core';
 import { MatButton } from '@angular/material/button';
-import { MatError, MatFormField, MatInput, MatLabel } from '@angular/material/input';
 import { Router } from '@angular/router';
-import type { ApiProblem } from '../http/api-problem';
-import { toApiProblem } from '../http/api-problem';
+import { toApiProblem, type ApiProblem } from '../http/api-problem';
 import { Mark } from '../layout/mark';
 import { SessionStore } from '../session/session-store';
 import { ProblemLine } from '../states/problem-line';
+import { ownAddress } from './own-address';
 
-/** Who is at the bench. Afterwards the person is where they wanted to go. */
+/**
+ * Who is at the bench; afterwards the person is where they wanted to go. Plain fields: this is the first
+ * page that is downloaded, and it needs no more.
+ */
 @Component({
   selector: 'ss-sign-in',
-  imports: [Mark, MatButton, MatError, MatFormField, MatInput, MatLabel, ProblemLine, ReactiveFormsModule],
+  imports: [Mark, MatButton, ProblemLine],
   changeDetection: ChangeDetectionStrategy.OnPush,
   templateUrl: './sign-in.html',
   styleUrl: './sign-in.scss',
@@ -24,19 +25,28 @@ export class SignIn {
   /** The address to go to afterwards, from the query. */
   readonly to = input<string>();
 
-  protected readonly problem = signal<ApiProblem | null>(null);
+  protected readonly email = signal('');
+  protected readonly password = signal('');
+  private readonly isTried = signal(false);
   protected readonly isSigningIn = signal(false);
-  protected readonly form = new FormGroup({
-    email: new FormControl('', { nonNullable: true, validators: [Validators.required, Validators.email] }),
-    password: new FormControl('', { nonNullable: true, validators: [Validators.required] }),
-  });
+  protected readonly problem = signal<ApiProblem | null>(null);
 
-  protected signIn(): void {
-    this.form.markAllAsTouched();
-    if (this.form.invalid || this.isSigningIn()) return;
+  protected readonly emailError = computed(() =>
+    this.isTried() && !/^\S+@\S+$/.test(this.email().trim())
+      ? 'Write your e-mail address, such as name@example.com.'
+      : null,
+  );
+  protected readonly passwordError = computed(() =>
+    this.isTried() && this.password() === '' ? 'Write your password.' : null,
+  );
+
+  protected signIn(event: Event): void {
+    event.preventDefault();
+    this.isTried.set(true);
+    if (this.emailError() !== null || this.passwordError() !== null || this.isSigningIn()) return;
     this.problem.set(null);
     this.isSigningIn.set(true);
-    this.sessions.signIn(this.form.getRawValue()).subscribe({
+    this.sessions.signIn({ email: this.email().trim(), password: this.password() }).subscribe({
       next: () => void this.router.navigateByUrl(ownAddress(this.to())),
       error: (error: unknown) => {
         this.isSigningIn.set(false);
@@ -44,9 +54,4 @@ export class SignIn {
       },
     });
   }
-}
-
-/** Only addresses of our own are gone to. */
-function ownAddress(to: string | undefined): string {
-  return to !== undefined && /^\/(?![/\\])/.test(to) ? to : '/';
 }
