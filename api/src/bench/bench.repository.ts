@@ -10,33 +10,33 @@ export interface Seeker {
 const most = 50;
 
 const stepColumns = `
-  st.awaiting, st.awaiting_since AS since, s.id AS "sheetId", s.code AS "sheetCode", c.name AS "carName",
+  st.awaiting, st.awaiting_since AS since, st.sheet_id AS "sheetId", c.name AS "carName",
   st.code AS "stepCode", st.kind AS "stepKind", st.title, st.second_check AS "secondCheck",
   st.critical AND st.second_check <> 'inspected' AND NOT st.countersigned
     AND NOT ($2 = ANY (st.recorder_ids)) AS covered`;
 
-const stepTables = `
-  steps st
-  JOIN sheets s ON s.id = st.sheet_id
-  JOIN cars c ON c.id = s.car_id`;
-
-/** What waits in one shop. Each query goes by an index that holds only what waits. */
+/**
+ * What waits in one shop. Each query goes by an index that holds only what waits, and looks up the rest for the few
+ * rows that are shown: a step waits only while its sheet is on the stand.
+ */
 export class BenchRepository {
   constructor(private readonly scope: ShopScope) {}
 
   /** Open snags that the person may settle: all for a foreman, a builder's on their own sheets. */
   async snags({ personId, isForeman }: Seeker): Promise<AwaitingRow[]> {
     return this.scope.manager.query(
-      `SELECT ${stepColumns}, NULL AS "calledBy",
+      `SELECT ${stepColumns}, s.code AS "sheetCode", NULL AS "calledBy",
          json_build_object('cause', n.cause, 'words', n.words, 'by', p.name) AS snag
-       FROM ${stepTables}
+       FROM steps st
+       JOIN sheets s ON s.id = st.sheet_id
+       JOIN cars c ON c.id = s.car_id
        JOIN LATERAL (
          SELECT n.cause, n.words, n.raised_by FROM snags n
          WHERE n.step_id = st.id AND NOT EXISTS (SELECT FROM snag_settlements t WHERE t.snag_id = n.id)
            AND NOT (n.cause = 'disagreement' AND $2 = ANY (n.parties))
          ORDER BY n.raised_at LIMIT 1) n ON true
        JOIN people p ON p.id = n.raised_by
-       WHERE st.shop_id = $1 AND st.awaiting = 'snag' AND s.state = 'on-the-stand'
+       WHERE st.shop_id = $1 AND st.awaiting = 'snag'
          AND ($3 OR s.builder_id = $2)
        ORDER BY st.awaiting_since LIMIT ${most}`,
       [this.scope.shopId, personId, isForeman],
@@ -46,15 +46,18 @@ export class BenchRepository {
   /** Steps that wait for a second person: a foreman sees all, others theirs and those they were called to. */
   async secondChecks({ personId, isForeman }: Seeker): Promise<AwaitingRow[]> {
     return this.scope.manager.query(
-      `SELECT ${stepColumns}, NULL AS snag, called.by AS "calledBy"
-       FROM ${stepTables}
-       LEFT JOIN LATERAL (
-         SELECT p.name AS by FROM calls k JOIN people p ON p.id = k.called_by
-         WHERE k.step_id = st.id AND k.to_id = $2 ORDER BY k.called_at DESC LIMIT 1) called ON true
-       WHERE st.shop_id = $1 AND st.awaiting = 'second-check' AND s.state = 'on-the-stand'
-         AND NOT ($2 = ANY (st.recorder_ids))
-         AND ($3 OR s.countersigner_id = $2 OR called.by IS NOT NULL)
-       ORDER BY called.by IS NULL, st.awaiting_since LIMIT ${most}`,
+      `SELECT ${stepColumns}, st.sheet_code AS "sheetCode", NULL AS snag,
+         (SELECT p.name FROM calls k JOIN people p ON p.id = k.called_by
+           WHERE k.step_id = st.id AND k.to_id = $2 ORDER BY k.called_at DESC LIMIT 1) AS "calledBy"
+       FROM (
+         SELECT st.*, s.code AS sheet_code, s.car_id
+         FROM steps st JOIN sheets s ON s.id = st.sheet_id
+         WHERE st.shop_id = $1 AND st.awaiting = 'second-check' AND NOT ($2 = ANY (st.recorder_ids))
+           AND ($3 OR s.countersigner_id = $2
+             OR EXISTS (SELECT FROM calls k WHERE k.step_id = st.id AND k.to_id = $2))
+         ORDER BY st.awaiting_since LIMIT ${most}) st
+       JOIN cars c ON c.id = st.car_id
+       ORDER BY st.awaiting_since`,
       [this.scope.shopId, personId, isForeman],
     );
   }
@@ -63,12 +66,15 @@ export class BenchRepository {
   async sheets({ personId, isForeman }: Seeker): Promise<WaitingSheetRow[]> {
     return this.scope.manager.query(
       `SELECT ${sheetColumns}
-       FROM ${sheetTables}
-       WHERE s.shop_id = $1 AND s.state <> 'released' AND (
-         (s.builder_id = $2 AND s.state IN ('planned', 'on-the-stand'))
-         OR (s.countersigner_id = $2 AND s.state = 'countersigning')
-         OR ($3 AND s.state = 'signed-off'))
-       ORDER BY s.changed_at DESC LIMIT ${most}`,
+       FROM (
+         SELECT s.* FROM sheets s
+         WHERE s.shop_id = $1 AND s.state <> 'released' AND (
+           (s.builder_id = $2 AND s.state IN ('planned', 'on-the-stand'))
+           OR (s.countersigner_id = $2 AND s.state = 'countersigning')
+           OR ($3 AND s.state = 'signed-off'))
+         ORDER BY s.changed_at DESC LIMIT ${most}) s
+       ${besideSheet}
+       ORDER BY s.changed_at DESC`,
       [this.scope.shopId, personId, isForeman],
     );
   }
@@ -77,7 +83,8 @@ export class BenchRepository {
   async released(ownerId: string): Promise<WaitingSheetRow[]> {
     return this.scope.manager.query(
       `SELECT ${sheetColumns}
-       FROM ${sheetTables}
+       FROM sheets s
+       ${besideSheet}
        WHERE s.shop_id = $1 AND c.owner_id = $2 AND s.state = 'released'
        ORDER BY s.changed_at DESC LIMIT ${most}`,
       [this.scope.shopId, ownerId],
@@ -90,8 +97,7 @@ const sheetColumns = `
   s.steps_done AS "stepsDone", s.steps_total AS "stepsTotal", s.open_snags AS "openSnags",
   b.name AS "builderName", n.code AS "nextCode", n.title AS "nextTitle", n.kind AS "nextKind"`;
 
-const sheetTables = `
-  sheets s
+const besideSheet = `
   JOIN cars c ON c.id = s.car_id
   JOIN people b ON b.id = s.builder_id
   LEFT JOIN steps n ON n.sheet_id = s.id AND n.code = s.next_step`;

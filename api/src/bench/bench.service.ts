@@ -2,6 +2,7 @@ import type { Bench, BenchItem } from '@second-spanner/shared/contracts/sheets';
 import type { Database } from '../platform/database/database.js';
 import type { SignedIn } from '../platform/signing-in/signed-in.js';
 import type { SheetReading } from '../sheets/sheet-reading.service.js';
+import type { AwaitingRow } from './bench.entity.js';
 import { toSheetItem, toStepItem } from './bench.mapper.js';
 import { BenchRepository } from './bench.repository.js';
 
@@ -32,9 +33,15 @@ export class BenchService {
       const bench = new BenchRepository(scope);
       if (person.role === 'car-owner') return (await bench.released(person.id)).map(toSheetItem);
       const snags = person.role === 'countersigner' ? [] : await bench.snags(seeker);
-      const checks = await bench.secondChecks(seeker);
+      const checks = calledFirst(await bench.secondChecks(seeker));
       const sheets = await bench.sheets(seeker);
       return [...snags.map(toStepItem), ...checks.map(toStepItem), ...sheets.map(toSheetItem)];
     });
   }
 }
+
+/** Those to which the person was called before the others. */
+const calledFirst = (rows: readonly AwaitingRow[]): AwaitingRow[] => [
+  ...rows.filter(({ calledBy }) => calledBy !== null),
+  ...rows.filter(({ calledBy }) => calledBy === null),
+];

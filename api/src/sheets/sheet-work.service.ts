@@ -142,7 +142,7 @@ function countStep(step: StepAtHand, at: Date): Partial<StepCounts> {
   const facts = factsOf(step);
   const { done, verdict, recorders, countersigned, openSnags } = facts;
   const waitsForSecond =
-    critical && !countersigned && mayReadAgain(records.definition, currentOf(step), facts);
+    critical && !countersigned && mayReadAgain(records.definition, currentOf(step), facts, acceptedOf(records));
   const awaiting = openSnags > 0 ? 'snag' : waitsForSecond ? 'second-check' : null;
   const since = awaiting === row.awaiting ? row.awaitingSince : at;
   return {

@@ -23,8 +23,7 @@ const wholeColumns = `
     FROM signatures g JOIN people r ON r.id = g.person_id
     WHERE g.sheet_id = s.id AND g.sign_round = s.sign_round) AS signatures`;
 
-const tables = `
-  sheets s
+const beside = `
   JOIN cars c ON c.id = s.car_id
   JOIN people b ON b.id = s.builder_id
   JOIN people k ON k.id = s.countersigner_id
@@ -48,17 +47,23 @@ export class SheetsRepository {
   async list({ state, carId }: SheetFilter, { after, limit }: Paging): Promise<SheetRow[]> {
     const [changedAt = null, id = null] = after ?? [];
     return this.scope.manager.query(
-      `SELECT ${columns} FROM ${tables}
-       WHERE ${visible} AND ($3::text IS NULL OR s.state = $3) AND ($4::uuid IS NULL OR s.car_id = $4)
-         AND ($5::timestamptz IS NULL OR (s.changed_at, s.id) < ($5, $6::uuid))
-       ORDER BY s.changed_at DESC, s.id DESC LIMIT $7`,
+      `SELECT ${columns}
+       FROM (
+         SELECT s.* FROM sheets s
+         WHERE s.shop_id = $1
+           AND ($2::uuid IS NULL OR s.car_id IN (SELECT id FROM cars WHERE owner_id = $2))
+           AND ($3::text IS NULL OR s.state = $3) AND ($4::uuid IS NULL OR s.car_id = $4)
+           AND ($5::timestamptz IS NULL OR (s.changed_at, s.id) < ($5, $6::uuid))
+         ORDER BY s.changed_at DESC, s.id DESC LIMIT $7) s
+       ${beside}
+       ORDER BY s.changed_at DESC, s.id DESC`,
       [this.scope.shopId, this.ownerId, state, carId, changedAt, id, limit + 1],
     );
   }
 
   async ofCar(carId: string): Promise<SheetRow[]> {
     return this.scope.manager.query(
-      `SELECT ${columns} FROM ${tables} WHERE ${visible} AND s.car_id = $3
+      `SELECT ${columns} FROM sheets s ${beside} WHERE ${visible} AND s.car_id = $3
        ORDER BY s.changed_at DESC, s.id DESC LIMIT 200`,
       [this.scope.shopId, this.ownerId, carId],
     );
@@ -67,7 +72,7 @@ export class SheetsRepository {
   async find(id: string): Promise<WholeSheetRow | null> {
     const rows: WholeSheetRow[] = await this.scope.manager.query(
       `SELECT ${wholeColumns}
-       FROM ${tables} JOIN specs p ON p.id = e.spec_id LEFT JOIN people o ON o.id = c.owner_id
+       FROM sheets s ${beside} JOIN specs p ON p.id = e.spec_id LEFT JOIN people o ON o.id = c.owner_id
        WHERE ${visible} AND s.id = $3`,
       [this.scope.shopId, this.ownerId, id],
     );

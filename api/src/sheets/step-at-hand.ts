@@ -42,10 +42,6 @@ export const currentOf = ({ row, records }: Pick<StepAtHand, 'row' | 'records'>)
 
 /** What is known of the step, worked out from its records. */
 export function factsOf({ row, records }: Pick<StepAtHand, 'row' | 'records'>): StepFacts {
-  const accepted = records.snags
-    .filter(({ settled }) => settled?.how === 'accepted-as-it-is')
-    .map(({ entryId }) => entryId)
-    .filter((id) => id !== null);
   return stepFacts({
     definition: records.definition,
     entries: recordedOf(records),
@@ -54,9 +50,18 @@ export function factsOf({ row, records }: Pick<StepAtHand, 'row' | 'records'>): 
       ({ round, outcome }) => round === row.round && outcome === 'agree',
     ),
     openSnags: openSnagsOf(records).length,
-    accepted: new Set(accepted),
+    accepted: acceptedOf(records),
   });
 }
+
+/** Ids of the entries whose fault the foreman accepted as it is. */
+export const acceptedOf = ({ snags }: StepRecords): ReadonlySet<string> =>
+  new Set(
+    snags
+      .filter(({ settled }) => settled?.how === 'accepted-as-it-is')
+      .map(({ entryId }) => entryId)
+      .filter((id) => id !== null),
+  );
 
 export const openSnagsOf = ({ snags }: StepRecords): readonly SnagRow[] =>
   snags.filter(({ settled }) => settled === null);

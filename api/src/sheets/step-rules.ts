@@ -5,6 +5,7 @@ import { mayReadAgain } from '@second-spanner/shared/sheet/second-check';
 import { takesEntries } from '@second-spanner/shared/sheet/sheet-states';
 import type { SnagRow } from './record.entity.js';
 import {
+  acceptedOf,
   currentOf,
   factsOf,
   hasOpenDisagreement,
@@ -58,7 +59,7 @@ export function whyNotReadAgain(step: StepAtHand, personId: string): WhyNot {
     return 'You accepted a reading of this step as it is: the second reading is another person’s.';
   }
   if (row.countersigned) return 'This step is countersigned already.';
-  if (!mayReadAgain(records.definition, currentOf(step), factsOf(step))) {
+  if (!mayReadAgain(records.definition, currentOf(step), factsOf(step), acceptedOf(records))) {
     return row.secondCheck === 'setting-and-pull-witnessed'
       ? 'The second reading can be given when the passes before the last one are done.'
       : 'The second reading can be given when everything on this step is recorded and good.';
@@ -105,7 +106,7 @@ export function whyNotCall(step: StepAtHand): WhyNot {
   const closed = whySheetClosed(sheetState);
   if (closed !== null) return closed;
   if (!row.critical || row.countersigned) return 'This step waits for no second person.';
-  return mayReadAgain(records.definition, currentOf(step), factsOf(step))
+  return mayReadAgain(records.definition, currentOf(step), factsOf(step), acceptedOf(records))
     ? null
     : 'There is nothing for the second person to check yet.';
 }
