@@ -16,6 +16,9 @@ const demo = JSON.parse(
   readFileSync(new URL('../../test-data/shops/demo.json', import.meta.url), 'utf8'),
 ) as Demo;
 
+/** The password of every person of the demo. */
+export const demoPassword = demo.password;
+
 /** A person of the demo by key, such as `nell`, the first shop's foreman. */
 export function demoPerson(key: string): DemoPerson {
   const person = demo.shops.flatMap(({ people }) => people).find((one) => one.key === key);
@@ -27,7 +30,7 @@ export function demoPerson(key: string): DemoPerson {
 export async function signIn(page: Page, key: string, to = '/'): Promise<void> {
   await page.goto(to);
   await page.getByLabel('E-mail').fill(demoPerson(key).email);
-  await page.getByLabel('Password').fill(demo.password);
+  await page.getByLabel('Password').fill(demoPassword);
   await page.getByRole('button', { name: 'Sign in' }).click();
   await expect(page.getByRole('heading', { name: 'Sign in' })).toHaveCount(0);
 }
