@@ -52,7 +52,7 @@ class Stream {
   readonly end = (): void => {
     this.ended = true;
     for (const clear of this.clearing.splice(0)) clear();
-    this.response.end();
+    if (!this.response.destroyed) this.response.end();
   };
 }
 
