@@ -193,6 +193,11 @@ export interface StepDetail extends StepLine {
   };
 }
 
+/** A step after the second person was called to it. The call counts even where the mail could not be sent. */
+export interface CallAnswer extends StepDetail {
+  readonly mailed: boolean;
+}
+
 export interface NewSheetRequest {
   readonly carId: string;
   readonly specEditionId: string;
