@@ -3,6 +3,7 @@
 import { onClose } from './closing.js';
 import { clusterFolder, keptSecret, rememberedPort, rememberPort } from './data-folder.js';
 import { installPostgres } from './install.js';
+import { runningScript } from './left-over.js';
 import { freePort } from './ports.js';
 import { postgresFor, serverAccount } from './postgres-binaries.js';
 import { makeCluster, ownerUrl, runningAt, startCluster, stopCluster } from './postgres.js';
@@ -44,7 +45,10 @@ export const openDatabase = async (folder, { borrow = false } = {}) => {
   const cluster = clusterOf(folder);
   await makeCluster(cluster, { lasting: true });
   const alreadyAt = runningAt(cluster);
-  if (alreadyAt === undefined || !borrow) onClose(() => stopCluster(cluster));
+  if (alreadyAt === undefined || !borrow) {
+    // Another script may have come to use a server that was only started for this one's short work.
+    onClose(() => (borrow && runningScript(folder) ? undefined : stopCluster(cluster)));
+  }
   const port = alreadyAt ?? (await freePort(rememberedPort(folder)));
   if (alreadyAt === undefined) {
     say('Starting PostgreSQL …');

@@ -2,6 +2,7 @@
 // Processes that a killed run has left behind.
 import { readFileSync } from 'node:fs';
 import { setTimeout as pause } from 'node:timers/promises';
+import { readRunNote } from './data-folder.js';
 import { apiMain } from './places.js';
 
 /** @param {number} pid */
@@ -13,8 +14,12 @@ const commandOf = (pid) => {
   }
 };
 
-/** Whether the process is one of these scripts at work. @param {number} pid */
-export const isScript = (pid) => commandOf(pid).some((part) => /scripts\/(start|dev)\.js$/.test(part));
+/** The script that runs on the data folder now: npm start or npm run dev. @param {string} folder */
+export const runningScript = (folder) => {
+  const note = readRunNote(folder);
+  if (!note) return undefined;
+  return commandOf(note.pid).some((part) => /scripts\/(start|dev)\.js$/.test(part)) ? note : undefined;
+};
 
 /** Ends an api process of this clone that nobody looks after any more. @param {number} pid */
 export const endLeftOver = async (pid) => {

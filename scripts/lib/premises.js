@@ -12,21 +12,21 @@ import {
   writeRunNote,
 } from './data-folder.js';
 import { installPackages, installPostgres } from './install.js';
-import { endLeftOver, isScript } from './left-over.js';
+import { endLeftOver, runningScript } from './left-over.js';
 import { portToServe } from './ports.js';
 import { Trouble, say } from './say.js';
 
 /** Refuses to run twice on one folder; ends what a killed run has left behind. @param {string} folder */
 const takeOver = async (folder) => {
-  const note = readRunNote(folder);
-  if (!note) return;
-  if (isScript(note.pid)) {
+  const other = runningScript(folder);
+  if (other) {
     throw new Trouble(
-      `Second Spanner is running already, at ${note.address} (process ${note.pid}), on the data in ${folder}. ` +
+      `Second Spanner is running already, at ${other.address} (process ${other.pid}), on the data in ${folder}. ` +
         'End that one first, or give this one another PORT and a data folder of its own (SECOND_SPANNER_DATA).',
     );
   }
-  if (note.api !== undefined) await endLeftOver(note.api);
+  const note = readRunNote(folder);
+  if (note?.api !== undefined) await endLeftOver(note.api);
   removeRunNote(folder);
 };
 
