@@ -11,6 +11,7 @@ import { notMeasured } from './table.js';
 
 /** @typedef {import('./stage.js').Stage} Stage */
 /** @typedef {import('./table.js').Row} Row */
+/** @typedef {import('./heard.js').Plan} Plan */
 
 const allSheets = 2000;
 const steps = 400;
@@ -54,12 +55,13 @@ const fill = async (stage, from, to) => {
   });
 };
 
-/** @param {import('./heard.js').Plan[]} some @param {import('./heard.js').Plan[]} all @returns {string[]} what differs */
+/** @param {Plan[]} some @param {Plan[]} all @returns {string[]} the queries that are worked in another way, told */
 const differences = (some, all) => {
-  if (some.length !== all.length) return [`${some.length} queries became ${all.length}`];
-  return all
-    .filter(({ shape }, index) => JSON.stringify(shape) !== JSON.stringify(some[index]?.shape))
-    .map(({ text }) => text.replace(/\s+/g, ' ').trim());
+  if (some.length !== all.length) return [`${some.length} queries became ${all.length}.`];
+  return all.flatMap(({ text, outline }, index) => {
+    const before = some[index]?.outline;
+    return before === outline ? [] : [`${text}\n    a tenth: ${before}\n    all: ${outline}`];
+  });
 };
 
 /** @param {Stage} stage @returns {Promise<Row[]>} */
@@ -77,7 +79,7 @@ export const measureBenchPage = async (stage) => {
   await run({ url, headers: again, connections: readers, seconds: 2 });
   const found = await run({ url, headers: again, connections: readers, seconds: stage.seconds });
   const other = some && all && differences(some, all);
-  for (const text of other ?? []) say(`  Found another way than in a tenth: ${text}`);
+  for (const text of other ?? []) say(`  Worked in another way than with a tenth: ${text}`);
   return [
     {
       what: `bench page, ${most} sheets, ${most * steps} steps, ${most * steps * 2.5} entries, ${readers} readers`,

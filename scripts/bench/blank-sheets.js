@@ -64,11 +64,11 @@ export const addSheets = async (client, { prefix, from, to, steps, places, state
   const ids = added.rows.map(({ id }) => id);
   await client.query(
     `INSERT INTO steps (id, shop_id, sheet_id, position, code, stage, kind, title, hold, critical, rests_on, definition, of_total)
-     SELECT gen_random_uuid(), s.shop_id, s.id, n, code, stage, 'measurement', 'Main clearance', false, false, '{}',
-       $3::jsonb || jsonb_build_object('code', code, 'stage', stage), $4
+     SELECT gen_random_uuid(), s.shop_id, s.id, n, b.code, a.stage, 'measurement', 'Main clearance', false, false, '{}',
+       $3::jsonb || jsonb_build_object('code', b.code, 'stage', a.stage), $4
      FROM sheets s, generate_series(1, $2::int) n,
        LATERAL (SELECT 1 + (n - 1) * 10 / $2::int AS stage) a,
-       LATERAL (SELECT stage || '.' || n AS code) b
+       LATERAL (SELECT a.stage || '.' || n AS code) b
      WHERE s.id = ANY ($1)`,
     [ids, steps, JSON.stringify(definitionOf(places)), places],
   );

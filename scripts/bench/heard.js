@@ -5,7 +5,7 @@ import { setTimeout as pause } from 'node:timers/promises';
 import { withDatabase } from '../lib/sql.js';
 
 /** @typedef {import('./stage.js').Stage} Stage */
-/** @typedef {{ text: string, shape: unknown }} Plan */
+/** @typedef {{ text: string, outline: string }} Plan a query, and how it was worked */
 
 /** @param {Stage} stage @param {string[]} commands */
 const configure = async ({ database }, commands) => {
@@ -54,17 +54,17 @@ export const statementsOf = async (stage, request) =>
 
 /** @typedef {Record<string, unknown> & { Plans?: Node[] }} Node */
 
-const telling = ['Node Type', 'Join Type', 'Relation Name', 'Index Name', 'Parent Relationship'];
-
-/** A plan without its figures: which nodes, on which tables, by which indexes. @param {Node} node @returns {unknown} */
-const shapeOf = (node) => ({
-  ...Object.fromEntries(telling.map((key) => [key, node[key]])),
-  below: (node.Plans ?? []).map(shapeOf),
-});
+/** A plan without its figures: which nodes, on which tables, by which indexes. @param {Node} node @returns {string} */
+const outlineOf = (node) => {
+  const at = node['Index Name'] ?? node['Alias'];
+  const kind = [node['Join Type'], node['Node Type']].filter(Boolean).join(' ');
+  const below = (node.Plans ?? []).map(outlineOf);
+  return `${kind}${at ? ` ${at}` : ''}${below.length > 0 ? ` (${below.join(', ')})` : ''}`;
+};
 
 /** The plans that PostgreSQL worked by for one request, in their order. @param {Stage} stage @param {() => Promise<unknown>} request @returns {Promise<Plan[]>} */
 export const plansOf = async (stage, request) =>
   [...(await logOf(stage, request)).matchAll(/ plan:\n((?:\t.*\n)+)/g)].map(([, block = '']) => {
     const told = JSON.parse(block);
-    return { text: told['Query Text'], shape: shapeOf(told['Plan']) };
+    return { text: told['Query Text'].replace(/\s+/g, ' ').trim(), outline: outlineOf(told['Plan']) };
   });

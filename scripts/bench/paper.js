@@ -9,7 +9,7 @@ import { get, signIn } from './sign-in.js';
 /** @typedef {import('./stage.js').Stage} Stage */
 /** @typedef {import('./table.js').Row} Row */
 
-const steps = 70;
+const steps = 55;
 const sheets = 60;
 
 /** @param {Buffer} pdf */

@@ -15,7 +15,7 @@ const rounds = 3;
 const fewReaders = 4;
 
 /** A V8 with its order and its rotor as many have them. */
-const capMap = { firingOrder: [1, 8, 4, 3, 6, 5, 7, 2], rotation: 'clockwise', outletsAt: 'top' };
+const capMap = { firingOrder: [1, 8, 4, 3, 6, 5, 7, 2], rotation: 'clockwise' };
 
 /**
  * Loads each address in turn and again, the bare Express before each: machines are not as fast at one moment as at another.
