@@ -10,7 +10,7 @@ export const unknownRoute: RequestHandler = () => {
   throw notFound('address');
 };
 
-/** Answers every error as Problem Details; what nobody foresaw goes to the log whole. */
+/** Answers every error as Problem Details; what nobody foresaw goes to the log. */
 export const errorHandler =
   (log: Logger): ErrorRequestHandler =>
   (error: unknown, request, response, next) => {
