@@ -26,6 +26,10 @@ export class BuildSheetsService {
       ...{ shopName: who.shop.name, demo: who.shop.demo, dialect: who.shop.dialect },
       verificationAddress: new URL('/v', this.publicUrl).href,
     });
-    return { name: `build-sheet-${details.sheet.code}.pdf`, pdf };
+    return { name: pdfName(details.sheet.code), pdf };
   }
 }
+
+/** A file name that can stand in a header: a header holds neither quotes nor letters beyond the basic ones. */
+export const pdfName = (sheetCode: string): string =>
+  `build-sheet-${sheetCode.replaceAll(/[^A-Za-z0-9-]/g, '_')}.pdf`;

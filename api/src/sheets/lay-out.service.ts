@@ -18,6 +18,7 @@ import type { Now } from './sheet-work.service.js';
 import { SheetsRepository } from './sheets.repository.js';
 import { toGateStep } from './step-at-hand.js';
 import type { StepEntity } from './step.entity.js';
+import { shopInitials } from './shop-initials.js';
 import { StepsRepository } from './steps.repository.js';
 
 /** What is given for a sheet beside the request. */
@@ -53,7 +54,8 @@ export class LayOutService {
         ...{ stepsDone: 0, stepsTotal: steps.length, openSnags: 0 },
         ...{ nextStep: nextStep(steps.map(toGateStep)), contentHash: null, verificationCode: null },
         code:
-          given.code ?? `${initials(who.shop.name)}-${String(await sheets.nextNumber()).padStart(4, '0')}`,
+          given.code ??
+          `${shopInitials(who.shop.name)}-${String(await sheets.nextNumber()).padStart(4, '0')}`,
       });
       await new StepsRepository(scope).insertAll(steps);
       const by = { id: who.person.id, name: who.person.name, role: who.person.role };
@@ -113,11 +115,3 @@ function toStep(sheetId: string, definition: StepDefinition, position: number): 
     ...{ openSnags: 0, awaiting: null, awaitingSince: null },
   };
 }
-
-/** `Low Mill Motor Works` gives `LM`. */
-const initials = (shop: string): string =>
-  shop
-    .split(/\s+/)
-    .slice(0, 2)
-    .map((word) => word.charAt(0).toUpperCase())
-    .join('');
