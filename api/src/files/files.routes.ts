@@ -1,6 +1,7 @@
 import { Router, type RequestHandler } from 'express';
 import multer, { MulterError } from 'multer';
 import { badInput, HttpProblem } from '../platform/errors/http-problem.js';
+import { uploadLimit } from '../platform/http/rate-limits.js';
 import { allow } from '../platform/signing-in/authentication.js';
 import { signedIn } from '../platform/signing-in/signed-in.js';
 import { parseId } from '../platform/validation/parse-id.js';
@@ -33,7 +34,7 @@ function toTrouble(error: unknown): unknown {
 /** `/files`: photos. */
 export function fileRoutes(files: FilesService): Router {
   const router = Router();
-  router.post('/', allow('files.write'), oneFile, async (request, response) => {
+  router.post('/', allow('files.write'), uploadLimit(), oneFile, async (request, response) => {
     const bytes = request.file?.buffer;
     if (!bytes) throw badInput({ field: 'file', message: 'Send one photo in the field `file`.' });
     response.status(201).json(await files.add(signedIn(request), bytes));

@@ -1,6 +1,7 @@
 import { fileTypeFromBuffer } from 'file-type';
 import sharp from 'sharp';
 import { badInput, HttpProblem } from '../platform/errors/http-problem.js';
+import { AtMost } from '../platform/threads/at-most.js';
 
 /** A photo made anew by us: its pixels, and nothing else that came with it. */
 export interface Photo {
@@ -14,6 +15,8 @@ const known = new Set(['image/jpeg', 'image/png', 'image/webp', 'image/heic', 'i
 /** More pixels than any camera in a workshop gives: what unpacks to more is a bomb. */
 const mostPixels = 60_000_000;
 const longestSide = 2000;
+/** A picture of the most pixels takes some 180 MB while it is unpacked. */
+const unpacking = new AtMost(2);
 
 sharp.cache(false);
 
@@ -27,12 +30,14 @@ export async function makePhoto(upload: Uint8Array): Promise<Photo> {
     throw new HttpProblem('unsupported-type', 'A photo is a JPEG, PNG or WebP file.');
   }
   try {
-    const { data, info } = await sharp(upload, { limitInputPixels: mostPixels, failOn: 'error' })
-      .rotate()
-      .resize({ width: longestSide, height: longestSide, fit: 'inside', withoutEnlargement: true })
-      .flatten({ background: '#ffffff' })
-      .jpeg({ quality: 82, mozjpeg: false })
-      .toBuffer({ resolveWithObject: true });
+    const { data, info } = await unpacking.run(() =>
+      sharp(upload, { limitInputPixels: mostPixels, failOn: 'error' })
+        .rotate()
+        .resize({ width: longestSide, height: longestSide, fit: 'inside', withoutEnlargement: true })
+        .flatten({ background: '#ffffff' })
+        .jpeg({ quality: 82, mozjpeg: false })
+        .toBuffer({ resolveWithObject: true }),
+    );
     return { bytes: data, width: info.width, height: info.height };
   } catch {
     const heic = type.mime === 'image/heic' || type.mime === 'image/heif';

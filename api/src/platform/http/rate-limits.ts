@@ -65,6 +65,15 @@ export const passwordLimit = (): RequestHandler =>
     sentence: 'Too many wrong passwords. Wait a quarter of an hour.',
   });
 
+/** Photos, each of which is unpacked and stored: by account. More than anybody takes at an engine in an hour. */
+export const uploadLimit = (): RequestHandler =>
+  limited({
+    limit: 120,
+    windowMs: 60 * 60_000,
+    key: (request) => accountOf(request) ?? addressOf(request),
+    sentence: 'These are too many photos within an hour. Wait a while.',
+  });
+
 /** What needs no sign-in, such as verifying a code on paper: by address. */
 export const publicLimit = (): RequestHandler =>
   limited({
