@@ -46,6 +46,8 @@ export class StepWork {
   /** A slot that the person chose; otherwise the work goes on in its order. */
   private readonly chosen = signal<string | null>(null);
   private readonly lastKept = signal<string | null>(null);
+  /** Slots whose entry is on its way: a second touch of the button sends nothing. */
+  private readonly sending = new Set<string>();
 
   readonly slots = computed(() => {
     const step = this.step();
@@ -99,6 +101,12 @@ export class StepWork {
     this.choose(slotKeyOf(entry.content));
   }
 
+  /** Something is changed: what was said of it before no longer counts. */
+  touched(): void {
+    this.fieldError.set(null);
+    if (this.saving.problem !== null) this.saving.set({ state: 'none' });
+  }
+
   /** Judges content as it stands, by the same rules that the api has. */
   judge(definition: StepDefinition, content: EntryContent): Judged {
     const on = new Date().toISOString().slice(0, 10);
@@ -116,12 +124,18 @@ export class StepWork {
     return here?.field === field ? here.message : (this.saving.problem?.errorAt(field) ?? null);
   }
 
-  /** Keeps an entry; true when it is kept, at the api or in the tray. */
+  /**
+   * Keeps an entry; true when it is kept, at the api or in the tray. The page moves on to the next slot at once; a
+   * refused entry brings its own slot back to hand.
+   */
   async record(definition: StepDefinition, content: EntryContent, photo?: Blob): Promise<boolean> {
+    const slotKey = slotKeyOf(content);
     const request = this.requestFor(content);
-    if (request === null || this.saving.isUnderWay) return false;
-    this.saving.set({ state: 'saving' });
-    await this.clearTray(slotKeyOf(content));
+    if (request === null || this.sending.has(slotKey)) return false;
+    const reason = this.reason();
+    this.sending.add(slotKey);
+    this.moveOn(slotKey);
+    await this.clearTray(slotKey);
     const sent = await this.tray.keep({
       sheetId: this.store.id(),
       sheetCode: this.store.sheet.hasValue() ? this.store.sheet.value().code : '',
@@ -130,17 +144,24 @@ export class StepWork {
       request,
       photo,
     });
+    this.sending.delete(slotKey);
     if (sent.state === 'refused') {
+      this.chosen.set(slotKey);
+      this.reason.set(reason);
       this.saving.set({ state: 'failed', problem: sent.problem });
       return false;
     }
     if (sent.state === 'kept') this.saving.kept();
     else this.saving.set({ state: 'waiting' });
+    return true;
+  }
+
+  private moveOn(slotKey: string): void {
+    this.saving.set({ state: 'saving' });
     this.fieldError.set(null);
     this.reason.set('');
     this.chosen.set(null);
-    this.lastKept.set(slotKeyOf(content));
-    return true;
+    this.lastKept.set(slotKey);
   }
 
   /** What lies in the tray for a slot was never recorded: it makes room, and replaces nothing. */

@@ -30,7 +30,7 @@ import { chosenUnit, limitsInWords, rememberUnit, unitsLike } from '../../units/
 import { bandIn } from './band';
 import { placeDrawing } from './place-drawing';
 import { Places } from './places';
-import { isReadingDraft, noReading } from './reading-draft';
+import { isReadingDraft, noReading, withReading } from './reading-draft';
 
 /** A measurement: a reading at each place, judged at its limits as it is typed. */
 @Component({
@@ -73,10 +73,7 @@ export class MeasurementWork {
 
   protected readonly isEntering = computed(() => this.work.isOpen() && this.work.slot() !== null);
   protected readonly place = computed(() => this.work.slot()?.label ?? '');
-  protected readonly text = computed(() => {
-    const { slot, text } = this.typed();
-    return slot === this.work.slot()?.key ? text : '';
-  });
+  protected readonly text = computed(() => this.typed()[this.work.slot()?.key ?? ''] ?? '');
   protected readonly limits = computed(() => limitsInWords(this.definition().limits, this.unit()));
   protected readonly content = computed<EntryContent | null>(() => {
     const { quantity } = readFigure(this.text(), this.unit());
@@ -119,8 +116,8 @@ export class MeasurementWork {
   });
 
   protected type(text: string): void {
-    this.work.fieldError.set(null);
-    this.typed.set({ slot: this.work.slot()?.key ?? '', text });
+    this.work.touched();
+    this.typed.update((typed) => withReading(typed, this.work.slot()?.key ?? '', text));
   }
 
   protected takeUnit(unit: Unit): void {
@@ -129,6 +126,7 @@ export class MeasurementWork {
   }
 
   protected takeTool(toolId: string): void {
+    this.work.touched();
     this.toolId.set(toolId);
     this.tools.rememberFor(this.definition().method, toolId);
   }
@@ -139,9 +137,10 @@ export class MeasurementWork {
     const error = this.judged()?.error ?? null;
     this.work.fieldError.set(error);
     if (content === null || error !== null) return;
-    if (!(await this.work.record(this.definition(), content))) return;
-    this.typed.set(noReading);
+    const slot = this.work.slot()?.key ?? '';
+    const kept = this.work.record(this.definition(), content);
     this.field()?.focus();
+    if (await kept) this.typed.update((typed) => withReading(typed, slot, ''));
   }
 
   /** A tool not chosen yet is no error before one wants to keep the reading. */

@@ -1,11 +1,18 @@
-import { hasTexts } from '../../drafts/draft';
+/** Readings as they are being typed, each under its slot: one never slips to another, and none goes with another. */
+export type ReadingDraft = Readonly<Record<string, string>>;
 
-/** A reading as it is being typed: for one place, so that it never slips to another. */
-export interface ReadingDraft {
-  readonly slot: string;
-  readonly text: string;
+export const noReading: ReadingDraft = {};
+
+export function isReadingDraft(value: unknown): value is ReadingDraft {
+  return (
+    typeof value === 'object' &&
+    value !== null &&
+    Object.values(value).every((each) => typeof each === 'string')
+  );
 }
 
-export const noReading: ReadingDraft = { slot: '', text: '' };
-
-export const isReadingDraft = (value: unknown): value is ReadingDraft => hasTexts(value, ['slot', 'text']);
+/** The draft with what is typed for a slot; an empty text takes it out. */
+export function withReading(draft: ReadingDraft, slot: string, text: string): ReadingDraft {
+  const others = Object.entries(draft).filter(([key]) => key !== slot);
+  return Object.fromEntries(text === '' ? others : [...others, [slot, text]]);
+}

@@ -16,6 +16,7 @@ import { ToolsStore } from '../../tools/tools-store';
 import { chosenUnit, rememberUnit, unitsLike } from '../../units/chosen-unit';
 import { bandIn } from '../measurement/band';
 import { readAdapter, type AdapterDraft } from './adapter-fields';
+import { withReading } from '../measurement/reading-draft';
 import { isPullDraft, noPull } from './pull-draft';
 import { pullCells } from './pull-cells';
 import { atFastener, fastenerStates, passShown, pullOf, settingFor, slotsOfPass } from './pull';
@@ -71,9 +72,9 @@ export class PullState {
   readonly adapterError = computed(() => this.found().error?.message ?? null);
 
   readonly text = computed(() => {
-    const { pass, setting, slot, reading } = this.typed();
+    const { pass, setting, readings } = this.typed();
     if (this.isSet()) return pass === String(this.pass()) ? setting : '';
-    return slot === this.work.slot()?.key ? reading : '';
+    return readings[this.work.slot()?.key ?? ''] ?? '';
   });
   readonly fieldLabel = computed(() => {
     if (this.isSet()) return 'The wrench is set to';
@@ -188,11 +189,11 @@ export class PullState {
   }
 
   type(text: string): void {
-    this.work.fieldError.set(null);
+    this.work.touched();
     this.typed.update((typed) =>
       this.isSet()
         ? { ...typed, pass: String(this.pass()), setting: text }
-        : { ...typed, slot: this.work.slot()?.key ?? '', reading: text },
+        : { ...typed, readings: withReading(typed.readings, this.work.slot()?.key ?? '', text) },
     );
   }
 
@@ -206,6 +207,7 @@ export class PullState {
   }
 
   takeTool(toolId: string): void {
+    this.work.touched();
     this.toolId.set(toolId);
     this.tools.rememberFor('tightening', toolId);
   }
@@ -220,8 +222,9 @@ export class PullState {
     const error = this.judged()?.error ?? null;
     this.work.fieldError.set(error);
     if (definition === null || content === null || error !== null) return false;
+    const slot = this.work.slot()?.key ?? '';
     const isKept = await this.work.record(definition, content);
-    if (isKept) this.typed.update((typed) => ({ ...typed, slot: '', reading: '' }));
+    if (isKept) this.typed.update((typed) => ({ ...typed, readings: withReading(typed.readings, slot, '') }));
     return isKept;
   }
 

@@ -56,6 +56,8 @@ export class TighteningWork {
 
   protected async keep(event: Event): Promise<void> {
     event.preventDefault();
-    if (await this.state.keep()) this.field()?.focus();
+    const kept = this.state.keep();
+    this.field()?.focus();
+    await kept;
   }
 }

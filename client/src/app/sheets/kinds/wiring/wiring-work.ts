@@ -63,7 +63,7 @@ export class WiringWork {
   });
 
   protected fit(fitted: FittedDraft): void {
-    this.work.fieldError.set(null);
+    this.work.touched();
     this.fitted.set(fitted);
   }
 
