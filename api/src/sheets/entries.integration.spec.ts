@@ -46,6 +46,17 @@ describe('an entry', () => {
     expect(await countEntries()).toBe(before + 1);
   });
 
+  it('counts on one sheet alone when its key is raced on two', async () => {
+    for (let race = 0; race < 5; race++) {
+      const sheets = [await stage.newSheet(), await stage.newSheet()];
+      const key = randomUUID();
+      const answers = await Promise.all(
+        sheets.map(({ tomasz }) => tomasz.record('1.1', scenes.check(), undefined, key)),
+      );
+      expect(answers.map(({ status }) => status).sort()).toEqual([201, 409]);
+    }
+  });
+
   it('needs a key', async () => {
     const bare = await hands.tomasz.post('steps/1.1/entries', { content: scenes.check() });
     expect([bare.status, bare.body.errors[0].field]).toEqual([400, 'Idempotency-Key']);

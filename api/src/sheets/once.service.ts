@@ -1,4 +1,4 @@
-import { badInput, conflict } from '../platform/errors/http-problem.js';
+import { badInput, keyTaken } from '../platform/errors/http-problem.js';
 import { canonicalHash } from '../platform/hashing/canonical.js';
 import { isId } from '../platform/validation/parse-id.js';
 import type { Once } from './records.repository.js';
@@ -28,6 +28,6 @@ export const onceFor = (key: string, request: OnceRequest): Once => ({
 /** Whether the request was sent before. Throws a 409 problem when its key stood under something else. */
 export function isReplay(sentBefore: string | null, { bodyHash }: Once): boolean {
   if (sentBefore === null) return false;
-  if (sentBefore !== bodyHash) throw conflict('This key was used for another request.');
+  if (sentBefore !== bodyHash) throw keyTaken();
   return true;
 }

@@ -62,5 +62,8 @@ export const forbidden = (detail: string): HttpProblem => new HttpProblem('forbi
 /** Something happened meanwhile; `detail` says what. */
 export const conflict = (detail: string): HttpProblem => new HttpProblem('conflict', detail);
 
+/** An idempotency key came with one request and stands under another. */
+export const keyTaken = (): HttpProblem => conflict('This key was used for another request.');
+
 /** The rules of the sheet refuse it; `detail` says which hold or step. */
 export const refusedByRules = (detail: string): HttpProblem => new HttpProblem('refused-by-rules', detail);
