@@ -51,15 +51,13 @@ async function openStream(cookie: string, id = hands.id): Promise<Stream> {
 }
 
 describe('the events of a sheet', () => {
-  it('tell a write to everybody who looks, within two seconds and without a figure', async () => {
+  it('tell a write to everybody who looks, without a figure', async () => {
     const { cookie } = await signIn('imogen@lowmill.example');
     const stream = await openStream(cookie);
     const now = await stream.next();
     expect(now).toEqual({ sheetId: hands.id, version: 2 });
-    const began = Date.now();
     await hands.tomasz.record('1.1', scenes.check()).expect(201);
     expect(await stream.next()).toEqual({ sheetId: hands.id, version: 3 });
-    expect(Date.now() - began).toBeLessThan(2000);
     await stream.cancel();
   });
 

@@ -57,9 +57,7 @@ describe('capDiagnosis refuses', () => {
     ['half a turn of advance', { cap, fitted, advance: 180 }, 'advance'],
     ['a text for the advance', { cap, fitted, advance: '10' }, 'advance'],
   ])('%s', (_, request, field) => {
-    const started = performance.now();
     const refusal = refusalOf(request);
-    expect(performance.now() - started).toBeLessThan(250);
     expect(refusal.field).toBe(field);
     expect(refusal.message.length).toBeGreaterThan(10);
     expect(refusal.message.length).toBeLessThan(400);

@@ -78,9 +78,7 @@ describe('capMap refuses', () => {
     ],
     ['a trace with a name of a megabyte', { ...four, trace: { [aMegabyte]: 'A' } }, 'trace'],
   ])('%s', (_, request, field) => {
-    const started = performance.now();
     const refusal = refusalOf(request);
-    expect(performance.now() - started).toBeLessThan(250);
     expect(refusal.field).toBe(field);
     expect(refusal.message.length).toBeGreaterThan(10);
     expect(refusal.message.length).toBeLessThan(400);

