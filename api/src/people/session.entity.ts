@@ -1,7 +1,7 @@
 import { Column, Entity, PrimaryColumn } from 'typeorm';
 import type { Session } from '@second-spanner/shared/contracts/people';
 
-export type EndReason = 'signed-out' | 'token-reused' | 'locked-out';
+export type EndReason = 'signed-out' | 'token-reused';
 
 /** One sign-in on one device: a family of renewal tokens, of which only the newest counts. */
 @Entity('sessions')

@@ -9,7 +9,6 @@ export const statusOf = {
   forbidden: 403,
   'not-found': 404,
   conflict: 409,
-  'out-of-date': 412,
   'too-large': 413,
   'unsupported-type': 415,
   'refused-by-rules': 422,

@@ -38,7 +38,7 @@ export class People1764547200001 implements MigrationInterface {
         renewed_at timestamptz NOT NULL DEFAULT now(),
         expires_at timestamptz NOT NULL,
         ended_at timestamptz,
-        end_reason text CHECK (end_reason IN ('signed-out', 'token-reused', 'locked-out')),
+        end_reason text CHECK (end_reason IN ('signed-out', 'token-reused')),
         CHECK ((ended_at IS NULL) = (end_reason IS NULL)),
         FOREIGN KEY (shop_id, person_id) REFERENCES people (shop_id, id)
       );
