@@ -56,7 +56,7 @@ export default defineConfig({
     cwd: '..',
     env: { E2E_PORT: port },
     url: `${baseURL}/api/health`,
-    timeout: 120_000,
+    timeout: 300_000,
     reuseExistingServer: false,
     gracefulShutdown: { signal: 'SIGTERM', timeout: 15_000 },
     stdout: 'pipe',

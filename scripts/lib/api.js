@@ -59,12 +59,12 @@ export const startApi = async (env, { nodeArgs = [], quiet = false, onSpawn } = 
   });
   onSpawn?.(child.pid);
   const address = `http://${env['HOST']}:${env['PORT']}`;
-  const giveUpAt = Date.now() + 120_000;
+  const giveUpAt = Date.now() + 300_000;
   while (!(await answers(address))) {
     if (child.exitCode !== null || child.signalCode !== null) {
       throw new Trouble('The api ended before it was ready; it says why above.');
     }
-    if (Date.now() > giveUpAt) throw new Trouble('The api was not ready within two minutes.');
+    if (Date.now() > giveUpAt) throw new Trouble('The api was not ready within five minutes.');
     await pause(100);
   }
   return { child, address };

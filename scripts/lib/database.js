@@ -7,7 +7,7 @@ import { runningScript } from './left-over.js';
 import { freePort } from './ports.js';
 import { postgresFor, serverAccount } from './postgres-binaries.js';
 import { makeCluster, ownerUrl, runningAt, startCluster, stopCluster } from './postgres.js';
-import { say } from './say.js';
+import { complain, say } from './say.js';
 import { ensureDatabase, withDatabase } from './sql.js';
 
 const name = 'second_spanner';
@@ -26,6 +26,26 @@ const clusterOf = (folder) => {
     account,
     password: keptSecret(folder, 'postgres-password'),
   };
+};
+
+/**
+ * Starts the server again should it die, and says so. @param {import('./postgres.js').Cluster} cluster @param {number} port
+ */
+const keepRunning = (cluster, port) => {
+  /** @type {Promise<void> | undefined} */
+  let starting;
+  const look = () => {
+    if (starting || runningAt(cluster) !== undefined) return;
+    process.stderr.write('PostgreSQL has ended by itself; it is started again.\n');
+    starting = startCluster(cluster, port)
+      .catch(complain)
+      .finally(() => (starting = undefined));
+  };
+  const timer = setInterval(look, 1000);
+  onClose(() => {
+    clearInterval(timer);
+    return starting;
+  });
 };
 
 /**
@@ -55,6 +75,7 @@ export const openDatabase = async (folder, { borrow = false } = {}) => {
     await startCluster(cluster, port);
     rememberPort(folder, port);
   }
+  if (!borrow) keepRunning(cluster, port);
   const password = keptSecret(folder, 'database-password');
   await ensureDatabase(ownerUrl(cluster, port, 'postgres'), { name, role: name, password });
   return {
