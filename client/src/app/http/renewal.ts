@@ -3,11 +3,13 @@ import { inject } from '@angular/core';
 import { catchError, switchMap, throwError } from 'rxjs';
 import { SessionStore } from '../session/session-store';
 import { ApiProblem } from './api-problem';
+import { takesRefusal } from './without-renewal';
 
 const xsrfHeader = 'X-XSRF-TOKEN';
 
-/** A 401 from these means what it says: a wrong password, or a session that is over. */
+/** A 401 from these means what it says: a wrong password, or a session that has run out or is over. */
 const isFinal = (request: HttpRequest<unknown>): boolean =>
+  request.context.get(takesRefusal) ||
   request.url.endsWith('/api/session/renewal') ||
   (request.url.endsWith('/api/session') && request.method !== 'GET');
 

@@ -18,7 +18,7 @@ const unitNames = Object.values(units)
 /** Codes such as `T-07` and `LM-0147`, orders such as `1-3-4-2`, step codes, times and plain numbers. */
 const figure = String.raw`[A-Z]{1,3}-\w*\d\w*|[±−+-]?\d+(?:[.,:/–-]\d+)*(?:°(?![CF]))?%?`;
 const pattern = new RegExp(
-  String.raw`(?<![\w.,-])(${figure})(?:[\s\u00A0\u2009]?(${unitNames})(?![\w·]))?(?![A-Za-z])`,
+  String.raw`(?<![\w.,-])(${figure})(?:[\s\u00A0\u2009]?(${unitNames}))?(?![A-Za-z])`,
   'g',
 );
 

@@ -58,12 +58,14 @@ describe('the session store', () => {
   it('forgets the person on signing out', () => {
     load();
     api.expectOne('/api/session').flush(sessionOf('builder'));
+    sessionStorage.setItem('second-spanner.draft.a-person/sheet/8.6', '{}');
     sessions.signOut().subscribe();
     api.expectOne({ method: 'DELETE', url: '/api/session' }).flush(null);
     load();
     api.expectOne('/api/session').error(new ProgressEvent('error'));
 
     expect(sessions.person()).toBeNull();
+    expect(sessionStorage).toHaveLength(0);
   });
 
   it('takes the person’s trade words before the shop’s', () => {

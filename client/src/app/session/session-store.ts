@@ -3,9 +3,22 @@ import { computed, inject, Injectable, signal } from '@angular/core';
 import { Router } from '@angular/router';
 import type { Dialect, Session, SignInRequest } from '@second-spanner/shared/contracts/people';
 import { may, type Permission } from '@second-spanner/shared/contracts/permissions';
-import { catchError, finalize, map, of, shareReplay, tap, throwError, type Observable } from 'rxjs';
+import {
+  catchError,
+  finalize,
+  map,
+  of,
+  shareReplay,
+  switchMap,
+  tap,
+  throwError,
+  type Observable,
+} from 'rxjs';
 import { ApiProblem } from '../http/api-problem';
+import { withoutRenewal } from '../http/without-renewal';
 import { recall, remember } from '../remembered/remembered';
+import { forgetDrafts } from '../sheets/drafts/kept-drafts';
+import { oneWindowAtOnce } from './in-turn';
 
 const remembered = 'session';
 
@@ -48,13 +61,22 @@ export class SessionStore {
   signOut(): Observable<void> {
     return this.http.delete('/api/session').pipe(
       map(() => undefined),
-      tap(() => this.keep(null)),
+      tap(() => {
+        forgetDrafts();
+        this.keep(null);
+      }),
     );
   }
 
-  /** Renews the session; requests that fail together share one renewal. */
+  /**
+   * Renews the session; requests that fail together share one renewal. Windows take turns: two that send the same
+   * renewal token would end the session, as a token that was stolen does.
+   */
   renew(): Observable<Session> {
-    this.renewing ??= this.http.post<Session>('/api/session/renewal', {}).pipe(
+    const alone = () => this.http.post<Session>('/api/session/renewal', {});
+    const inTurn = () =>
+      this.renewedElsewhere().pipe(switchMap((session) => (session ? of(session) : alone())));
+    this.renewing ??= oneWindowAtOnce('second-spanner.renewal', { alone, inTurn }).pipe(
       tap((session) => this.keep(session)),
       finalize(() => (this.renewing = null)),
       shareReplay(1),
@@ -71,6 +93,17 @@ export class SessionStore {
     if (this.known() === null) return;
     this.keep(null);
     void this.router.navigate(['/sign-in'], { queryParams: { to: this.router.url } });
+  }
+
+  /** The session if another window has renewed it meanwhile. */
+  private renewedElsewhere(): Observable<Session | null> {
+    return this.http
+      .get<Session>('/api/session', { context: withoutRenewal() })
+      .pipe(
+        catchError((error: unknown) =>
+          error instanceof ApiProblem && error.status === 401 ? of(null) : throwError(() => error),
+        ),
+      );
   }
 
   private keep(session: Session | null): void {

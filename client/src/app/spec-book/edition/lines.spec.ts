@@ -12,12 +12,12 @@ const row = (label: string): SpecRow => ({
 });
 
 it('sets a row under the one it belongs to, by the rest of its name', () => {
-  const labels = ['Head nuts', 'Head nuts, thread', 'Head nuts, grade', 'Headlamp', 'Sump, thread'];
+  const labels = ['Head nuts', 'Head nuts, thread', 'Head nuts, grade', 'Head nuts outside', 'Sump, thread'];
   expect(valueLines(labels.map(row)).map(({ label, belongs }) => [label, belongs])).toEqual([
     ['Head nuts', false],
     ['thread', true],
     ['grade', true],
-    ['Headlamp', false],
+    ['Head nuts outside', false],
     ['Sump, thread', false],
   ]);
 });
