@@ -105,6 +105,12 @@ describe('permissions', () => {
     expect(await sign('imogen', 'countersigned')).toBe(422);
   });
 
+  it('do not take another person’s sheet for unchanged', async () => {
+    const tag = (await hands.tomasz.sheet()).headers['etag'] ?? '';
+    expect((await hands.tomasz.sheet().set('If-None-Match', tag)).status).toBe(304);
+    expect((await hands.imogen.sheet().set('If-None-Match', tag)).status).toBe(200);
+  });
+
   it('count from the next request when a role changes', async () => {
     const change = (role: string): Promise<object[]> =>
       stage.app.db.sql(stage.workshop.shop, `UPDATE people SET role = $1 WHERE id = $2`, [

@@ -3,7 +3,7 @@ import { sheetStates } from '@second-spanner/shared/contracts/sheets';
 import { badInput } from '../platform/errors/http-problem.js';
 import { passwordLimit } from '../platform/http/rate-limits.js';
 import { allow, signedInOnly } from '../platform/signing-in/authentication.js';
-import { signedIn } from '../platform/signing-in/signed-in.js';
+import { signedIn, type SignedIn } from '../platform/signing-in/signed-in.js';
 import { parsePaging } from '../platform/validation/paging.js';
 import { parseBody } from '../platform/validation/parse-body.js';
 import { isId, parseId } from '../platform/validation/parse-id.js';
@@ -28,12 +28,12 @@ export function sheetRoutes(services: SheetServices): Router {
     const who = signedIn(request);
     const id = sheetId(request);
     const known = request.get('if-none-match');
-    if (known !== undefined && known === etag(await reading.version(who, id))) {
+    if (known !== undefined && known === etag(who, await reading.version(who, id))) {
       response.status(304).set('ETag', known).end();
       return;
     }
     const sheet = await reading.sheet(who, id);
-    response.set('ETag', etag(sheet.version)).json(sheet);
+    response.set('ETag', etag(who, sheet.version)).json(sheet);
   });
   router.post('/:id/start', allow('sheets.start'), async (request, response) => {
     const who = signedIn(request);
@@ -67,7 +67,8 @@ export function sheetRoutes(services: SheetServices): Router {
   return router;
 }
 
-const etag = (version: number): string => `"${version}"`;
+/** A sheet reads otherwise for each person and role: what one may do on it, and what is covered from them. */
+const etag = ({ person }: SignedIn, version: number): string => `"${version}-${person.id}-${person.role}"`;
 
 export const sheetId = (request: Request): string => parseId(request.params['id'], 'sheet');
 
