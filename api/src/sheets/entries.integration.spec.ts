@@ -151,6 +151,11 @@ describe('the order of work', () => {
       'Pass 2 opens when pass 1 is complete: nut 1 is missing.',
     ]);
     await sheet.tomasz.record('1.3', scenes.pull(tools, 1, '1', 30)).expect(201);
+    const unwatched = await sheet.tomasz.record('1.3', scenes.pull(tools, 2, '2', 55));
+    expect(unwatched.status).toBe(422);
+    expect(unwatched.body.detail).toContain('Imogen Vale watching');
+    expect((await sheet.tomasz.step('1.3')).body.waitsFor[0].what).toBe('second-check');
+    await sheet.imogen.readAgain('1.3', scenes.settingSeen(tools, 55)).expect(201);
     await sheet.tomasz.record('1.3', scenes.pull(tools, 2, '2', 55)).expect(201);
   });
 
@@ -166,7 +171,7 @@ describe('the order of work', () => {
   it('unmarks a critical step only before anything is on it, and never a hold point', async () => {
     const sheet = await stage.newSheet();
     const unmark = (code: string, body: object) =>
-      sheet.tomasz.client.put(`/sheets/${sheet.id}/steps/${code}/unmarking`, body);
+      sheet.nell.client.put(`/sheets/${sheet.id}/steps/${code}/unmarking`, body);
     expect((await unmark('2.3', {})).body.errors[0].field).toBe('reason');
     expect((await unmark('1.3', { reason: 'In a hurry.' })).body.detail).toContain('hold point');
     const done = await unmark('2.3', { reason: 'The strap is seen again at 12.7.' });

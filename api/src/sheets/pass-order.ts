@@ -28,7 +28,8 @@ function whyUnwatched(step: StepAtHand, pass: number): string | null {
   const { row, records } = step;
   const { definition } = records;
   if (definition.kind !== 'tightening' || pass !== finalPass(definition)) return null;
-  if (!row.critical || row.secondCheck !== 'setting-and-pull-witnessed' || readersOf(step).length > 0) return null;
+  if (!row.critical || row.secondCheck !== 'setting-and-pull-witnessed' || readersOf(step).length > 0)
+    return null;
   return `Pass ${pass} is pulled with ${step.secondPerson} watching, who reads the wrench’s setting first.`;
 }
 

@@ -44,7 +44,7 @@ export class SecondReadingsService {
     once: Once,
   ): Promise<Done> {
     const { scope, sheet, by, at } = open;
-    const why = whyNotReadAgain(step, by.id);
+    const why = whyNotReadAgain(step, by);
     if (why !== null) throw refusedByRules(why);
     if (readersOf(step).includes(by.id)) throw conflict('Your own reading of this round is in already.');
     const { row, records } = step;

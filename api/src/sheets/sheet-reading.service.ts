@@ -10,7 +10,7 @@ import { contentOf, withFrozenHead, withFrozenRecords, type SheetContent } from 
 import type { WholeSheetRow } from './sheet.entity.js';
 import { toSheet, toSheetSummary } from './sheet.mapper.js';
 import { SheetsRepository, type SheetFilter } from './sheets.repository.js';
-import type { StepAtHand } from './step-at-hand.js';
+import { factsOf, type StepAtHand } from './step-at-hand.js';
 import type { StepRow } from './step.entity.js';
 import { toSnag, toStepDetail } from './step.mapper.js';
 import { StepsRepository } from './steps.repository.js';
@@ -83,7 +83,7 @@ export class SheetReading {
     const row = await findSheet(who, scope, id);
     const steps = await allSteps(scope, row);
     const content = contentOf(row, steps, await this.tools.listIn(scope));
-    return { row, steps: steps.map((step) => step.row), content };
+    return { row, steps: steps.map(countedAnew), content };
   }
 
   /** All snags of a sheet, oldest first. */
@@ -127,6 +127,12 @@ async function findStep(scope: ShopScope, sheet: WholeSheetRow, code: string): P
   return { ...onSheet(sheet, found.steps), ...found };
 }
 
+/** A step's row with its counts worked out from its records: what is signed does not rest on what stands beside them. */
+function countedAnew(step: StepAtHand): StepRow {
+  const { recorders, ...facts } = factsOf(step);
+  return { ...step.row, ...facts, recorderIds: [...recorders] };
+}
+
 /** Every step of a sheet with its records. */
 export async function allSteps(
   scope: ShopScope,
@@ -139,8 +145,9 @@ export async function allSteps(
 const onSheet = (
   { state, countersigner }: Pick<WholeSheetRow, 'state' | 'countersigner'>,
   steps: readonly StepRow[],
-): Pick<StepAtHand, 'sheetState' | 'secondPerson' | 'steps'> => ({
+): Pick<StepAtHand, 'sheetState' | 'secondPerson' | 'secondPersonId' | 'steps'> => ({
   sheetState: state,
   secondPerson: countersigner.name,
+  secondPersonId: countersigner.id,
   steps,
 });

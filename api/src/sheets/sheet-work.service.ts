@@ -10,7 +10,7 @@ import { notifySheetChanged } from '../platform/live-events/notify-sheet-changed
 import type { SignedIn } from '../platform/signing-in/signed-in.js';
 import type { LockedSheetRow, SheetEntity } from './sheet.entity.js';
 import { SheetsRepository } from './sheets.repository.js';
-import { currentOf, factsOf, toGateStep, type StepAtHand } from './step-at-hand.js';
+import { acceptedOf, currentOf, factsOf, toGateStep, type StepAtHand } from './step-at-hand.js';
 import type { StepRow } from './step.entity.js';
 import { toStepDetail } from './step.mapper.js';
 import { StepsRepository, type StepCounts } from './steps.repository.js';
@@ -88,7 +88,7 @@ async function openStep({ scope, sheet }: OpenSheet, code: string): Promise<Step
   const found = await new StepsRepository(scope).atHand(sheet.id, code);
   if (!found) throw notFound('step');
   const { state: sheetState, countersigner } = sheet;
-  return { sheetState, secondPerson: countersigner.name, ...found };
+  return { sheetState, secondPerson: countersigner.name, secondPersonId: countersigner.id, ...found };
 }
 
 /** A sheet after a deed on it. */
@@ -142,7 +142,9 @@ function countStep(step: StepAtHand, at: Date): Partial<StepCounts> {
   const facts = factsOf(step);
   const { done, verdict, recorders, countersigned, openSnags } = facts;
   const waitsForSecond =
-    critical && !countersigned && mayReadAgain(records.definition, currentOf(step), facts, acceptedOf(records));
+    critical &&
+    !countersigned &&
+    mayReadAgain(records.definition, currentOf(step), facts, acceptedOf(records));
   const awaiting = openSnags > 0 ? 'snag' : waitsForSecond ? 'second-check' : null;
   const since = awaiting === row.awaiting ? row.awaitingSince : at;
   return {

@@ -27,6 +27,9 @@ export function whyNotSign(
   if (meaning === 'countersigned' && built?.person.id === person.id) {
     return 'You signed this sheet as built: somebody else countersigns it.';
   }
+  if (meaning === 'countersigned' && steps.some(({ recorderIds }) => recorderIds.includes(person.id))) {
+    return 'You recorded on this sheet: somebody who did not countersigns it.';
+  }
   return null;
 }
 

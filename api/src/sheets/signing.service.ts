@@ -2,6 +2,8 @@ import { randomUUID } from 'node:crypto';
 import { may } from '@second-spanner/shared/contracts/permissions';
 import type { SendBackRequest, SignatureMeaning, SignRequest } from '@second-spanner/shared/contracts/sheets';
 import { maySendBack, signing } from '@second-spanner/shared/sheet/sheet-states';
+import { ledgerTrouble } from '../ledger/ledger-chain.js';
+import { recordsTrouble } from '../ledger/ledger-matches.js';
 import { appendToLedger, wholeLedger } from '../ledger/ledger.service.js';
 import { badInput, forbidden, refusedByRules } from '../platform/errors/http-problem.js';
 import type { SignedIn } from '../platform/signing-in/signed-in.js';
@@ -45,6 +47,19 @@ export class SigningService {
       const trouble = row.signatures
         .map((signature) => signatureTrouble(content, dated(signature), ledger))
         .find((each) => each !== null);
+      const broken =
+        ledgerTrouble(ledger) ??
+        recordsTrouble(
+          'entry',
+          content.steps.flatMap(({ entries }) => entries),
+          ledger,
+        ) ??
+        recordsTrouble(
+          'second-reading',
+          content.steps.flatMap(({ secondReadings }) => secondReadings),
+          ledger,
+        );
+      if (broken !== null) throw refusedByRules(`${broken} Nobody can sign it as it stands.`);
       if (trouble !== undefined) {
         throw refusedByRules(`${trouble} Send the sheet back to the stand and sign it again.`);
       }

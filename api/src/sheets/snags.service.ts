@@ -6,8 +6,8 @@ import type { SnagRow } from './record.entity.js';
 import type { OpenSheet, SheetWork, StepAnswer } from './sheet-work.service.js';
 import { raiseSnag, settle } from './snag-deeds.service.js';
 import { SnagsRepository } from './snags.repository.js';
-import type { StepAtHand } from './step-at-hand.js';
-import { whyNotSettle, whySheetClosed } from './step-rules.js';
+import { currentOf, type StepAtHand } from './step-at-hand.js';
+import { whyNotAccept, whyNotSettle, whySheetClosed } from './step-rules.js';
 
 /** Raises and settles snags. */
 export class SnagsService {
@@ -17,7 +17,7 @@ export class SnagsService {
     return this.work.onStep(who, sheetId, code, async (open, step) => {
       const closed = whySheetClosed(step.sheetState);
       if (closed !== null) throw refusedByRules(closed);
-      return raiseSnag(open, step, { cause: 'raised', words, parties: [], entryId: null });
+      return raiseSnag(open, step, { cause: 'raised', words, parties: [], entryId: doubted(step) });
     });
   }
 
@@ -41,6 +41,8 @@ export class SnagsService {
       if (snag.settled) throw conflict(`This {snag} was settled by ${snag.settled.by.name} already.`);
       const why = whyNotSettle(step, snag, open.by.id);
       if (why !== null) throw refusedByRules(why);
+      const own = request.how === 'accepted-as-it-is' ? whyNotAccept(step, snag, open.by.id) : null;
+      if (own !== null) throw refusedByRules(own);
       const { step: settled, events } = await settle(open, step, snag, request);
       return { events, step: withRounds(settled, snag, request) };
     });
@@ -48,12 +50,18 @@ export class SnagsService {
 }
 
 /**
- * What was redone or replaced begins a new round: second readings and countersignatures count no longer. After a
- * disagreement what was recorded counts no longer either.
+ * What was redone or replaced begins a new round: second readings and countersignatures count no longer. What was
+ * recorded counts no longer either, but for a failed entry, which its own correction replaces.
  */
 function withRounds(step: StepAtHand, { cause }: SnagRow, { how }: SettleSnagRequest): StepAtHand {
   if (how === 'accepted-as-it-is') return step;
   const round = step.row.round + 1;
-  const entriesFromRound = cause === 'disagreement' ? round : step.row.entriesFromRound;
+  const entriesFromRound = cause === 'failed' ? step.row.entriesFromRound : round;
   return { ...step, row: { ...step.row, round, entriesFromRound } };
 }
+
+/** The latest entry that is doubtful: a snag raised on it lets the foreman decide what no tool could. */
+const doubted = (step: StepAtHand): string | null =>
+  currentOf(step)
+    .filter(({ verdict }) => verdict === 'doubtful')
+    .at(-1)?.id ?? null;

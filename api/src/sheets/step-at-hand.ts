@@ -9,7 +9,9 @@ import type { StepRow } from './step.entity.js';
 /** One step of a sheet with all that decides about it. */
 export interface StepAtHand {
   readonly sheetState: SheetState;
+  /** The sheet's second person: name and id. */
   readonly secondPerson: string;
+  readonly secondPersonId: string;
   readonly steps: readonly StepRow[];
   readonly row: StepRow;
   readonly records: StepRecords;

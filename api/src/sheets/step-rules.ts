@@ -1,3 +1,5 @@
+import type { Person } from '@second-spanner/shared/contracts/people';
+import { may } from '@second-spanner/shared/contracts/permissions';
 import type { SheetState } from '@second-spanner/shared/contracts/sheets';
 import { isRecorded } from '@second-spanner/shared/sheet/facts';
 import { mayRecord, waitsFor } from '@second-spanner/shared/sheet/gates';
@@ -45,18 +47,19 @@ export function whyNotRecord(step: StepAtHand, personId: string): WhyNot {
   return waitsFor(gates, step.row.code, step.secondPerson)[0]?.sentence ?? 'This step is not open.';
 }
 
-export function whyNotReadAgain(step: StepAtHand, personId: string): WhyNot {
+export function whyNotReadAgain(step: StepAtHand, person: Pick<Person, 'id' | 'role'>): WhyNot {
   const { row, records, sheetState } = step;
+  const personId = person.id;
   const closed = whySheetClosed(sheetState);
   if (closed !== null) return closed;
   if (!row.critical || row.secondCheck === null) return 'This step asks for no second check.';
   if (row.recorderIds.includes(personId)) {
     return 'You recorded on this step: the second reading is another person’s.';
   }
-  if (
-    records.snags.some(({ settled }) => settled?.how === 'accepted-as-it-is' && settled.by.id === personId)
-  ) {
-    return 'You accepted a reading of this step as it is: the second reading is another person’s.';
+  const accepted = whyNotAfterAccepting(step, personId);
+  if (accepted !== null) return accepted;
+  if (row.secondCheck !== 'inspected' && mayDecideFailures(step, person) && hasFailed(step)) {
+    return 'A failed reading of this step is shown to you to decide on: the second reading is another person’s.';
   }
   if (row.countersigned) return 'This step is countersigned already.';
   if (!mayReadAgain(records.definition, currentOf(step), factsOf(step), acceptedOf(records))) {
@@ -75,6 +78,8 @@ export function whyNotCountersign(step: StepAtHand, personId: string): WhyNot {
     return 'You recorded on this step: somebody else countersigns it.';
   }
   if (!readersOf(step).includes(personId)) return 'Give your own reading first.';
+  const accepted = whyNotAfterAccepting(step, personId);
+  if (accepted !== null) return accepted;
   if (!isRecorded(factsOf(step))) return 'Not everything on this step is recorded and good yet.';
   return null;
 }
@@ -116,6 +121,34 @@ export function whyNotSettle(step: StepAtHand, snag: SnagRow, personId: string):
   const closed = whySheetClosed(step.sheetState);
   if (closed !== null) return closed;
   if (snag.cause !== 'disagreement') return null;
-  const parties = [...snag.parties, ...currentOf(step).map(({ by }) => by)];
+  const readers = step.records.secondReadings.filter(({ round }) => round === snag.round);
+  const parties = [
+    ...snag.parties,
+    ...currentOf(step).map(({ by }) => by),
+    ...readers.map(({ by }) => by.id),
+  ];
   return parties.includes(personId) ? 'Neither of the two who disagree settles it.' : null;
 }
+
+/** Nobody accepts as it is what they recorded themselves. */
+export function whyNotAccept({ records }: StepAtHand, snag: SnagRow, personId: string): WhyNot {
+  const entry = records.entries.find(({ id }) => id === snag.entryId);
+  return entry?.by.id === personId ? 'You recorded this yourself: another foreman accepts it.' : null;
+}
+
+/** Who accepted a fault of a step neither reads it again nor countersigns it. */
+function whyNotAfterAccepting({ records }: StepAtHand, personId: string): WhyNot {
+  const accepted = records.snags.some(
+    ({ settled }) => settled?.how === 'accepted-as-it-is' && settled.by.id === personId,
+  );
+  return accepted
+    ? 'You accepted a reading of this step as it is: the second check is another person’s.'
+    : null;
+}
+
+/** Whether a failed reading is shown to a person, who then can't read it again blind. */
+export const mayDecideFailures = (step: StepAtHand, { id, role }: Pick<Person, 'id' | 'role'>): boolean =>
+  may(role, 'snags.accept') && id !== step.secondPersonId;
+
+const hasFailed = ({ row, records }: StepAtHand): boolean =>
+  records.snags.some(({ cause, round }) => cause === 'failed' && round >= row.entriesFromRound);

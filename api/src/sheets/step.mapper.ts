@@ -1,6 +1,6 @@
 import type { Person } from '@second-spanner/shared/contracts/people';
 import { may } from '@second-spanner/shared/contracts/permissions';
-import type { EntryView, SnagView, StepDetail } from '@second-spanner/shared/contracts/sheets';
+import type { EntryView, SnagView, StepDetail, WaitsFor } from '@second-spanner/shared/contracts/sheets';
 import { waitsFor } from '@second-spanner/shared/sheet/gates';
 import type { SnagRow, StepRecords } from './record.entity.js';
 import { toStepLines } from './sheet.mapper.js';
@@ -12,7 +12,9 @@ import {
   toGateStep,
   type StepAtHand,
 } from './step-at-hand.js';
+import { waitsForWitness } from './pass-order.js';
 import {
+  mayDecideFailures,
   whyNotCall,
   whyNotCountersign,
   whyNotReadAgain,
@@ -43,7 +45,7 @@ export function toStepDetail({ sheetId, version, step, person }: DetailCase): St
     ...{ sheetId, version, covered },
     definition: records.definition,
     round: row.round,
-    waitsFor: waitsFor(steps.map(toGateStep), row.code, step.secondPerson),
+    waitsFor: [...waitsFor(steps.map(toGateStep), row.code, step.secondPerson), ...witnessWanted(step)],
     entries: covered ? [] : toEntries(step),
     secondReadings: covered ? [] : toSecondReadings(records),
     countersignatures: records.countersignatures.map(
@@ -57,6 +59,12 @@ export function toStepDetail({ sheetId, version, step, person }: DetailCase): St
     uncriticalReason: row.uncriticalReason,
     can: canDo(step, person),
   };
+}
+
+function witnessWanted(step: StepAtHand): WaitsFor[] {
+  const sentence = waitsForWitness(step);
+  if (sentence === null) return [];
+  return [{ what: 'second-check', code: step.row.code, sentence, person: step.secondPerson }];
 }
 
 const coveredWords = 'Covered until your own reading is in.';
@@ -79,7 +87,7 @@ const toSecondReadings = ({ secondReadings }: StepRecords): StepDetail['secondRe
 export function toSnag(step: StepAtHand, snag: SnagRow, person: Person): SnagView {
   // Who must decide on a failed reading has to see it; whoever accepts it gives no second reading of it.
   const undecided = snag.settled === null || snag.settled.how === 'accepted-as-it-is';
-  const decides = snag.cause === 'failed' && undecided && may(person.role, 'snags.accept');
+  const decides = snag.cause === 'failed' && undecided && mayDecideFailures(step, person);
   const covered = snag.cause !== 'raised' && !decides && coveredFrom(step.row, readersOf(step), person.id);
   const { id, cause, by, at, settled } = snag;
   return {
@@ -104,7 +112,7 @@ function canDo(step: StepAtHand, { id, role }: Person): StepDetail['can'] {
   );
   return {
     record: may(role, 'entries.record') && whyNotRecord(step, id) === null,
-    readAgain: may(role, 'second-checks.make') && !hasRead && whyNotReadAgain(step, id) === null,
+    readAgain: may(role, 'second-checks.make') && !hasRead && whyNotReadAgain(step, { id, role }) === null,
     countersign: may(role, 'second-checks.make') && !hasSigned && whyNotCountersign(step, id) === null,
     raiseSnag: may(role, 'snags.raise') && whySheetClosed(step.sheetState) === null,
     unmarkCritical: may(role, 'sheets.unmark-critical') && whyNotUnmark(step) === null,

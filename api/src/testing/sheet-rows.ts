@@ -87,11 +87,22 @@ export class SheetRows {
     );
   }
 
+  /** From planned to signed off, each move with its signature already given. */
+  async walkToSignedOff(): Promise<void> {
+    for (const state of ['on-the-stand', 'countersigning', 'signed-off']) {
+      await this.db.sql(this.workshop.shop, 'UPDATE sheets SET state = $2 WHERE id = $1', [
+        this.sheet,
+        state,
+      ]);
+    }
+  }
+
   async releaseSigned(): Promise<void> {
     const { nell, tomasz, imogen } = this.workshop.people;
     await this.signature('built', tomasz);
     await this.signature('countersigned', imogen);
     await this.signature('released', nell);
+    await this.walkToSignedOff();
     await this.release();
   }
 

@@ -11,7 +11,7 @@ export const permissions = {
   'tools.read': ['foreman', 'builder', 'countersigner'],
   'sheets.read': ['foreman', 'builder', 'countersigner', 'car-owner'],
   'sheets.start': ['foreman', 'builder'],
-  'sheets.unmark-critical': ['foreman', 'builder'],
+  'sheets.unmark-critical': ['foreman'],
   'entries.record': ['foreman', 'builder'],
   'second-checks.make': ['foreman', 'builder', 'countersigner'],
   'snags.raise': ['foreman', 'builder', 'countersigner'],

@@ -1,6 +1,6 @@
 import { InputError } from '../contracts/input-error.js';
 import type { Agreement } from '../contracts/sheets.js';
-import type { SecondReadingContent, TighteningStepDefinition } from '../contracts/steps.js';
+import type { Adapter, SecondReadingContent, TighteningStepDefinition } from '../contracts/steps.js';
 import { convert } from '../quantities/convert.js';
 import { printQuantity } from '../quantities/print.js';
 import { requireQuantity } from '../quantities/require.js';
@@ -24,7 +24,8 @@ export function agreeSetting(step: Case, second: Second): Agreement {
   if (!target) throw new InputError('content.setting', 'This step has no torque to set a wrench to.');
   const pulls = step.entries.map(({ content }) => content).filter((content) => content.kind === 'tightening');
   const atFinal = pulls.filter((content) => content.pass === pass);
-  const adapter = atFinal.find((content) => content.adapter)?.adapter;
+  // Before the last pass is pulled, the adapter is the one that the passes before it were pulled with.
+  const adapter = (atFinal.find(hasAdapter) ?? pulls.filter(hasAdapter).at(-1))?.adapter;
   const required = convert(requiredSetting(target, tool, adapter), seen.unit);
   const allowed = clicks(tool)
     ? convert(tool.resolution, seen.unit).value / 2
@@ -50,6 +51,8 @@ export function agreeSetting(step: Case, second: Second): Agreement {
     rows: [{ label: `Setting of ${tool.code}`, first, second: printQuantity(seen), en: null, agrees }],
   };
 }
+
+const hasAdapter = ({ adapter }: { readonly adapter?: Adapter }): boolean => adapter !== undefined;
 
 interface Reason {
   readonly seen: string;

@@ -39,11 +39,13 @@ export function compareSecond(step: SecondCheckCase, second: SecondReadingConten
 /**
  * Whether the second reading may be given: when all is recorded; on a witnessed tightening from the moment when the
  * last torque pass is the next, so that the pulls can be watched.
+ * @param accepted ids of entries whose fault the foreman accepted as it is
  */
 export function mayReadAgain(
   definition: StepDefinition,
   entries: readonly RecordedEntry[],
   facts: StepFacts,
+  accepted: ReadonlySet<string>,
 ): boolean {
   if (isRecorded(facts)) return true;
   if (definition.kind !== 'tightening' || definition.secondCheck !== 'setting-and-pull-witnessed')
@@ -52,11 +54,11 @@ export function mayReadAgain(
   const before = planOf(definition).steps.filter(({ pass }) => pass < final);
   return before.every((step) =>
     entries.some(
-      ({ content, verdict }) =>
+      ({ id, content, verdict }) =>
         content.kind === 'tightening' &&
         content.pass === step.pass &&
         content.fastener === step.fastener &&
-        verdict === 'pass',
+        (verdict === 'pass' || accepted.has(id)),
     ),
   );
 }

@@ -58,10 +58,20 @@ describe('what was recorded', () => {
     );
     await expect(sql('DELETE FROM steps')).rejects.toThrow('never taken away');
     await expect(sql('DELETE FROM sheets')).rejects.toThrow('never taken away');
-    await expect(sql('UPDATE steps SET critical = false')).rejects.toThrow('takes a reason');
-    await sql(`UPDATE steps SET critical = false, uncritical_reason = 'Dowelled.' WHERE id = $1`, [
-      rows.step,
-    ]);
+    const own = 'WHERE id = $1';
+    const unmark = `UPDATE steps SET critical = false, uncritical_reason = 'Dowelled.' ${own}`;
+    await expect(sql(unmark, [rows.step])).rejects.toThrow('from a hold point');
+    const other = randomUUID();
+    await sql(
+      `INSERT INTO steps (id, shop_id, sheet_id, position, code, stage, kind, title, hold, critical,
+         second_check, rests_on, definition, of_total)
+       SELECT $2, shop_id, sheet_id, 2, '1.2', 1, kind, title, false, true, second_check, rests_on,
+         definition, 1 FROM steps WHERE id = $1`,
+      [rows.step, other],
+    );
+    await expect(sql(`UPDATE steps SET countersigned = true ${own}`, [other])).rejects.toThrow('by a person');
+    await expect(sql(`UPDATE steps SET critical = false ${own}`, [other])).rejects.toThrow('takes a reason');
+    await sql(unmark, [other]);
   });
 });
 
@@ -140,6 +150,8 @@ describe('two people', () => {
     await rows.signature('countersigned', people.imogen);
     await expect(rows.signature('released', people.tomasz)).rejects.toThrow('Only a foreman releases');
     await rows.signature('released', people.nell);
+    await expect(rows.release()).rejects.toThrow('moves on with the signature');
+    await rows.walkToSignedOff();
     await rows.release();
   });
 

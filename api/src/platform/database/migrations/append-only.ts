@@ -63,10 +63,12 @@ const guardSheets = `
     IF OLD.state = 'released' THEN
       RAISE EXCEPTION 'The sheet is released: nothing on it changes any more.' USING ERRCODE = 'SP001';
     END IF;
-    IF (NEW.id, NEW.shop_id, NEW.code, NEW.car_id, NEW.spec_edition_id, NEW.created_by, NEW.created_at)
+    IF (NEW.id, NEW.shop_id, NEW.code, NEW.car_id, NEW.spec_edition_id, NEW.builder_id, NEW.countersigner_id,
+        NEW.created_by, NEW.created_at)
       IS DISTINCT FROM
-      (OLD.id, OLD.shop_id, OLD.code, OLD.car_id, OLD.spec_edition_id, OLD.created_by, OLD.created_at) THEN
-      RAISE EXCEPTION 'A sheet keeps its car and its spec edition.' USING ERRCODE = 'SP001';
+      (OLD.id, OLD.shop_id, OLD.code, OLD.car_id, OLD.spec_edition_id, OLD.builder_id, OLD.countersigner_id,
+        OLD.created_by, OLD.created_at) THEN
+      RAISE EXCEPTION 'A sheet keeps its car, its spec edition and its two people.' USING ERRCODE = 'SP001';
     END IF;
     IF NEW.version < OLD.version OR NEW.sign_round < OLD.sign_round THEN
       RAISE EXCEPTION 'Versions and rounds of a sheet only rise.' USING ERRCODE = 'SP001';
@@ -104,6 +106,15 @@ const guardSteps = `
     END IF;
     IF NEW.round < OLD.round OR NEW.entries_from_round < OLD.entries_from_round THEN
       RAISE EXCEPTION 'The rounds of a step only rise.' USING ERRCODE = 'SP001';
+    END IF;
+    IF OLD.critical AND NOT NEW.critical AND (OLD.hold
+        OR EXISTS (SELECT FROM entries WHERE step_id = NEW.id)) THEN
+      RAISE EXCEPTION 'Nobody takes the second person from a hold point, or from what is begun.'
+        USING ERRCODE = 'SP001';
+    END IF;
+    IF NEW.countersigned AND NOT OLD.countersigned AND NOT EXISTS (SELECT FROM countersignatures
+        WHERE step_id = NEW.id AND round = NEW.round AND outcome = 'agree') THEN
+      RAISE EXCEPTION 'A step is countersigned by a person, not by hand.' USING ERRCODE = 'SP001';
     END IF;
     IF OLD.critical AND NOT NEW.critical AND NEW.uncritical_reason IS NULL THEN
       RAISE EXCEPTION 'Unmarking a critical step takes a reason.' USING ERRCODE = 'SP001';

@@ -84,6 +84,10 @@ const guardCountersignatures = `
         AND person_id = NEW.person_id) THEN
       RAISE EXCEPTION 'A countersignature needs the same person''s own reading first.' USING ERRCODE = 'SP002';
     END IF;
+    IF EXISTS (SELECT FROM snag_settlements WHERE step_id = NEW.step_id AND settled_by = NEW.person_id
+        AND how = 'accepted-as-it-is') THEN
+      RAISE EXCEPTION 'Who accepted a reading as it is does not countersign it.' USING ERRCODE = 'SP002';
+    END IF;
     RETURN NEW;
   END $$;
   CREATE TRIGGER c_guard BEFORE INSERT ON countersignatures
@@ -103,6 +107,14 @@ const guardSettlements = `
           AND e.recorded_by = NEW.settled_by)) THEN
       RAISE EXCEPTION 'Neither of the two who disagree settles it.' USING ERRCODE = 'SP002';
     END IF;
+    IF snag.cause = 'disagreement' AND EXISTS (SELECT FROM second_readings WHERE step_id = NEW.step_id
+        AND round = snag.round AND person_id = NEW.settled_by) THEN
+      RAISE EXCEPTION 'Neither of the two who disagree settles it.' USING ERRCODE = 'SP002';
+    END IF;
+    IF NEW.how = 'accepted-as-it-is' AND EXISTS (SELECT FROM entries WHERE id = snag.entry_id
+        AND recorded_by = NEW.settled_by) THEN
+      RAISE EXCEPTION 'Nobody accepts as it is what they recorded themselves.' USING ERRCODE = 'SP002';
+    END IF;
     IF NEW.how = 'accepted-as-it-is' AND NOT EXISTS
         (SELECT FROM people WHERE id = NEW.settled_by AND role = 'foreman') THEN
       RAISE EXCEPTION 'Only a foreman accepts a snag as it is.' USING ERRCODE = 'SP002';
@@ -120,6 +132,10 @@ const guardSignatures = `
           AND meaning IN ('built', 'countersigned') AND person_id = NEW.person_id) THEN
       RAISE EXCEPTION 'Builder and countersigner are two people.' USING ERRCODE = 'SP002';
     END IF;
+    IF NEW.meaning = 'countersigned' AND EXISTS
+        (SELECT FROM entries WHERE sheet_id = NEW.sheet_id AND recorded_by = NEW.person_id) THEN
+      RAISE EXCEPTION 'Who recorded on a sheet does not countersign it.' USING ERRCODE = 'SP002';
+    END IF;
     IF NEW.meaning = 'released' AND NOT EXISTS
         (SELECT FROM people WHERE id = NEW.person_id AND role = 'foreman') THEN
       RAISE EXCEPTION 'Only a foreman releases a sheet.' USING ERRCODE = 'SP002';
@@ -131,13 +147,23 @@ const guardSignatures = `
 const guardRelease = `
   CREATE FUNCTION guard_release() RETURNS trigger LANGUAGE plpgsql AS $$
   BEGIN
-    IF (SELECT count(*) FROM signatures WHERE sheet_id = NEW.id AND sign_round = NEW.sign_round) < 3 THEN
+    IF NEW.state = 'released'
+      AND (SELECT count(*) FROM signatures WHERE sheet_id = NEW.id AND sign_round = NEW.sign_round) < 3 THEN
       RAISE EXCEPTION 'A sheet is released with three signatures under it.' USING ERRCODE = 'SP002';
+    END IF;
+    IF NOT (
+      (OLD.state = 'planned' AND NEW.state = 'on-the-stand')
+      OR (NEW.state = 'on-the-stand' AND NEW.sign_round = OLD.sign_round + 1)
+      OR EXISTS (SELECT FROM signatures WHERE sheet_id = NEW.id AND sign_round = NEW.sign_round
+        AND (OLD.state, meaning, NEW.state) IN (('on-the-stand', 'built', 'countersigning'),
+          ('countersigning', 'countersigned', 'signed-off'), ('signed-off', 'released', 'released')))
+    ) THEN
+      RAISE EXCEPTION 'A sheet moves on with the signature for it, or back to the stand.' USING ERRCODE = 'SP002';
     END IF;
     RETURN NEW;
   END $$;
   CREATE TRIGGER release BEFORE UPDATE ON sheets FOR EACH ROW
-    WHEN (NEW.state = 'released' AND OLD.state <> 'released') EXECUTE FUNCTION guard_release();
+    WHEN (NEW.state <> OLD.state) EXECUTE FUNCTION guard_release();
   CREATE FUNCTION guard_new_sheet() RETURNS trigger LANGUAGE plpgsql AS $$
   BEGIN
     RAISE EXCEPTION 'A sheet begins planned.' USING ERRCODE = 'SP002';
