@@ -1,6 +1,11 @@
 import type { Tool } from '@second-spanner/shared/contracts/registers';
 import type { NewEntryRequest, Sheet, StepDetail } from '@second-spanner/shared/contracts/sheets';
-import type { EntryContent, SecondReadingContent } from '@second-spanner/shared/contracts/steps';
+import type {
+  EntryContent,
+  SecondReadingContent,
+  TighteningStepDefinition,
+} from '@second-spanner/shared/contracts/steps';
+import { finalPass } from '@second-spanner/shared/sheet/plan-of';
 import { slotKeyOf } from '@second-spanner/shared/sheet/slots';
 import { finalTorque, goodContents, readers, watchedFasteners } from './demo-work.js';
 import type { Hand } from './hand.js';
@@ -22,8 +27,37 @@ export async function workUpTo(work: Work, until: string | null): Promise<void> 
   const end = until === null ? steps.length : steps.findIndex(({ code }) => code === until);
   for (const { code, status } of steps.slice(0, end)) {
     if (status === 'done') continue;
-    await checkRecorded(work, await record(work, code));
+    await workStep(work, code);
   }
+}
+
+async function workStep(work: Work, code: string): Promise<void> {
+  const { definition, critical } = await work.builder.get<StepDetail>(stepPath(work, code));
+  if (definition.kind === 'tightening' && critical) await workWatched(work, definition);
+  else await checkRecorded(work, await record(work, code));
+}
+
+/** The second person reads the wrench before the last torque pass, and watches its pulls. */
+async function workWatched(work: Work, definition: TighteningStepDefinition): Promise<void> {
+  const { code } = definition;
+  const final = finalPass(definition);
+  await record(work, code, (content) => content.kind === 'tightening' && content.pass < final);
+  const { secondReadings, round } = await work.builder.get<StepDetail>(stepPath(work, code));
+  if (!secondReadings.some((reading) => reading.round === round)) {
+    const content = settingSeen(definition, work.tools);
+    await work.second.post(`${stepPath(work, code)}/second-readings`, { content });
+  }
+  await record(work, code);
+  const pullsWitnessed = watchedFasteners(definition);
+  await work.second.post(`${stepPath(work, code)}/countersignatures`, { outcome: 'agree', pullsWitnessed });
+}
+
+function settingSeen(definition: TighteningStepDefinition, tools: readonly Tool[]): SecondReadingContent {
+  const pull = goodContents(definition, tools).find(
+    (content) => content.kind === 'tightening' && content.pass === finalPass(definition),
+  );
+  const [toolId, set] = pull?.kind === 'tightening' ? [pull.toolId, pull.setting] : ['', undefined];
+  return { kind: 'setting-and-pull-witnessed', toolId, setting: set ?? finalTorque(definition) };
 }
 
 /** The builder records what a step still wants, or of it what is wanted; what failed before is put right. */
@@ -50,12 +84,11 @@ export async function check(work: Work, code: string): Promise<void> {
 }
 
 async function checkRecorded(work: Work, step: StepDetail): Promise<void> {
-  const { code, definition } = step;
+  const { code } = step;
   if (!step.critical || step.status === 'done') return;
   const content = readAgain(step, work.tools);
-  const pullsWitnessed = definition.kind === 'tightening' ? watchedFasteners(definition) : undefined;
   await work.second.post(`${stepPath(work, code)}/second-readings`, { content });
-  await work.second.post(`${stepPath(work, code)}/countersignatures`, { outcome: 'agree', pullsWitnessed });
+  await work.second.post(`${stepPath(work, code)}/countersignatures`, { outcome: 'agree' });
 }
 
 /** What a second person finds who reads the same as the first. */
@@ -67,11 +100,6 @@ function readAgain({ definition, entries }: StepDetail, tools: readonly Tool[]):
   }
   if (one.kind === 'wiring') return { kind: 'read-again', fitted: one.fitted };
   if (one.kind === 'valve-timing') return { kind: 'read-again', sightings: one.sightings, about: one.about };
-  if (definition.kind === 'tightening') {
-    const last = first.filter((content) => content.kind === 'tightening').at(-1);
-    const setting = last?.setting ?? finalTorque(definition);
-    return { kind: 'setting-and-pull-witnessed', toolId: last?.toolId ?? '', setting };
-  }
   if (definition.kind !== 'measurement' || one.kind !== 'measurement') {
     throw new Error(`Step ${definition.code} is not read again.`);
   }
