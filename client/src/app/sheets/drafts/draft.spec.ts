@@ -1,7 +1,11 @@
 import { signal } from '@angular/core';
 import { TestBed } from '@angular/core/testing';
 import { beforeEach, describe, expect, it } from 'vitest';
+import type { Person } from '@second-spanner/shared/contracts/people';
+import { SessionStore } from '../../session/session-store';
+import { sessionOf } from '../../session/testing/sessions';
 import { draft, hasTexts } from './draft';
+import { forgetDrafts } from '../../remembered/kept-drafts';
 
 interface Typed {
   readonly slot: string;
@@ -18,7 +22,14 @@ function openDraft(key: () => string) {
 }
 
 describe('a draft', () => {
-  beforeEach(() => sessionStorage.clear());
+  const { person: somebody } = sessionOf('builder');
+  const person = signal<Person | null>(somebody);
+
+  beforeEach(() => {
+    sessionStorage.clear();
+    person.set(somebody);
+    TestBed.configureTestingModule({ providers: [{ provide: SessionStore, useValue: { person } }] });
+  });
 
   it('outlives the page', () => {
     openDraft(() => 'sheet/8.6').set({ slot: 'pull/1/6', text: '55.4' });
@@ -40,6 +51,27 @@ describe('a draft', () => {
     expect(held()).toEqual({ slot: 'a', text: '1' });
   });
 
+  it('belongs to its person alone', () => {
+    const held = openDraft(() => 'sheet/8.6');
+    held.set({ slot: 'a', text: '55.4' });
+    TestBed.tick();
+    person.set({ ...somebody, id: 'another-person' });
+    TestBed.tick();
+
+    expect(held()).toEqual(empty);
+    person.set(somebody);
+    expect(held()).toEqual({ slot: 'a', text: '55.4' });
+  });
+
+  it('is gone once all are forgotten, and nothing else with it', () => {
+    openDraft(() => 'sheet/8.6').set({ slot: 'a', text: '1' });
+    TestBed.tick();
+    sessionStorage.setItem('something-else', 'kept');
+    forgetDrafts();
+
+    expect(Object.keys(sessionStorage)).toEqual(['something-else']);
+  });
+
   it('leaves nothing behind when it is emptied', () => {
     const held = openDraft(() => 'sheet/8.6');
     held.set({ slot: 'a', text: '1' });
@@ -51,9 +83,9 @@ describe('a draft', () => {
   });
 
   it('ignores what is not of its shape any more', () => {
-    sessionStorage.setItem('second-spanner.draft.sheet/8.6', '{"text":1}');
+    sessionStorage.setItem('second-spanner.draft.a-person/sheet/8.6', '{"text":1}');
     expect(openDraft(() => 'sheet/8.6')()).toEqual(empty);
-    sessionStorage.setItem('second-spanner.draft.sheet/8.6', '{"te');
+    sessionStorage.setItem('second-spanner.draft.a-person/sheet/8.6', '{"te');
     expect(openDraft(() => 'sheet/8.6')()).toEqual(empty);
   });
 });

@@ -1,29 +1,10 @@
-import { effect, linkedSignal, type WritableSignal } from '@angular/core';
-
-const prefix = 'second-spanner.draft.';
-
-function recallDraft<T>(key: string, empty: T, isDraft: (value: unknown) => value is T): T {
-  try {
-    const text = sessionStorage.getItem(prefix + key);
-    const value: unknown = text === null ? null : JSON.parse(text);
-    return isDraft(value) ? value : empty;
-  } catch {
-    return empty;
-  }
-}
-
-function keepDraft<T>(key: string, draft: T, empty: T): void {
-  try {
-    const text = JSON.stringify(draft);
-    if (text === JSON.stringify(empty)) sessionStorage.removeItem(prefix + key);
-    else sessionStorage.setItem(prefix + key, text);
-  } catch {
-    // A window that keeps nothing: the draft then lasts as long as the page.
-  }
-}
+import { computed, effect, inject, linkedSignal, type WritableSignal } from '@angular/core';
+import { SessionStore } from '../../session/session-store';
+import { keepDraft, recallDraft } from '../../remembered/kept-drafts';
 
 /**
- * What is typed on a page before it is kept: a signal that outlives a reload of the window.
+ * What is typed on a page before it is kept: a signal that outlives a reload of the window,
+ * and is the signed-in person's alone: the next one at a shared tablet does not find it.
  * Call in an injection context.
  * @param key gives the draft's name, such as sheet and step
  * @param isDraft tells whether what was found under the name still has this shape
@@ -33,8 +14,10 @@ export function draft<T>(
   empty: T,
   isDraft: (value: unknown) => value is T,
 ): WritableSignal<T> {
-  const held = linkedSignal({ source: key, computation: (name) => recallDraft(name, empty, isDraft) });
-  effect(() => keepDraft(key(), held(), empty));
+  const { person } = inject(SessionStore);
+  const name = computed(() => `${person()?.id ?? ''}/${key()}`);
+  const held = linkedSignal({ source: name, computation: (kept) => recallDraft(kept, empty, isDraft) });
+  effect(() => keepDraft(name(), held(), empty));
   return held;
 }
 
