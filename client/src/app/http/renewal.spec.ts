@@ -100,6 +100,35 @@ describe('the renewal of a session', () => {
     expect(TestBed.inject(SessionStore).person()).not.toBeNull();
   });
 
+  describe('where windows take turns', () => {
+    beforeEach(() => {
+      const locks = { request: (_name: string, task: () => Promise<unknown>) => task() };
+      Object.defineProperty(navigator, 'locks', { value: locks, configurable: true });
+    });
+    afterEach(() => Reflect.deleteProperty(navigator, 'locks'));
+
+    const next = (url: string) => vi.waitFor(() => api.expectOne(url));
+
+    it('takes what another window has renewed meanwhile', async () => {
+      ask('/api/bench');
+      api.expectOne('/api/bench').flush(null, refused);
+      (await next('/api/session')).flush(sessionOf('builder'));
+      (await next('/api/bench')).flush('bench');
+
+      expect(answers).toEqual(['bench']);
+    });
+
+    it('renews when its turn has come and no other window has', async () => {
+      ask('/api/bench');
+      api.expectOne('/api/bench').flush(null, refused);
+      (await next('/api/session')).flush(null, refused);
+      (await next('/api/session/renewal')).flush(sessionOf('builder'));
+      (await next('/api/bench')).flush('bench');
+
+      expect(answers).toEqual(['bench']);
+    });
+  });
+
   it('takes a wrong password for what it is', () => {
     http.post('/api/session', {}).subscribe({ error: (error: unknown) => answers.push(error) });
     api.expectOne('/api/session').flush(null, refused);

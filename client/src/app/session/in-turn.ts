@@ -10,7 +10,7 @@ export function oneWindowAtOnce<T>(
   name: string,
   { alone, inTurn }: { readonly alone: () => Observable<T>; readonly inTurn: () => Observable<T> },
 ): Observable<T> {
-  return defer(() =>
-    'locks' in navigator ? navigator.locks.request(name, () => firstValueFrom(inTurn())) : alone(),
-  );
+  const whenFree = async (): Promise<T> =>
+    await navigator.locks.request(name, () => firstValueFrom(inTurn()));
+  return defer(() => ('locks' in navigator ? whenFree() : alone()));
 }

@@ -16,8 +16,8 @@ import {
 } from 'rxjs';
 import { ApiProblem } from '../http/api-problem';
 import { withoutRenewal } from '../http/without-renewal';
+import { forgetDrafts } from '../remembered/kept-drafts';
 import { recall, remember } from '../remembered/remembered';
-import { forgetDrafts } from '../sheets/drafts/kept-drafts';
 import { oneWindowAtOnce } from './in-turn';
 
 const remembered = 'session';
