@@ -48,7 +48,9 @@ describe('a measurement', () => {
   });
 
   it('fails a reading past the range of the tool and doubts one made past its calibration', () => {
-    expect(judgeEntry(endFloat, read(17), context)).toMatchObject({ verdict: 'fail' });
+    const past = judgeEntry(endFloat, read(17), context);
+    expect(past.verdict).toBe('fail');
+    expect(past.reason).toContain('outside the range of T-04');
     const late = judgeEntry(endFloat, read(0.17), { ...context, on: '2027-03-15' });
     expect(late.verdict).toBe('doubtful');
     expect(late.reason).toContain('2027-03-14');

@@ -23,7 +23,8 @@ export function judgeMeasurement(
   requireSameKind(tool, value, 'content.toolId');
   const decision = limitDecision({ value, ...definition.limits, uncertainty: uncertaintyAt(tool, value) });
   const ofTool = toolJudgement(tool, value, context.on);
-  if (ofTool && decision.verdict !== 'fail') return ofTool;
+  // What the tool can't show at all was read or typed wrongly, whatever the limits say.
+  if (ofTool && (ofTool.verdict === 'fail' || decision.verdict !== 'fail')) return ofTool;
   return decision.verdict === 'not-judged'
     ? { verdict: 'pass', reason: 'Written down; the spec gives no limit for it.' }
     : decision;
