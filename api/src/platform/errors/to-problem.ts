@@ -33,7 +33,12 @@ const parserTroubles: Readonly<Record<string, readonly [Trouble, string]>> = {
 };
 
 /** What errors of the database and of the body parser say of themselves beside their message. */
-type Refused = { code?: unknown; constraint?: unknown; type?: unknown; status?: unknown };
+interface Refused {
+  readonly code?: unknown;
+  readonly constraint?: unknown;
+  readonly type?: unknown;
+  readonly status?: unknown;
+}
 
 /** Any error as the problem that is told; an unknown one tells nothing about the inside. */
 export function toProblem(error: unknown): HttpProblem {
