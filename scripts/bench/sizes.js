@@ -68,8 +68,9 @@ const lazyOf = (first) => {
   return found;
 };
 
-/** The elements that a script's components are, to tell which page it is. @param {string} script */
-const elementsOf = (script) => all(read(script).toString('utf8'), /selectors:\[\["(ss-[\w-]+)"/g);
+/** The element that stands for a script: its last one, which is built from those before. @param {string} script */
+const elementOf = (script) =>
+  all(read(script).toString('utf8'), /selectors:\[\["(ss-[\w-]+)"/g).at(-1) ?? script;
 
 /** Everything that the service worker keeps, fonts apart. */
 const keptOffline = () => {
@@ -107,16 +108,10 @@ export const measureSizes = async () => {
   return [
     sizeRow('first download, brotli', sizeOfAll(['index.html', ...styles, ...scripts]), 110),
     ...(largest
-      ? [
-          sizeRow(
-            `largest of ${lazy.length} lazy pages (${elementsOf(largest.script)[0] ?? largest.script})`,
-            largest.size,
-            70,
-          ),
-        ]
+      ? [sizeRow(`largest of ${lazy.length} lazy pages (${elementOf(largest.script)})`, largest.size, 70)]
       : []),
     ...lazy.slice(1, 6).map(({ script, size }) => ({
-      ...sizeRow(`  next largest (${elementsOf(script)[0] ?? script})`, size, 70),
+      ...sizeRow(`  next largest (${elementOf(script)})`, size, 70),
     })),
     ...(offline
       ? [sizeRow('everything kept for offline, fonts apart', sizeOfAll(new Set(offline)), 350)]
