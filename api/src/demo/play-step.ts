@@ -24,10 +24,9 @@ export async function playStep(play: Play, step: StepDetail, how: PlayedStep): P
   const contents = firstContents(definition, play, how);
   const raised = eventOf(how, 'raised');
   const disagreement = eventOf(how, 'disagreement');
-  if (how.isChecked && definition.kind === 'tightening') {
+  const watchedFrom = eventOf(how, 'uncritical') ? -1 : firstWatched(step, contents);
+  if (watchedFrom >= 0) {
     // The setting is read before the pulls that are watched.
-    const final = finalPass(definition);
-    const watchedFrom = contents.findIndex((each) => each.kind === 'tightening' && each.pass === final);
     await record(play, step, contents.slice(0, watchedFrom), how);
     await readAgain(play, step, contents);
     await record(play, step, contents.slice(watchedFrom), how);
@@ -42,6 +41,13 @@ export async function playStep(play: Play, step: StepDetail, how: PlayedStep): P
   }
   if (disagreement) await redo(play, step, disagreement);
   if (how.isChecked) await countersign(play, step);
+}
+
+/** Where the pulls begin that a second person watches; −1 where none are. */
+function firstWatched({ definition, critical }: StepDetail, contents: readonly EntryContent[]): number {
+  if (!critical || definition.kind !== 'tightening') return -1;
+  const final = finalPass(definition);
+  return contents.findIndex((each) => each.kind === 'tightening' && each.pass === final);
 }
 
 /** Records contents in their order; a wrong one is corrected at once. */
