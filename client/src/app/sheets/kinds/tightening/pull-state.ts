@@ -4,7 +4,7 @@ import type { EntryContent, TighteningStepDefinition } from '@second-spanner/sha
 import { drawTightening, fastenerPositions } from '@second-spanner/shared/drawing/tightening';
 import { convert } from '@second-spanner/shared/quantities/convert';
 import { clicks } from '@second-spanner/shared/sheet/judge-tightening';
-import { lastPass, planOf } from '@second-spanner/shared/sheet/plan-of';
+import { finalPass, lastPass, planOf } from '@second-spanner/shared/sheet/plan-of';
 import { readFigure } from '../../../reading/read-figure';
 import { SessionStore } from '../../../session/session-store';
 import { draft } from '../../drafts/draft';
@@ -35,7 +35,14 @@ export class PullState {
     const definition = this.store.step()?.definition;
     return definition?.kind === 'tightening' ? definition : null;
   });
-  readonly isEntering = computed(() => this.work.isOpen() && this.pull() !== null);
+  /** The last torque pass is shut until the second person has read the wrench. */
+  private readonly awaitsWitness = computed(() => {
+    const [step, definition] = [this.store.step(), this.definition()];
+    if (step === null || definition === null || step.done === step.of) return false;
+    const isAwaited = step.waitsFor.some(({ what }) => what === 'second-check');
+    return isAwaited && this.pull()?.pass === finalPass(definition);
+  });
+  readonly isEntering = computed(() => this.work.isOpen() && this.pull() !== null && !this.awaitsWitness());
   readonly pull = computed(() => {
     const [definition, slot] = [this.definition(), this.work.slot()];
     return definition === null || slot === null ? null : pullOf(definition, slot.key);
