@@ -1,10 +1,20 @@
-import { ChangeDetectionStrategy, Component, computed, inject, input, signal } from '@angular/core';
+import {
+  ChangeDetectionStrategy,
+  Component,
+  computed,
+  inject,
+  input,
+  signal,
+  viewChild,
+  type ElementRef,
+} from '@angular/core';
 import { MatButton } from '@angular/material/button';
 import { Router } from '@angular/router';
 import { toApiProblem, type ApiProblem } from '../http/api-problem';
 import { Mark } from '../layout/mark';
 import { SessionStore } from '../session/session-store';
 import { ProblemLine } from '../states/problem-line';
+import { Sign } from '../verdict/sign';
 import { ownAddress } from './own-address';
 
 /**
@@ -13,7 +23,7 @@ import { ownAddress } from './own-address';
  */
 @Component({
   selector: 'ss-sign-in',
-  imports: [Mark, MatButton, ProblemLine],
+  imports: [Mark, MatButton, ProblemLine, Sign],
   changeDetection: ChangeDetectionStrategy.OnPush,
   templateUrl: './sign-in.html',
   styleUrl: './sign-in.scss',
@@ -25,6 +35,8 @@ export class SignIn {
   /** The address to go to afterwards, from the query. */
   readonly to = input<string>();
 
+  private readonly emailField = viewChild.required<ElementRef<HTMLInputElement>>('emailField');
+  private readonly passwordField = viewChild.required<ElementRef<HTMLInputElement>>('passwordField');
   protected readonly email = signal('');
   protected readonly password = signal('');
   private readonly isTried = signal(false);
@@ -43,7 +55,9 @@ export class SignIn {
   protected signIn(event: Event): void {
     event.preventDefault();
     this.isTried.set(true);
-    if (this.emailError() !== null || this.passwordError() !== null || this.isSigningIn()) return;
+    if (this.emailError() !== null) return this.emailField().nativeElement.focus();
+    if (this.passwordError() !== null) return this.passwordField().nativeElement.focus();
+    if (this.isSigningIn()) return;
     this.problem.set(null);
     this.isSigningIn.set(true);
     this.sessions.signIn({ email: this.email().trim(), password: this.password() }).subscribe({

@@ -1,5 +1,5 @@
 import { HttpClient, httpResource } from '@angular/common/http';
-import { ChangeDetectionStrategy, Component, computed, inject, input, signal } from '@angular/core';
+import { ChangeDetectionStrategy, Component, computed, effect, inject, input, signal } from '@angular/core';
 import { rxResource } from '@angular/core/rxjs-interop';
 import { FormControl, FormGroup, ReactiveFormsModule, Validators, type ValidatorFn } from '@angular/forms';
 import { MatButton } from '@angular/material/button';
@@ -13,6 +13,7 @@ import type { NewSheetRequest, Sheet } from '@second-spanner/shared/contracts/sh
 import type { SpecSummary } from '@second-spanner/shared/contracts/spec';
 import { toApiProblem, type ApiProblem } from '../../http/api-problem';
 import { allPages } from '../../list/all-pages';
+import { SessionStore } from '../../session/session-store';
 import { LoadState } from '../../states/load-state';
 import { ProblemLine } from '../../states/problem-line';
 import { roleNames } from '../../words/names';
@@ -46,6 +47,7 @@ const twoPeople: ValidatorFn = ({ value }) => {
 export class StartSheet {
   private readonly http = inject(HttpClient);
   private readonly router = inject(Router);
+  private readonly sessions = inject(SessionStore);
 
   readonly car = input.required<CarFile>();
 
@@ -61,7 +63,8 @@ export class StartSheet {
       .flatMap(({ code, title, editions }) =>
         editions
           .filter(({ state }) => state === 'approved')
-          .map(({ id, edition }) => ({ id, name: `${title} (${code}), edition ${edition}` })),
+          .toSorted((a, b) => b.edition - a.edition)
+          .map(({ id, edition }) => ({ id, engineCode: code, name: `${title}, edition ${edition}` })),
       );
   });
   protected readonly builders = computed(() => this.thoseWho('entries.record'));
@@ -73,6 +76,17 @@ export class StartSheet {
   );
   protected readonly isStarting = signal(false);
   protected readonly problem = signal<ApiProblem | null>(null);
+
+  constructor() {
+    // What there is little choice about is chosen already; it can be changed.
+    effect(() => {
+      const { specEditionId, builderId } = this.form.controls;
+      const ofThisEngine = this.editions().find(({ engineCode }) => engineCode === this.car().engineCode);
+      if (specEditionId.pristine && ofThisEngine) specEditionId.setValue(ofThisEngine.id);
+      const self = this.builders().find(({ id }) => id === this.sessions.person()?.id);
+      if (builderId.pristine && self?.role === 'builder') builderId.setValue(self.id);
+    });
+  }
 
   protected start(): void {
     this.form.markAllAsTouched();
