@@ -8,10 +8,19 @@ export default defineConfig({
   esbuild: legacyDecorators,
   test: {
     projects: [
-      { extends: true, test: { name: 'unit', include: ['src/**/*.spec.ts'], exclude: ['src/**/*.integration.spec.ts'] } },
       {
         extends: true,
-        test: { name: 'integration', include: ['src/**/*.integration.spec.ts'], fileParallelism: false, testTimeout: 30_000, hookTimeout: 60_000 },
+        test: { name: 'unit', include: ['src/**/*.spec.ts'], exclude: ['src/**/*.integration.spec.ts'] },
+      },
+      {
+        extends: true,
+        test: {
+          name: 'integration',
+          include: ['src/**/*.integration.spec.ts'],
+          fileParallelism: false,
+          testTimeout: 30_000,
+          hookTimeout: 60_000,
+        },
       },
     ],
   },
