@@ -47,6 +47,17 @@ describe('a measurement', () => {
     expect(judgeEntry(endFloat, read(0.007, 'in'), context).verdict).toBe('pass');
   });
 
+  it('prints no digits that only floating point made', () => {
+    // 1 thou = 0.001 in exactly: ±0.15 thou is ±0.00015 in.
+    const inThou: Tool = {
+      ...gauge,
+      uncertainty: { value: 0.15, unit: 'thou' },
+      resolution: { value: 0.1, unit: 'thou' },
+    };
+    const { reason } = judgeEntry(endFloat, read(0.007, 'in'), { ...context, tools: [inThou] });
+    expect(reason).not.toMatch(/\d\.\d{7,}/);
+  });
+
   it('fails a reading past the range of the tool and doubts one made past its calibration', () => {
     const past = judgeEntry(endFloat, read(17), context);
     expect(past.verdict).toBe('fail');

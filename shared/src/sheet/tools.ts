@@ -7,8 +7,11 @@ import { printQuantity } from '../quantities/print.js';
 
 /** Expanded uncertainty of a tool at a reading, in the reading's unit. */
 export function uncertaintyAt(tool: Tool, reading: Quantity): Quantity {
-  if (tool.uncertainty) return convert(tool.uncertainty, reading.unit);
-  return { value: Math.abs(reading.value) * (tool.uncertaintyShare ?? 0), unit: reading.unit };
+  const value = tool.uncertainty
+    ? convert(tool.uncertainty, reading.unit).value
+    : Math.abs(reading.value) * (tool.uncertaintyShare ?? 0);
+  // Without the last digits, which only floating point made, so that a sentence does not print them.
+  return { value: Number(value.toPrecision(12)), unit: reading.unit };
 }
 
 /** The tool of an entry, from the tools of the shop. */
