@@ -47,6 +47,11 @@ export class KeptCopies {
     );
   }
 
+  /** Whether there is a copy from this opening of the page already. */
+  wasReadHere(url: string): boolean {
+    return this.readHere.has(url);
+  }
+
   /** Keeps what was answered to an act in place of what was read before it. */
   async keep(url: string, body: unknown): Promise<void> {
     this.readHere.add(url);

@@ -4,7 +4,7 @@ import type { TrayItem } from '../offline/tray-item';
 
 /**
  * Whether a step may be worked although the api has not opened it yet: all it waits for are steps without a second
- * person, whose missing entries lie in the tray. They go to the api first, as the tray keeps its order.
+ * person, whose missing entries lie in the tray, or which are done by now. They go to the api first, as the tray keeps its order.
  */
 export function opensByTray(
   step: Pick<StepDetail, 'waitsFor' | 'covered' | 'sheetId'>,
@@ -14,6 +14,8 @@ export function opensByTray(
   if (step.covered || step.waitsFor.length === 0) return false;
   return step.waitsFor.every(({ what, code }) => {
     const line = lines.find((each) => each.code === code);
+    // The step's own copy may be older than the sheet's list.
+    if (line?.status === 'done') return true;
     if (what !== 'step' || line === undefined || line.critical || line.openSnags > 0) return false;
     const lying = items.filter(
       ({ sheetId, stepCode, refused }) =>

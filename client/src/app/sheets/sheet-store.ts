@@ -27,7 +27,6 @@ export class SheetStore {
   private readonly wantsSnags = signal(false);
   /** Told of a change while a reading of it was under way: it must be read once more. */
   private readonly isStale = signal(false);
-  private aheadOf: string | null = null;
 
   readonly sheet = rxResource({
     params: () => this.openId() ?? undefined,
@@ -74,8 +73,9 @@ export class SheetStore {
       untracked(() => this.refresh());
     });
     effect(() => {
-      const [id, isRead] = [this.openId(), this.sheet.hasValue()];
-      if (id !== null && isRead) untracked(() => this.readAhead(id));
+      // With every step that is opened, once the step itself is there.
+      const [id, step] = [this.openId(), this.detail.hasValue() ? this.detail.value().code : null];
+      if (id !== null && step !== null && this.sheet.hasValue()) untracked(() => this.readAhead(id));
     });
     this.tray.sent.pipe(takeUntilDestroyed()).subscribe((step) => this.take(step));
   }
@@ -108,17 +108,18 @@ export class SheetStore {
     this.detail.reload();
   }
 
-  /** Once a sheet: copies of the steps that come next, so that they can be opened where there is no network. */
+  /** Copies of the steps that come next, so that they can be opened where there is no network. */
   private readAhead(id: string): void {
-    if (this.aheadOf === id || !this.sessions.may('entries.record')) return;
-    this.aheadOf = id;
-    const ahead = this.lines().filter(({ status }) => status !== 'done');
-    from(ahead.slice(0, stepsAhead))
-      .pipe(
-        concatMap(({ code }) =>
-          this.copies.read<StepDetail>(stepUrl(id, code)).pipe(catchError(() => EMPTY)),
-        ),
-      )
+    if (!this.sessions.may('entries.record')) return;
+    const lines = this.lines();
+    const at = Math.max(
+      0,
+      lines.findIndex(({ code }) => code === this.openCode()),
+    );
+    const ahead = lines.slice(at).filter(({ status }) => status !== 'done');
+    const urls = ahead.slice(0, stepsAhead).map(({ code }) => stepUrl(id, code));
+    from(urls.filter((url) => !this.copies.wasReadHere(url)))
+      .pipe(concatMap((url) => this.copies.read<StepDetail>(url).pipe(catchError(() => EMPTY))))
       .subscribe();
   }
 

@@ -78,6 +78,12 @@ describe('a step that opens by the tray', () => {
     expect(opensByTray(waiting, before(), [at('Main 2', 1), at('Main 3', 2)])).toBe(true);
   });
 
+  it('does so when what it waited for is done by now', () => {
+    const held = stepOf(endFloat, { waitsFor: [{ what: 'hold', code: '3.4', sentence: 'Hold point.' }] });
+    expect(opensByTray(held, before({ critical: true, status: 'done' }), [])).toBe(true);
+    expect(opensByTray(held, before({ critical: true, status: 'to-countersign' }), [])).toBe(false);
+  });
+
   it('never passes a second person by', () => {
     const lying = [at('Main 2', 1), at('Main 3', 2)];
     expect(opensByTray(waiting, before({ critical: true }), lying)).toBe(false);

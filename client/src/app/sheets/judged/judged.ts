@@ -5,6 +5,9 @@ import { VerdictLine } from '../../verdict/verdict';
 
 const ruleMark = ' Rule: ';
 
+/** A judgement's sentence without the rule behind it, for lists. */
+export const withoutRule = (reason: string): string => reason.split(ruleMark)[0] ?? reason;
+
 /** A judgement at the stand: sign, word and sentence; the rule behind it is a touch away. */
 @Component({
   selector: 'ss-judged',

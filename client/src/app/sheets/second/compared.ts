@@ -75,6 +75,7 @@ export class Compared {
   );
   protected readonly toolRows = computed(() => {
     const content = this.own().content;
+    if (this.step().kind !== 'measurement') return null;
     const second = 'toolId' in content ? this.tools.byId(content.toolId) : undefined;
     const firstContent = this.current()[0]?.content;
     const first =

@@ -8,6 +8,7 @@ import { EmptyState } from '../../states/empty-state';
 import { LoadState } from '../../states/load-state';
 import { VerdictLine } from '../../verdict/verdict';
 import { When } from '../../words/dates';
+import { withoutRule } from '../judged/judged';
 import { settlementWords } from '../settlement-words';
 import { SheetHead } from '../sheet/sheet-head';
 import { SheetStore } from '../sheet-store';
@@ -33,6 +34,7 @@ export class SnagsPage {
 
   protected readonly causeWords = causeWords;
   protected readonly settlementWords = settlementWords;
+  protected readonly withoutRule = withoutRule;
   protected readonly heading = computed(() => tradeText('{Snags}', this.sessions.dialect()));
   protected readonly open = computed(() => this.all().filter(({ settled }) => settled === null));
   protected readonly settled = computed(() => this.all().filter(({ settled }) => settled !== null));

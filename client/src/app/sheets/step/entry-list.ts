@@ -7,6 +7,7 @@ import { VerdictLine } from '../../verdict/verdict';
 import { When } from '../../words/dates';
 import { TradeWords } from '../../words/trade-words';
 import { entryWords } from '../entry-words';
+import { withoutRule } from '../judged/judged';
 import type { ShownStep } from '../shown-step';
 import { StepWork } from '../step-work';
 
@@ -26,6 +27,7 @@ export class EntryList {
 
   readonly step = input.required<ShownStep>();
 
+  protected readonly withoutRule = withoutRule;
   protected readonly showAll = signal(false);
   private readonly all = computed(() => {
     const { definition, entries } = this.step();

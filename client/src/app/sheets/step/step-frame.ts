@@ -11,6 +11,7 @@ import { WaitingTray } from '../../offline/waiting-tray';
 import { Sentence } from '../../quantity/sentence';
 import { Sign } from '../../verdict/sign';
 import { TradeWords } from '../../words/trade-words';
+import { withoutRule } from '../judged/judged';
 import { SaveLine } from '../saving/save-line';
 import { SheetHead, type HeadCell } from '../sheet/sheet-head';
 import { stageOf, stepAfter } from '../sheet/stage-progress';
@@ -69,6 +70,7 @@ export class StepFrame {
   protected readonly isDesk = inject(Wide).isDesk;
   protected readonly kindWords = stepKindWords;
   protected readonly settlementWords = settlementWords;
+  protected readonly withoutRule = withoutRule;
 
   protected readonly stageTitle = computed(() => stageOf(this.step().code, this.store.stages())?.title ?? '');
   protected readonly phoneCells = computed<readonly HeadCell[]>(() => [

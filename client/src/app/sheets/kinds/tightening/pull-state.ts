@@ -146,7 +146,7 @@ export class PullState {
                 this.work.slots(),
                 this.pass(),
                 this.isEntering() ? (this.work.slot()?.key ?? null) : null,
-                this.work.following()?.key ?? null,
+                this.isEntering() ? (this.work.following()?.key ?? null) : null,
               ),
         title: this.store.step()?.title,
       },
