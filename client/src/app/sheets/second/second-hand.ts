@@ -79,7 +79,9 @@ export class SecondHand {
     if (!critical || secondCheck === null) return 'No second person checks this step.';
     if (status === 'done') return 'This step is countersigned.';
     if (this.step().entries.length > 0) return 'You recorded on this step: somebody else must check it.';
-    return 'It can’t be checked yet: it is not recorded so far.';
+    return secondCheck === 'setting-and-pull-witnessed'
+      ? 'The wrench is read when the passes before the last one are done.'
+      : 'It can’t be checked yet: not everything on it is recorded and good.';
   });
 
   protected async sayCannot(words: string): Promise<void> {

@@ -179,7 +179,7 @@ export class PullState {
     pullCells(this.definition(), this.pull(), this.tool(), this.unit()),
   );
   readonly deskCells = computed(() => this.cells().desk);
-  readonly phoneCells = computed(() => this.cells().phone);
+  readonly phoneCells = computed(() => (this.isEntering() ? this.cells().phone : []));
   readonly keepWords = computed(() => {
     const [definition, following] = [this.definition(), this.work.following()];
     const done = this.isSet() ? 'Pulled to the click' : 'Keep it';
