@@ -40,6 +40,20 @@ export const addGauge = async (client) => {
   return id;
 };
 
+const sheetsOfCar = 4;
+
+/** One car for every few sheets; the demo's own when they are fewer still. @param {Client} client @param {{ prefix: string, from: number, to: number }} wanted @returns {Promise<string[]>} */
+const addCars = async (client, { prefix, from, to }) => {
+  const added = await client.query(
+    `INSERT INTO cars (id, shop_id, code, name, year, engine_code, engine_number, chassis_number)
+     SELECT gen_random_uuid(), c.shop_id, $1::text || n, c.name, c.year, c.engine_code, c.engine_number, c.chassis_number
+     FROM sheets s JOIN cars c ON c.id = s.car_id, generate_series($2::int, $3::int) n
+     WHERE s.code = 'LM-0147' AND n % ${sheetsOfCar} = 0 RETURNING id`,
+    [prefix, from, to],
+  );
+  return added.rows.map(({ id }) => id);
+};
+
 /**
  * Adds sheets numbered from one number to another, Tomasz their builder.
  * @param {Client} client
@@ -47,19 +61,22 @@ export const addGauge = async (client) => {
  * `state` is SQL over the number `n`
  * @returns {Promise<string[]>} their ids
  */
-export const addSheets = async (client, { prefix, from, to, steps, places, state = "'on-the-stand'" }) => {
+export const addSheets = async (client, wanted) => {
+  const { prefix, from, to, steps, places, state = "'on-the-stand'" } = wanted;
+  const cars = await addCars(client, wanted);
   const added = await client.query(
     `INSERT INTO sheets (id, shop_id, code, state, car_id, spec_edition_id, builder_id, countersigner_id, created_by,
        steps_total, next_step, stages, changed_at, content_hash, verification_code, frozen, released_at)
-     SELECT gen_random_uuid(), s.shop_id, $1::text || n, new.state, s.car_id, s.spec_edition_id, s.builder_id,
-       s.countersigner_id, s.builder_id, $4, '1.1', $5, now() - n * interval '1 hour',
+     SELECT gen_random_uuid(), s.shop_id, $1::text || n, new.state,
+       coalesce(($6::uuid[])[1 + n % ${Math.max(1, cars.length)}], s.car_id), s.spec_edition_id, s.builder_id, s.countersigner_id,
+       s.builder_id, $4, '1.1', $5, now() - n * interval '1 hour',
        CASE new.state WHEN 'released' THEN repeat('0', 64) END,
        CASE new.state WHEN 'released' THEN $1::text || n END,
        CASE new.state WHEN 'released' THEN '{}'::jsonb END,
        CASE new.state WHEN 'released' THEN now() END
      FROM sheets s, generate_series($2::int, $3::int) n, LATERAL (SELECT ${state} AS state) new
      WHERE s.code = 'LM-0147' RETURNING id`,
-    [prefix, from, to, steps, stages],
+    [prefix, from, to, steps, stages, cars],
   );
   const ids = added.rows.map(({ id }) => id);
   await client.query(

@@ -5,7 +5,12 @@ import { setTimeout as pause } from 'node:timers/promises';
 import { withDatabase } from '../lib/sql.js';
 
 /** @typedef {import('./stage.js').Stage} Stage */
-/** @typedef {{ text: string, outline: string }} Plan a query, and how it was worked */
+/**
+ * @typedef {object} Plan
+ * @property {string} text the query
+ * @property {string} outline how it was worked
+ * @property {{ table: string, way: string }[]} ways how each table was reached
+ */
 
 /** @param {Stage} stage @param {string[]} commands */
 const configure = async ({ database }, commands) => {
@@ -62,9 +67,28 @@ const outlineOf = (node) => {
   return `${kind}${at ? ` ${at}` : ''}${below.length > 0 ? ` (${below.join(', ')})` : ''}`;
 };
 
+/** @param {Node} node @returns {string[]} */
+const indexesOf = (node) => [
+  ...(node['Index Name'] ? [String(node['Index Name'])] : []),
+  ...(String(node['Node Type']).startsWith('Bitmap') ? (node.Plans ?? []).flatMap(indexesOf) : []),
+];
+
+/** @param {Node} node @returns {Plan['ways']} */
+const waysOf = (node) => {
+  const table = node['Relation Name'];
+  const here = table
+    ? [{ table: String(table), way: `${node['Node Type']} ${indexesOf(node).sort().join(' ')}`.trim() }]
+    : [];
+  return [...here, ...(node.Plans ?? []).flatMap(waysOf)];
+};
+
 /** The plans that PostgreSQL worked by for one request, in their order. @param {Stage} stage @param {() => Promise<unknown>} request @returns {Promise<Plan[]>} */
 export const plansOf = async (stage, request) =>
   [...(await logOf(stage, request)).matchAll(/ plan:\n((?:\t.*\n)+)/g)].map(([, block = '']) => {
     const told = JSON.parse(block);
-    return { text: told['Query Text'].replace(/\s+/g, ' ').trim(), outline: outlineOf(told['Plan']) };
+    return {
+      text: told['Query Text'].replace(/\s+/g, ' ').trim(),
+      outline: outlineOf(told['Plan']),
+      ways: waysOf(told['Plan']),
+    };
   });
