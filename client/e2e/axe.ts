@@ -23,6 +23,9 @@ export async function expectNoAxeViolations(page: Page): Promise<void> {
   for (const light of ['day', 'lamp']) {
     await page.evaluate((name) => {
       document.body.dataset['light'] = name;
+      // Colours that are still on their way from one light to the other are nobody's.
+      const onTheirWay = document.getAnimations().filter((each) => each instanceof CSSTransition);
+      return Promise.allSettled(onTheirWay.map(({ finished }) => finished));
     }, light);
     const { violations } = await page.evaluate((options) => window.axe.run(options), rules);
     const found = violations.map(({ id, nodes }) => `${id}: ${nodes.map(({ html }) => html).join(' | ')}`);
