@@ -58,6 +58,12 @@ describe('the slot at hand', () => {
     expect(nextSlot(allGood, 'pull/1/4')?.key).toBe('pull/2/1');
   });
 
+  it('takes a fault that was accepted for good, as the api counts it', () => {
+    const pulls = ['1', '2', '3'].map((nut) => pull(1, nut)).concat(pull(1, '4', { verdict: 'fail' }));
+    expect(nextSlot(filledSlots(pumpNuts, pulls, 3))).toBeNull();
+    expect(nextSlot(filledSlots(pumpNuts, pulls, 4))?.key).toBe('pull/2/1');
+  });
+
   it('says beforehand what follows: the next fastener, then the next pass, then nothing', () => {
     const followingOf = (done: readonly ReturnType<typeof pull>[], key: string) => {
       const slots = filledSlots(pumpNuts, done);

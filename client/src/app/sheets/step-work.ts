@@ -51,7 +51,7 @@ export class StepWork {
 
   readonly slots = computed(() => {
     const step = this.step();
-    return step === null ? [] : filledSlots(step.definition, step.entries);
+    return step === null ? [] : filledSlots(step.definition, step.entries, step.done);
   });
   /** What is recorded next; null when nothing is empty. */
   readonly slot = computed(() => {
@@ -61,9 +61,7 @@ export class StepWork {
   });
   /** With nothing empty: what must be recorded once more, if anything. */
   readonly toRepeat = computed(() => {
-    const step = this.step();
-    const isAccepted = step !== null && step.done === step.of && step.openSnags === 0;
-    return this.slot() !== null || isAccepted ? null : failingSlot(this.slots());
+    return this.slot() === null ? failingSlot(this.slots()) : null;
   });
   /** What comes after the slot at hand. */
   readonly following = computed(() => {

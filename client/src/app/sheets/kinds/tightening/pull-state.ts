@@ -19,7 +19,7 @@ import { readAdapter, type AdapterDraft } from './adapter-fields';
 import { withReading } from '../measurement/reading-draft';
 import { isPullDraft, noPull } from './pull-draft';
 import { pullCells } from './pull-cells';
-import { atFastener, fastenerStates, passShown, pullOf, settingFor, slotsOfPass } from './pull';
+import { atFastener, fastenerStates, passShown, pullOf, settingFor, slotsOfPass, toGo } from './pull';
 
 /** The state of a tightening's page: which pull is at hand, what is typed for it, and what follows from that. */
 @Injectable()
@@ -121,6 +121,8 @@ export class PullState {
   });
   readonly toolError = computed(() => this.work.errorAt('content.toolId'));
 
+  /** How many are still to be pulled in the pass, the one at hand among them. */
+  readonly toGo = computed(() => toGo(this.work.slots(), this.pass()));
   readonly passSlots = computed(() => {
     const definition = this.definition();
     if (definition === null) return [];

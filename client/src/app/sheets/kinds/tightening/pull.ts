@@ -28,10 +28,10 @@ export function fastenerStates(
   atHand: string | null,
   following: string | null,
 ): Readonly<Record<string, FastenerState>> {
-  const states = slotsOfPass(slots, pass).map(({ key, entry }): [string, FastenerState] => {
+  const states = slotsOfPass(slots, pass).map(({ key, isGood }): [string, FastenerState] => {
     const fastener = pullOf(definition, key)?.fastener ?? '';
     if (key === atHand) return [fastener, 'in-hand'];
-    if (entry?.verdict === 'pass') return [fastener, 'done'];
+    if (isGood) return [fastener, 'done'];
     return [fastener, key === following ? 'next' : 'to-come'];
   });
   return Object.fromEntries(states);
@@ -71,5 +71,5 @@ export function atFastener(shown: Quantity, tool: Tool, adapter: Adapter | undef
 
 /** How many fasteners are still to be pulled in a pass, the one at hand among them. */
 export function toGo(slots: readonly FilledSlot[], pass: number): number {
-  return slotsOfPass(slots, pass).filter(({ entry }) => entry?.verdict !== 'pass').length;
+  return slotsOfPass(slots, pass).filter(({ isGood }) => !isGood).length;
 }
