@@ -32,6 +32,10 @@ import { VerdictLine } from '../../verdict/verdict';
     </p>
   `,
   styles: `
+    :host {
+      display: block;
+    }
+
     h2 {
       margin: var(--ss-4) 0 6px;
       padding-bottom: 6px;
