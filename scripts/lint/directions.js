@@ -1,5 +1,6 @@
 // Which way imports may point: client → shared ← api; routes → service → repository → entity; in shared,
-// calculations know nothing of sheets, sheets may call calculations, drawings may read their answers.
+// calculations know nothing of sheets, sheets may call calculations, drawings may read their answers, and
+// workings put both before somebody without a sheet.
 // Read by eslint.config.js.
 import { readdirSync } from 'node:fs';
 import { fileURLToPath } from 'node:url';
@@ -39,7 +40,8 @@ const featureWalls = () =>
       message: 'One feature reaches another through its service.',
     }));
 
-const calculations = '!(quantities|drawing|sheet|contracts)';
+const calculations = '!(quantities|drawing|sheet|contracts|workings)';
+const above = ['sheet', 'drawing', 'workings'];
 
 const wall = (targets, sources, message) => ({
   target: targets.map((folder) => `./shared/src/${folder}/**/*.ts`),
@@ -48,10 +50,12 @@ const wall = (targets, sources, message) => ({
 });
 
 const insideShared = [
-  wall([calculations], ['sheet', 'drawing'], 'Calculations know nothing of sheets and drawings.'),
-  wall(['drawing'], ['sheet'], 'A drawing is made from a calculation, not from a sheet.'),
-  wall(['quantities'], [calculations, 'sheet', 'drawing'], 'Quantities stand below everything.'),
-  wall(['contracts'], [calculations, 'sheet', 'drawing'], 'Contracts are types alone.'),
+  wall([calculations], above, 'Calculations know nothing of sheets, drawings and workings.'),
+  wall(['drawing'], ['sheet', 'workings'], 'A drawing is made from a calculation, not from a sheet.'),
+  wall(['workings'], ['sheet'], 'Workings need no sheet.'),
+  wall(['sheet'], ['workings'], 'A sheet asks the calculations themselves.'),
+  wall(['quantities'], [calculations, ...above], 'Quantities stand below everything.'),
+  wall(['contracts'], [calculations, ...above], 'Contracts are types alone.'),
 ];
 
 /** The walls between packages, layers and features, as they stand in the folders at hand. */

@@ -1,0 +1,53 @@
+import { InputError } from '../contracts/input-error.js';
+import type { AnswerPart, Working, WorkingAnswer, WorkingOptions } from './working.js';
+import { inWords } from '../drawing/words.js';
+import { readCase, type CaseReader } from './read-case.js';
+
+export interface WorkedOut {
+  readonly parts: readonly AnswerPart[];
+  readonly assumed?: readonly string[];
+  readonly cautions?: readonly string[];
+}
+
+type Definition = Omit<Working, 'workOut'> & {
+  /** Formula and source with edition and section, one line each. */
+  readonly basis: readonly string[];
+  /**
+   * The calculations of a case that is complete. An `InputError` of theirs is said at the field of the same
+   * path, or where `fieldOf` puts it.
+   */
+  readonly answer: (read: CaseReader, options: WorkingOptions) => WorkedOut;
+  /** Paths of the calculations' requests by the field that they were typed in: `[/^gaps\.driverNear/, 'near']`. */
+  readonly fieldOf?: readonly (readonly [RegExp, string])[];
+};
+
+/** A working whose fields are read, and whose errors are put at their fields, in the same way as all others. */
+export function defineWorking({ answer, basis, fieldOf = [], ...working }: Definition): Working {
+  const fields = working.sections.flatMap((section) => section.fields);
+  return {
+    ...working,
+    workOut: (typed, options): WorkingAnswer => {
+      const { errors, missing, reader } = readCase(fields, typed);
+      const nothing = { parts: [], assumed: [], cautions: [], basis };
+      if (Object.keys(errors).length > 0 || missing.length > 0) {
+        return { ...nothing, errors, missing: sayMissing(missing) };
+      }
+      try {
+        const { parts, assumed = [], cautions = [] } = answer(reader, options);
+        return { errors: {}, missing: null, parts, assumed, cautions, basis };
+      } catch (error) {
+        if (!(error instanceof InputError)) throw error;
+        const path = fieldOf.find(([pattern]) => pattern.test(error.field))?.[1] ?? error.field;
+        return { ...nothing, errors: { [path]: error.message }, missing: null };
+      }
+    },
+  };
+}
+
+function sayMissing(labels: readonly string[]): string | null {
+  return labels.length === 0 ? null : `Still to be filled in: ${inWords(labels.map(lowerFirst))}.`;
+}
+
+/** `Wrench length` as it stands in a sentence; `No. 1` and `M10` stay. */
+const lowerFirst = (label: string): string =>
+  /^[A-Z][a-z]+(?![a-z]*\.)/.test(label) ? label.charAt(0).toLowerCase() + label.slice(1) : label;

@@ -1,0 +1,23 @@
+import type { Working, WorkingGroup } from './working.js';
+
+export interface WorkingEntry {
+  readonly key: string;
+  readonly group: WorkingGroup;
+  readonly title: string;
+  readonly load: () => Promise<Working>;
+}
+
+/** Every working, in the order of its page. Each is loaded when it is opened. */
+export const workings: readonly WorkingEntry[] = [
+  {
+    key: 'convert',
+    group: 'convert',
+    title: 'Convert a figure',
+    load: async () => (await import('./convert.js')).convertWorking,
+  },
+];
+
+/** The entry of a key, or undefined. */
+export function workingNamed(key: string): WorkingEntry | undefined {
+  return workings.find((entry) => entry.key === key);
+}

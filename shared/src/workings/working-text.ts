@@ -1,0 +1,104 @@
+import { tradeText } from '../contracts/trade-words.js';
+import type {
+  AnswerPart,
+  Working,
+  WorkingAnswer,
+  WorkingCase,
+  WorkingField,
+  WorkingOptions,
+} from './working.js';
+import { readRows } from './rows.js';
+
+export interface TypedLine {
+  readonly label: string;
+  readonly value: string;
+}
+
+/** What was typed, as label and value, in the order of the page; fields left open are not there. */
+export function typedLines(working: Working, typed: WorkingCase): readonly TypedLine[] {
+  return working.sections
+    .flatMap((section) => section.fields)
+    .filter((field) => field.when?.(typed) !== false)
+    .map((field) => ({ label: field.label, value: typedValue(field, typed[field.name] ?? '') }))
+    .filter(({ value }) => value !== '');
+}
+
+function typedValue(field: WorkingField, text: string): string {
+  switch (field.kind) {
+    case 'choice': {
+      const value = text === '' ? field.starts : text;
+      return field.choices.find((choice) => choice.value === value)?.words ?? value;
+    }
+    case 'quantity':
+      return /^[^a-zµ°Ω"']*$/i.test(text) && text !== '' ? `${text} ${field.unit}` : text;
+    case 'number':
+      return text === '' ? '' : text + (field.counts === '°' ? '°' : ` ${field.counts}`);
+    case 'turn':
+      return text === '' ? '' : `${text}°`;
+    case 'rows':
+      return readRows(
+        text,
+        field.columns.map(({ name }) => name),
+      )
+        .map((row) =>
+          field.columns
+            .map((column) => typedValue(column, row[column.name] ?? ''))
+            .filter((cell) => cell !== '')
+            .join(' '),
+        )
+        .join('; ');
+    default:
+      return text;
+  }
+}
+
+/** The whole working as plain text, to be copied or mailed. `address` opens the same case again. */
+export function workingText(
+  working: Working,
+  typed: WorkingCase,
+  answer: WorkingAnswer,
+  options: WorkingOptions & { readonly address?: string },
+): string {
+  const lines = [
+    working.title,
+    ...typedLines(working, typed).map(({ label, value }) => `${label}: ${value}`),
+    '',
+    ...answer.parts.flatMap((part) => partLines(part)),
+    ...listed('Assumed', answer.assumed),
+    ...listed('Take care', answer.cautions),
+    ...listed('Worked out by', answer.basis),
+    ...(options.address === undefined ? [] : ['', options.address]),
+  ];
+  return tradeText(lines.join('\n'), options.dialect);
+}
+
+const listed = (what: string, lines: readonly string[]): readonly string[] =>
+  lines.map((line) => `${what}: ${line}`);
+
+const verdictWords = {
+  pass: 'Pass',
+  fail: 'Fail',
+  doubtful: 'Doubtful',
+  'not-judged': 'Not judged',
+} as const;
+
+function partLines(part: AnswerPart): readonly string[] {
+  switch (part.kind) {
+    case 'judgement':
+      return [`${part.of === undefined ? '' : `${part.of}. `}${verdictWords[part.verdict]}: ${part.reason}`];
+    case 'facts':
+      return part.facts.map(
+        ({ name, value, note }) => `${name}: ${value}${note === undefined ? '' : ` (${note})`}`,
+      );
+    case 'table':
+      return [
+        part.heading,
+        part.columns.map(({ name }) => name).join(' | '),
+        ...part.rows.map((row) => row.join(' | ')),
+      ];
+    case 'steps':
+      return [part.heading, ...part.steps.map((step, i) => `${i + 1}. ${step}`)];
+    case 'drawing':
+      return [];
+  }
+}
