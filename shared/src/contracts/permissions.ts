@@ -24,6 +24,7 @@ export const permissions = {
   'build-sheets.read': ['foreman', 'builder', 'countersigner', 'car-owner'],
   'files.read': ['foreman', 'builder', 'countersigner', 'car-owner'],
   'files.write': ['foreman', 'builder', 'countersigner'],
+  'workings.keep': ['foreman', 'builder', 'countersigner'],
 } as const satisfies Record<string, readonly Role[]>;
 
 export type Permission = keyof typeof permissions;
