@@ -10,6 +10,12 @@ export interface WorkingEntry {
 /** Every working, in the order of its page. Each is loaded when it is opened. */
 export const workings: readonly WorkingEntry[] = [
   {
+    key: 'wiring-map',
+    group: 'wiring',
+    title: 'Wiring map',
+    load: async () => (await import('./wiring-map/wiring-map.js')).wiringMapWorking,
+  },
+  {
     key: 'convert',
     group: 'convert',
     title: 'Convert a figure',

@@ -2,8 +2,8 @@ import { inject } from '@angular/core';
 import { takeUntilDestroyed } from '@angular/core/rxjs-interop';
 import { ActivatedRoute, Router } from '@angular/router';
 import { filter } from 'rxjs';
-import { fromQuery, toQuery } from './form/query';
-import type { WiringForm } from './form/wiring-form';
+import { fromQuery, toQuery } from '@second-spanner/shared/workings/wiring-map/query';
+import type { WiringForm } from '@second-spanner/shared/workings/wiring-map/wiring-form';
 
 const own = 'wiring case written to the address';
 

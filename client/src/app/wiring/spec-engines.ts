@@ -6,8 +6,8 @@ import { EMPTY, map, of, shareReplay, type Observable } from 'rxjs';
 import { allPages } from '../list/all-pages';
 import { SessionStore } from '../session/session-store';
 import type { Choice } from './fields/chosen-field';
-import { formOfSpec } from './form/form-of-spec';
-import type { WiringForm } from './form/wiring-form';
+import { formOfSpec } from '@second-spanner/shared/workings/wiring-map/form-of-spec';
+import type { WiringForm } from '@second-spanner/shared/workings/wiring-map/wiring-form';
 
 interface NamedEdition {
   readonly value: string;

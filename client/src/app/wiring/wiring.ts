@@ -5,6 +5,16 @@ import { MatButton } from '@angular/material/button';
 import { tradeText } from '@second-spanner/shared/contracts/trade-words';
 import { drawCap } from '@second-spanner/shared/drawing/cap';
 import { drawSparkStrip } from '@second-spanner/shared/drawing/spark-strip';
+import { rotorWords } from '@second-spanner/shared/workings/wiring-map/fact-words';
+import { toCase } from '@second-spanner/shared/workings/wiring-map/query';
+import { workOut } from '@second-spanner/shared/workings/wiring-map/work-out';
+import {
+  blankForm,
+  isSameEngine,
+  type WiringForm,
+} from '@second-spanner/shared/workings/wiring-map/wiring-form';
+import { wiringMapWorking } from '@second-spanner/shared/workings/wiring-map/wiring-map';
+import { workingText } from '@second-spanner/shared/workings/working-text';
 import { DrawingFigure } from '../drawing/drawing';
 import { toApiProblem, type ApiProblem } from '../http/api-problem';
 import { Cell } from '../layout/cell';
@@ -16,17 +26,13 @@ import { ProblemLine } from '../states/problem-line';
 import { VerdictLine } from '../verdict/verdict';
 import { printMoment } from '../words/dates';
 import { TradeWords } from '../words/trade-words';
-import { caseText } from './answer/case-text';
 import { EngineFacts } from './answer/engine-facts';
-import { rotorWords } from './answer/fact-words';
 import { Judgement } from './answer/judgement';
 import { LeadTable } from './answer/lead-table';
-import { workOut } from './answer/work-out';
 import { caseAddress } from './case-address';
 import { ChosenField } from './fields/chosen-field';
 import { EngineFields } from './fields/engine-fields';
 import { FittedCells } from './fields/fitted-cells';
-import { blankForm, isSameEngine, type WiringForm } from './form/wiring-form';
 import { editionName, SpecEngines } from './spec-engines';
 
 const typedIn = '';
@@ -130,9 +136,15 @@ export class WiringPage {
       ? null
       : drawSparkStrip({ request: { valveTiming, advance }, diagnosis }, this.options());
   });
-  protected readonly text = computed(() =>
-    this.say(caseText(this.answer(), this.engineName(), this.document.location.href)),
-  );
+  protected readonly text = computed(() => {
+    const typed = toCase(this.form());
+    const options = this.options();
+    const answer = wiringMapWorking.workOut(typed, options);
+    return workingText(wiringMapWorking, typed, answer, {
+      ...options,
+      address: this.document.location.href,
+    });
+  });
 
   protected change(changes: Partial<WiringForm>): void {
     this.show({ ...this.form(), ...changes });

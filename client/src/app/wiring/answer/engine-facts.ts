@@ -1,9 +1,9 @@
 import { ChangeDetectionStrategy, Component, computed, input } from '@angular/core';
 import { Sentence } from '../../quantity/sentence';
 import { TradeWords } from '../../words/trade-words';
-import { engineFacts } from './fact-words';
-import type { WiringForm } from '../form/wiring-form';
-import type { WiringAnswer } from './work-out';
+import { engineFacts } from '@second-spanner/shared/workings/wiring-map/fact-words';
+import type { WiringForm } from '@second-spanner/shared/workings/wiring-map/wiring-form';
+import type { WiringAnswer } from '@second-spanner/shared/workings/wiring-map/work-out';
 
 /** What the engine has, to be read: while its fields are closed, and on paper. */
 @Component({

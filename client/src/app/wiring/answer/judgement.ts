@@ -1,13 +1,17 @@
 import { ChangeDetectionStrategy, Component, computed, input } from '@angular/core';
 import { cureInWords } from '@second-spanner/shared/ignition/cure-in-words';
-import { causeTitles, swapCaption, swapLines } from '../../sheets/kinds/wiring/diagnosis-words';
+import {
+  causeTitles,
+  swapCaption,
+  swapLines,
+} from '@second-spanner/shared/workings/wiring-map/diagnosis-words';
 import { CautionSign } from '../../sheets/step/caution-sign';
 import { Sentence } from '../../quantity/sentence';
 import { signOf, signWords } from '../../verdict/signs';
 import { VerdictLine } from '../../verdict/verdict';
 import { TradeWords } from '../../words/trade-words';
-import { spoken } from './spoken';
-import type { WiringAnswer } from './work-out';
+import { spoken } from '@second-spanner/shared/workings/wiring-map/spoken';
+import type { WiringAnswer } from '@second-spanner/shared/workings/wiring-map/work-out';
 
 /** What is said of the leads as fitted: verdict, cause, the swaps that cure it, cautions. Before that, of the map. */
 @Component({

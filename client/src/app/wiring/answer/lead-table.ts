@@ -3,7 +3,11 @@ import type { CapDiagnosis, CapMap } from '@second-spanner/shared/contracts/calc
 import { Sentence } from '../../quantity/sentence';
 import { Sign } from '../../verdict/sign';
 import { TradeWords } from '../../words/trade-words';
-import { companionWords, intervalWords, leadRows } from './map-words';
+import {
+  companionWords,
+  intervalWords,
+  leadRows,
+} from '@second-spanner/shared/workings/wiring-map/map-words';
 
 /** Which lead goes where, in the order in which the rotor meets the posts; with what is fitted, what comes of it. */
 @Component({

@@ -1,6 +1,10 @@
 import { ChangeDetectionStrategy, Component, computed, input, output } from '@angular/core';
-import type { FormPost } from '../form/cap-of-form';
-import { valveFields, type FormErrors, type WiringForm } from '../form/wiring-form';
+import type { FormPost } from '@second-spanner/shared/workings/wiring-map/cap-of-form';
+import {
+  valveFields,
+  type FormErrors,
+  type WiringForm,
+} from '@second-spanner/shared/workings/wiring-map/wiring-form';
 import { ChosenField, type Choice } from './chosen-field';
 import { TraceFields } from './trace-fields';
 import { TypedField } from './typed-field';

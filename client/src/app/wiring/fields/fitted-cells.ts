@@ -1,6 +1,6 @@
 import { ChangeDetectionStrategy, Component, computed, input, output } from '@angular/core';
 import type { CapDiagnosis, CapMap, Cylinder } from '@second-spanner/shared/contracts/calculations';
-import type { Place } from '../answer/work-out';
+import type { Place } from '@second-spanner/shared/workings/wiring-map/work-out';
 import { Sentence } from '../../quantity/sentence';
 import { Sign } from '../../verdict/sign';
 import { TradeWords } from '../../words/trade-words';

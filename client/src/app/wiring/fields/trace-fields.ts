@@ -2,7 +2,7 @@ import { ChangeDetectionStrategy, Component, input, output } from '@angular/core
 import { Sentence } from '../../quantity/sentence';
 import { Sign } from '../../verdict/sign';
 import { TradeWords } from '../../words/trade-words';
-import type { FormPost } from '../form/cap-of-form';
+import type { FormPost } from '@second-spanner/shared/workings/wiring-map/cap-of-form';
 
 /** The cap traced, post to outlet: posts by angle, outlets by letter. */
 @Component({

@@ -11,7 +11,13 @@ import { SessionStore } from '../../../session/session-store';
 import { VerdictLine } from '../../../verdict/verdict';
 import { TradeWords } from '../../../words/trade-words';
 import { CautionSign } from '../../step/caution-sign';
-import { causeTitles, sparkWords, swapCaption, swapLines, thenWords } from './diagnosis-words';
+import {
+  causeTitles,
+  sparkWords,
+  swapCaption,
+  swapLines,
+  thenWords,
+} from '@second-spanner/shared/workings/wiring-map/diagnosis-words';
 
 /** What is fitted against the map: which mistake it is, the fewest swaps that cure it, and what each spark would do. */
 @Component({

@@ -1,7 +1,7 @@
 import { describe, expect, it } from 'vitest';
 import { diagnoseWiring } from '@second-spanner/shared/sheet/judge-wiring';
 import { wiring } from '../../testing/steps';
-import { sparkWords, swapLines, thenWords } from './diagnosis-words';
+import { sparkWords, swapLines, thenWords } from '@second-spanner/shared/workings/wiring-map/diagnosis-words';
 import { cylindersByOutlet, cylindersOf, isFittedDraft, outletsOf } from './fitted';
 
 describe('what is fitted', () => {

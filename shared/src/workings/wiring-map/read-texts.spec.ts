@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { readAngles, readIntervals, readNumber, readOrder } from './read-texts';
+import { readAngles, readIntervals, readNumber, readOrder } from './read-texts.js';
 
 // How the trade writes orders and angles: common practice, no source.
 describe('reading what is typed about a cap', () => {

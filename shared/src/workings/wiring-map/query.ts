@@ -1,11 +1,11 @@
-import type { Params } from '@angular/router';
-import { blankForm, valveFields, type WiringForm } from './wiring-form';
+import type { WorkingCase } from '../working.js';
+import { blankForm, valveFields, type WiringForm } from './wiring-form.js';
 
 /** What reads one parameter of the address. */
 export type ReadParameter = (name: string) => string | null;
 
 /** The whole case as parameters of the address, readable; what is as on a blank page is left out. */
-export function toQuery(form: WiringForm): Params {
+export function toQuery(form: WiringForm): Readonly<Record<string, string | null>> {
   const given = (value: string): string | null => (value.trim() === '' ? null : value.trim());
   const valves = valveFields.map((field) => form[field].trim());
   return {
@@ -25,6 +25,13 @@ export function toQuery(form: WiringForm): Params {
     valves: valves.every((value) => value === '') ? null : valves.join('_'),
     fitted: given(pairsIn(form.fitted)),
   };
+}
+
+/** The same as the case of the working: only what is there. */
+export function toCase(form: WiringForm): WorkingCase {
+  return Object.fromEntries(
+    Object.entries(toQuery(form)).filter((pair): pair is [string, string] => pair[1] !== null),
+  );
 }
 
 /** The case that an address holds. What is missing is as on a blank page; what cannot be read stays as typed. */

@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest';
-import { blankForm, type WiringForm } from '../form/wiring-form';
-import { workOut } from './work-out';
+import { blankForm, type WiringForm } from './wiring-form.js';
+import { workOut } from './work-out.js';
 
 const four: WiringForm = {
   ...blankForm,

@@ -1,8 +1,8 @@
-import type { SpecEdition } from '@second-spanner/shared/contracts/spec';
+import type { SpecEdition } from '../../contracts/spec.js';
 import { describe, expect, it } from 'vitest';
-import { workOut } from '../answer/work-out';
-import { formOfSpec } from './form-of-spec';
-import { isSameEngine } from './wiring-form';
+import { workOut } from './work-out.js';
+import { formOfSpec } from './form-of-spec.js';
+import { isSameEngine } from './wiring-form.js';
 
 // The demo's side-outlet four; only what a wiring map is made of.
 const edition = (posts: readonly (readonly [string, number])[]): SpecEdition =>

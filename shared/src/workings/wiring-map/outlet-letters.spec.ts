@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { outletLetters } from './outlet-letters';
+import { outletLetters } from './outlet-letters.js';
 
 describe('letters of the outlets beside the posts', () => {
   // The side-outlet cap as the design draws it: A and B down the left, C and D down the right.

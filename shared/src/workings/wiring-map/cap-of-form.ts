@@ -1,14 +1,9 @@
-import type {
-  CapMapRequest,
-  CapPost,
-  Cylinder,
-  Rotation,
-} from '@second-spanner/shared/contracts/calculations';
-import { degrees } from '@second-spanner/shared/drawing/cap-input';
-import { mostCylinders } from '@second-spanner/shared/ignition/firing-order';
-import { outletLetters } from './outlet-letters';
-import { readAngles, readIntervals, readNumber, readOrder } from './read-texts';
-import type { FormErrors, FormField, WiringForm } from './wiring-form';
+import type { CapMapRequest, CapPost, Cylinder, Rotation } from '../../contracts/calculations.js';
+import { degrees } from '../../drawing/cap-input.js';
+import { mostCylinders } from '../../ignition/firing-order.js';
+import { outletLetters } from './outlet-letters.js';
+import { readAngles, readIntervals, readNumber, readOrder } from './read-texts.js';
+import type { FormErrors, FormField, WiringForm } from './wiring-form.js';
 
 /** A post as the page names it: by its angle; and the outlet that stands beside it. */
 export interface FormPost {

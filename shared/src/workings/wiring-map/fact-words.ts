@@ -1,6 +1,6 @@
-import { degrees } from '@second-spanner/shared/drawing/cap-input';
-import type { WiringForm } from '../form/wiring-form';
-import type { WiringAnswer } from './work-out';
+import { degrees } from '../../drawing/cap-input.js';
+import type { WiringForm } from './wiring-form.js';
+import type { WiringAnswer } from './work-out.js';
 
 /** A caption and what stands under it. Both may hold trade-word tokens. */
 export interface Fact {

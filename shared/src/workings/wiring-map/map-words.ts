@@ -1,11 +1,6 @@
-import type {
-  CapMap,
-  CapMapRow,
-  CylinderSpark,
-  CapDiagnosis,
-} from '@second-spanner/shared/contracts/calculations';
-import { degrees } from '@second-spanner/shared/drawing/cap-input';
-import { sparkWords } from '../../sheets/kinds/wiring/diagnosis-words';
+import type { CapMap, CapMapRow, CylinderSpark, CapDiagnosis } from '../../contracts/calculations.js';
+import { degrees } from '../../drawing/cap-input.js';
+import { sparkWords } from './diagnosis-words.js';
 
 /** One row of the lead table, as words. All may hold trade-word tokens. */
 export interface LeadRow {

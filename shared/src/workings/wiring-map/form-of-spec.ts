@@ -1,11 +1,15 @@
-import type { SpecEdition } from '@second-spanner/shared/contracts/spec';
-import { degrees } from '@second-spanner/shared/drawing/cap-input';
-import { outletLetters } from './outlet-letters';
-import { blankForm, type WiringForm } from './wiring-form';
+import type { SpecDocument, SpecEdition } from '../../contracts/spec.js';
+import { degrees } from '../../drawing/cap-input.js';
+import { outletLetters } from './outlet-letters.js';
+import { blankForm, type WiringForm } from './wiring-form.js';
+
+/** The engine of an edition as a form that names it, with nothing fitted. */
+export function formOfSpec({ code, edition, document }: SpecEdition): WiringForm {
+  return { ...formOfDocument(document), spec: code, edition: String(edition) };
+}
 
 /** The engine of a spec as a form, with nothing fitted. */
-export function formOfSpec({ code, edition, document }: SpecEdition): WiringForm {
-  const { engine, ignition, valveTrain } = document;
+export function formOfDocument({ engine, ignition, valveTrain }: SpecDocument): WiringForm {
   const posts = ignition.posts.value;
   const trace = ignition.trace?.value;
   const keys = new Map(posts.map(({ post, angle }) => [post, degrees(angle)]));
@@ -15,8 +19,6 @@ export function formOfSpec({ code, edition, document }: SpecEdition): WiringForm
   const timing = valveTrain.timing.value;
   return {
     ...blankForm,
-    spec: code,
-    edition: String(edition),
     cylinders: String(engine.cylinders.value),
     order: engine.firingOrder.value.join('-'),
     turns: ignition.rotation.value,

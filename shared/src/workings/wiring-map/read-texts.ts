@@ -1,4 +1,4 @@
-import type { Cylinder } from '@second-spanner/shared/contracts/calculations';
+import type { Cylinder } from '../../contracts/calculations.js';
 
 /** A typed number, with a point or a comma; null where it is none. */
 export function readNumber(text: string): number | null {

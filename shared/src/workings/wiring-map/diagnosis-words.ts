@@ -1,4 +1,4 @@
-import type { CapDiagnosis, CylinderSpark, WiringCause } from '@second-spanner/shared/contracts/calculations';
+import type { CapDiagnosis, CylinderSpark, WiringCause } from '../../contracts/calculations.js';
 
 /** The title of a diagnosis. May hold trade-word tokens. */
 export const causeTitles: Record<WiringCause, string> = {

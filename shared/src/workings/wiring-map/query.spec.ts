@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest';
-import { fromQuery, toQuery } from './query';
-import { blankForm, type WiringForm } from './wiring-form';
+import { fromQuery, toQuery } from './query.js';
+import { blankForm, type WiringForm } from './wiring-form.js';
 
 const through = (form: WiringForm): WiringForm => {
   const query = toQuery(form);

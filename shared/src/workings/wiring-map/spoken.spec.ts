@@ -1,6 +1,6 @@
-import { tradeText } from '@second-spanner/shared/contracts/trade-words';
+import { tradeText } from '../../contracts/trade-words.js';
 import { describe, expect, it } from 'vitest';
-import { spoken } from './spoken';
+import { spoken } from './spoken.js';
 
 describe('sentences of the calculations in the person’s trade words', () => {
   it('have the words of the dialect, and the verb to lead stays', () => {

@@ -1,4 +1,4 @@
-import type { Rotation, Side } from '@second-spanner/shared/contracts/calculations';
+import type { Rotation, Side } from '../../contracts/calculations.js';
 
 /** What is typed about an engine's cap and its leads: texts as they were typed, until they are read. */
 export interface WiringForm {

@@ -4,14 +4,14 @@ import type {
   CapMapRequest,
   Cylinder,
   ValveTiming,
-} from '@second-spanner/shared/contracts/calculations';
-import { InputError } from '@second-spanner/shared/contracts/input-error';
-import { degrees } from '@second-spanner/shared/drawing/cap-input';
-import { capDiagnosis } from '@second-spanner/shared/ignition/cap-diagnosis';
-import { capMap } from '@second-spanner/shared/ignition/cap-map';
-import { readForm, type ReadForm } from '../form/cap-of-form';
-import { readNumber } from '../form/read-texts';
-import { valveFields, type FormErrors, type FormField, type WiringForm } from '../form/wiring-form';
+} from '../../contracts/calculations.js';
+import { InputError } from '../../contracts/input-error.js';
+import { degrees } from '../../drawing/cap-input.js';
+import { capDiagnosis } from '../../ignition/cap-diagnosis.js';
+import { capMap } from '../../ignition/cap-map.js';
+import { readForm, type ReadForm } from './cap-of-form.js';
+import { readNumber } from './read-texts.js';
+import { valveFields, type FormErrors, type FormField, type WiringForm } from './wiring-form.js';
 
 /** A place where a lead is plugged in, as the page names it. */
 export interface Place {
