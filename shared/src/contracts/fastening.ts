@@ -50,8 +50,11 @@ export interface ThreadFigures {
   readonly diameter: Quantity;
   readonly pitch: Quantity;
   readonly pitchDiameter: Quantity;
+  /** Of the bolt, at the root of its thread. */
   readonly minorDiameter: Quantity;
   readonly stressArea: Quantity;
+  /** Threads an inch, of inch threads. */
+  readonly perInch?: number;
 }
 
 export interface WrenchSuitsRequest {
