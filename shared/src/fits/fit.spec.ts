@@ -3,7 +3,7 @@ import { describe, expect, it } from 'vitest';
 import type { FitRequest } from '../contracts/fits.js';
 import { InputError } from '../contracts/input-error.js';
 import { convert } from '../quantities/convert.js';
-import { fit } from './fit.js';
+import { fit as fitOf } from './fit.js';
 
 const mm = (value: number) => ({ value, unit: 'mm' }) as const;
 const classes = (size: number, hole: string, shaft: string): FitRequest => ({
@@ -23,7 +23,7 @@ describe('a fit by classes', () => {
     // T5-026.
     [18, 'H7', 'k6', 'transition', -12, 17],
   ] as const)('%d mm %s/%s', (size, hole, shaft, kind, least, most) => {
-    const answer = fit(classes(size, hole, shaft));
+    const answer = fitOf(classes(size, hole, shaft));
     expect(answer.kind).toBe(kind);
     expect(answer.least.unit).toBe('mm');
     expect(answer.least.value * 1000).toBeCloseTo(least, 9);
@@ -32,7 +32,7 @@ describe('a fit by classes', () => {
 
   it('takes a size in inches and answers in them', () => {
     // 0.787 402 in is 20 mm within a nanometre: the band over 18 to 30 mm.
-    const { least } = fit({
+    const { least } = fitOf({
       hole: { size: { value: 20 / 25.4, unit: 'in' }, class: 'H7' },
       shaft: { low: mm(19.98), high: mm(20) },
     });
@@ -43,7 +43,7 @@ describe('a fit by classes', () => {
 describe('a fit by limits', () => {
   it('is the difference of the sizes whatever their units', () => {
     // 1 in = 25.4 mm exactly.
-    const answer = fit({
+    const answer = fitOf({
       hole: { low: { value: 1, unit: 'in' }, high: { value: 1.001, unit: 'in' } },
       shaft: { low: mm(25.3), high: mm(25.4) },
     });
@@ -58,9 +58,9 @@ describe('a fit by limits', () => {
       .map(([low, width]) => ({ low: mm(low), high: mm(low + width) }));
     fc.assert(
       fc.property(limits, limits, (hole, shaft) => {
-        const { least, most } = fit({ hole, shaft });
+        const { least, most } = fitOf({ hole, shaft });
         expect(least.value).toBeLessThanOrEqual(most.value);
-        const turned = fit({ hole: shaft, shaft: hole });
+        const turned = fitOf({ hole: shaft, shaft: hole });
         expect(convert(turned.least, 'mm').value).toBeCloseTo(-most.value, 9);
       }),
     );
@@ -90,7 +90,7 @@ describe('input that cannot be used', () => {
     ['hole.size', hole({ class: 'H7' })],
     ['shaft.class', { ...good, shaft: { size: mm(20), class: 'P6' } }],
   ])('%s', (field, request) => {
-    expect(() => fit(request as FitRequest)).toThrow(InputError);
-    expect(() => fit(request as FitRequest)).toThrow(expect.objectContaining({ field }));
+    expect(() => fitOf(request as FitRequest)).toThrow(InputError);
+    expect(() => fitOf(request as FitRequest)).toThrow(expect.objectContaining({ field }));
   });
 });
