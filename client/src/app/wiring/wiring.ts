@@ -6,7 +6,7 @@ import { tradeText } from '@second-spanner/shared/contracts/trade-words';
 import { drawCap } from '@second-spanner/shared/drawing/cap';
 import { drawSparkStrip } from '@second-spanner/shared/drawing/spark-strip';
 import { rotorWords } from '@second-spanner/shared/workings/wiring-map/fact-words';
-import { toCase } from '@second-spanner/shared/workings/wiring-map/query';
+import { fromQuery, toCase } from '@second-spanner/shared/workings/wiring-map/query';
 import { workOut } from '@second-spanner/shared/workings/wiring-map/work-out';
 import {
   blankForm,
@@ -16,6 +16,7 @@ import {
 import { wiringMapWorking } from '@second-spanner/shared/workings/wiring-map/wiring-map';
 import { workingText } from '@second-spanner/shared/workings/working-text';
 import { DrawingFigure } from '../drawing/drawing';
+import { ChosenField } from '../fields/chosen-field';
 import { toApiProblem, type ApiProblem } from '../http/api-problem';
 import { Cell } from '../layout/cell';
 import { TitleBlock } from '../layout/title-block';
@@ -26,14 +27,14 @@ import { ProblemLine } from '../states/problem-line';
 import { VerdictLine } from '../verdict/verdict';
 import { printMoment } from '../words/dates';
 import { TradeWords } from '../words/trade-words';
+import { caseAddress } from '../workings/case-address';
+import { editionName, SpecEditions } from '../workings/spec-editions';
 import { EngineFacts } from './answer/engine-facts';
 import { Judgement } from './answer/judgement';
 import { LeadTable } from './answer/lead-table';
-import { caseAddress } from './case-address';
-import { ChosenField } from './fields/chosen-field';
 import { EngineFields } from './fields/engine-fields';
 import { FittedCells } from './fields/fitted-cells';
-import { editionName, SpecEngines } from './spec-engines';
+import { SpecEngines } from './spec-engines';
 
 const typedIn = '';
 const longestInHead = 16;
@@ -58,7 +59,7 @@ const longestInHead = 16;
     TradeWords,
     VerdictLine,
   ],
-  providers: [SpecEngines],
+  providers: [SpecEditions, SpecEngines],
   changeDetection: ChangeDetectionStrategy.OnPush,
   templateUrl: './wiring.html',
   styleUrl: './wiring.scss',
@@ -75,7 +76,8 @@ export class WiringPage {
   protected readonly problem = signal<ApiProblem | null>(null);
   protected readonly copied = signal<'yes' | 'by-hand' | null>(null);
 
-  private readonly address = caseAddress((form) => {
+  private readonly address = caseAddress((typed) => {
+    const form = fromQuery((name) => typed[name] ?? null);
     this.form.set(form);
     this.engineOpen.set(workOut(form).map === null);
   });
@@ -185,7 +187,7 @@ export class WiringPage {
   private show(form: WiringForm): void {
     this.copied.set(null);
     this.form.set(form);
-    this.address.write(form);
+    this.address.write(toCase(form));
   }
 
   private say(text: string): string {

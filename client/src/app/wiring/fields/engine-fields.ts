@@ -5,9 +5,9 @@ import {
   type FormErrors,
   type WiringForm,
 } from '@second-spanner/shared/workings/wiring-map/wiring-form';
-import { ChosenField, type Choice } from './chosen-field';
+import { ChosenField, type Choice } from '../../fields/chosen-field';
 import { TraceFields } from './trace-fields';
-import { TypedField } from './typed-field';
+import { TypedField } from '../../fields/typed-field';
 
 const valveLabels: Readonly<Record<(typeof valveFields)[number], string>> = {
   ivo: '{Inlet} opens, before TDC',

@@ -1,7 +1,7 @@
 import { ChangeDetectionStrategy, Component, input, output } from '@angular/core';
-import { Sentence } from '../../quantity/sentence';
-import { Sign } from '../../verdict/sign';
-import { TradeWords } from '../../words/trade-words';
+import { Sentence } from '../quantity/sentence';
+import { Sign } from '../verdict/sign';
+import { TradeWords } from '../words/trade-words';
 
 let fields = 0;
 
