@@ -1,13 +1,12 @@
 import { InputError } from '../contracts/input-error.js';
 import type { TighteningStep } from '../contracts/calculations.js';
-import type { Quantity } from '../contracts/quantity.js';
+import type { Quantity, Unit } from '../contracts/quantity.js';
 import type { Tool, ToolKind } from '../contracts/registers.js';
 import type { Adapter, EntryContent, TighteningStepDefinition } from '../contracts/steps.js';
 import type { Judgement } from '../contracts/verdict.js';
+import { judgePull } from '../fastening/judge-pull.js';
 import { wrenchSetting } from '../fastening/wrench-setting.js';
-import { limitDecision } from '../measuring/limit-decision.js';
-import { convert, toSi } from '../quantities/convert.js';
-import { printQuantity } from '../quantities/print.js';
+import { convert } from '../quantities/convert.js';
 import { requireNumber, requireQuantity } from '../quantities/require.js';
 import type { JudgingContext } from './judging-context.js';
 import { planStep } from './plan-of.js';
@@ -65,9 +64,7 @@ export function judgeTightening(
     throw new InputError('content.toolId', `${tool.name} ${tool.code} is not a torque wrench.`);
   }
   if (!step.target) throw new InputError('content.pass', `Pass ${content.pass} has no torque.`);
-  return clicks(tool)
-    ? judgeSetting(step, step.target, tool, content, context)
-    : judgeReading(step, step.target, tool, content, context);
+  return judgeWrench(step, step.target, tool, content, context);
 }
 
 function judgeAngle(wanted: number, content: Content): Judgement {
@@ -78,74 +75,40 @@ function judgeAngle(wanted: number, content: Content): Judgement {
     : { verdict: 'fail', reason: `Turned ${turned}°, which is ${off}° from the ${wanted}° wanted.` };
 }
 
-/** A click wrench proves its setting, not a reading: setting, range, class and date are judged. */
-function judgeSetting(
-  step: TighteningStep,
+/** A click wrench is judged by its setting to half a division, the others by what they show. */
+function judgeWrench(
+  { low, high }: TighteningStep,
   target: Quantity,
   tool: Tool,
   content: Content,
   context: JudgingContext,
 ): Judgement {
-  const setting = requireQuantity(content.setting, 'torque', 'content.setting', { zero: false });
-  const required = convert(requiredSetting(target, tool, content.adapter), setting.unit);
-  const ofTool = toolJudgement(tool, setting, context.on);
+  const shown = clicks(tool)
+    ? requireQuantity(content.setting, 'torque', 'content.setting', { zero: false })
+    : requireQuantity(content.reading, 'torque', 'content.reading', { zero: false });
+  const wanted = convert(requiredSetting(target, tool, content.adapter), shown.unit);
+  const ofTool = toolJudgement(tool, shown, context.on);
   if (ofTool) return ofTool;
-  const resolution = convert(tool.resolution, setting.unit).value;
-  if (Math.abs(setting.value - required.value) > resolution / 2 + 1e-9) {
-    return {
-      verdict: 'fail',
-      reason: `${tool.code} stands at ${printQuantity(setting)} and must be set to ${printQuantity(required)}.`,
-    };
-  }
-  return judgeAtFastener(
-    step,
-    tool,
-    content,
-    setting,
-    `Set to ${printQuantity(setting)}, pulled once to the click.`,
-  );
-}
-
-function judgeReading(
-  step: TighteningStep,
-  target: Quantity,
-  tool: Tool,
-  content: Content,
-  context: JudgingContext,
-): Judgement {
-  const reading = requireQuantity(content.reading, 'torque', 'content.reading', { zero: false });
-  const ofTool = toolJudgement(tool, reading, context.on);
-  if (ofTool) return ofTool;
-  if (step.low || step.high) return judgeAtFastener(step, tool, content, reading);
-  const aim = convert(requiredSetting(target, tool, content.adapter), reading.unit);
-  const allowed = aim.value * Math.max(permissibleShare, toSi(uncertaintyAt(tool, aim)) / toSi(aim));
-  const within = Math.abs(reading.value - aim.value) <= allowed;
-  const band = printQuantity({ value: allowed, unit: reading.unit });
-  return {
-    verdict: within ? 'pass' : 'fail',
-    reason: `${printQuantity(reading)} is ${within ? 'within' : 'not within'} ${band} of ${printQuantity(aim)}, the wrench's own allowance; this pass has no limits of its own.`,
-  };
-}
-
-/** Carries what the wrench shows through the adapter to the fastener, and judges it there. */
-function judgeAtFastener(
-  step: TighteningStep,
-  tool: Tool,
-  content: Content,
-  shown: Quantity,
-  passing?: string,
-): Judgement {
-  if (!step.low && !step.high) return { verdict: 'pass', reason: passing ?? '' };
-  const unit: Quantity = { value: 1, unit: shown.unit };
-  const factor = requiredSetting(unit, tool, content.adapter).value;
-  const value: Quantity = { value: shown.value / factor, unit: shown.unit };
-  const decision = limitDecision({
-    value,
-    ...(step.low && { low: step.low }),
-    ...(step.high && { high: step.high }),
-    uncertainty: uncertaintyAt(tool, value),
+  const one: Quantity = { value: 1, unit: shown.unit };
+  return judgePull({
+    wrench: tool.code,
+    clicks: clicks(tool),
+    shown,
+    wanted,
+    lever: requiredSetting(one, tool, content.adapter).value,
+    low,
+    high,
+    uncertaintyAt: (torque) => uncertaintyAt(tool, torque),
+    allowed: clicks(tool) ? halfDivision(tool, shown.unit) : allowanceAt(tool, wanted),
   });
-  return passing && decision.verdict === 'pass'
-    ? { verdict: 'pass', reason: `${passing} ${decision.reason}` }
-    : decision;
+}
+
+function halfDivision(tool: Tool, unit: Unit): Quantity {
+  return { value: convert(tool.resolution, unit).value / 2, unit };
+}
+
+/** How far a reading without printed limits may be off: what the wrench is good to, or its class if that is more. */
+function allowanceAt(tool: Tool, wanted: Quantity): Quantity {
+  const ofClass = wanted.value * permissibleShare;
+  return { value: Math.max(ofClass, uncertaintyAt(tool, wanted).value), unit: wanted.unit };
 }
