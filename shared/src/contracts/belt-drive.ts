@@ -103,6 +103,8 @@ export interface BeltTensionRequest extends BeltLengthRequest {
   readonly measured?: Quantity;
   /** Allowed share of the wanted deflection either way (0.1). */
   readonly tolerance?: number;
+  /** The maker's own figures of the deflection, instead of a share of the span. */
+  readonly limits?: { readonly low: Quantity; readonly high: Quantity };
 }
 
 export interface BeltTension extends Judgement {
