@@ -116,6 +116,12 @@ export function requireOneOf<T extends string | number>(
   return found;
 }
 
+/** An unknown input as true or false. Throws `InputError` on `field`. */
+export function requireYesOrNo(input: unknown, field: string): boolean {
+  if (typeof input === 'boolean') return input;
+  throw new InputError(field, 'This must be true or false.');
+}
+
 function readQuantity(input: unknown, field: string, kind?: Kind): Quantity {
   const example = `a value with its unit, such as { "value": 1, "unit": "${units[kind ?? 'torque'][0]}" }`;
   if (typeof input !== 'object' || input === null || Array.isArray(input)) {

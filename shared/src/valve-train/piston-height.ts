@@ -10,23 +10,32 @@ export interface CrankThrow {
   readonly unit: Quantity['unit'];
 }
 
+const more = { zero: false };
+
 /**
- * Stroke and rod length (centre to centre) read from a request; undefined unless both are known.
+ * Stroke and rod length (centre to centre) read from a request.
  *
+ * @param within path of the two inside a larger request, such as `timing`
  * @throws InputError on `stroke` or `rodLength`, each more than zero and the rod longer than half the stroke
  */
-export function requireCrankThrow(stroke: unknown, rodLength: unknown): CrankThrow | undefined {
-  const whole =
-    stroke === undefined ? undefined : requireQuantity(stroke, 'length', 'stroke', { zero: false });
-  const rod =
-    rodLength === undefined ? undefined : requireQuantity(rodLength, 'length', 'rodLength', { zero: false });
-  if (!whole || !rod) return undefined;
-  const radius = whole.value / 2;
-  const length = convert(rod, whole.unit).value;
-  if (length <= radius) {
-    throw new InputError('rodLength', 'The rod must be longer than half the stroke.');
+export function requireCrankThrow(stroke: unknown, rodLength: unknown, within?: string): CrankThrow {
+  const at = (field: string): string => (within === undefined ? field : `${within}.${field}`);
+  const { value, unit } = requireQuantity(stroke, 'length', at('stroke'), more);
+  const centres = requireQuantity(rodLength, 'length', at('rodLength'), more);
+  const radius = value / 2;
+  const rod = convert(centres, unit).value;
+  if (rod <= radius) {
+    throw new InputError(at('rodLength'), 'The rod must be longer than half the stroke.');
   }
-  return { radius, rod: length, unit: whole.unit };
+  return { radius, rod, unit };
+}
+
+/** As `requireCrankThrow`; undefined unless both are known. One that is known alone is still checked. */
+export function knownCrankThrow(stroke: unknown, rodLength: unknown): CrankThrow | undefined {
+  if (stroke !== undefined && rodLength !== undefined) return requireCrankThrow(stroke, rodLength);
+  if (stroke !== undefined) requireQuantity(stroke, 'length', 'stroke', more);
+  if (rodLength !== undefined) requireQuantity(rodLength, 'length', 'rodLength', more);
+  return undefined;
 }
 
 /**

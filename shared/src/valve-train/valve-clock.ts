@@ -1,8 +1,9 @@
-import type { CylinderClock, ValveClock, ValveClockRequest, ValveTiming } from '../contracts/calculations.js';
+import type { CylinderClock, ValveClock, ValveClockRequest } from '../contracts/calculations.js';
 import { requireNumber, requireRecord } from '../quantities/require.js';
+import { durationsOf } from './durations.js';
 import { firingAngles } from './firing-angles.js';
 import { phaseOf, strokeAt, valveEvents, valveStateAt } from './phase.js';
-import { pistonFromTop, requireCrankThrow } from './piston-height.js';
+import { knownCrankThrow, pistonFromTop } from './piston-height.js';
 import { requireValveTiming } from './valve-timing.js';
 
 /** A crank may be counted on over many turns, but a figure beyond this has lost its degrees. */
@@ -25,7 +26,7 @@ export function valveClock(request: ValveClockRequest): ValveClock {
   const firings = firingAngles(given['firingOrder'], given['intervals']);
   const timing = requireValveTiming(given['valveTiming']);
   const crank = requireNumber(given['crank'], 'crank', { min: -mostCrank, max: mostCrank });
-  const crankThrow = requireCrankThrow(given['stroke'], given['rodLength']);
+  const crankThrow = knownCrankThrow(given['stroke'], given['rodLength']);
   const valves = valveEvents(timing);
 
   const cylinders = firings.map(({ cylinder, firesAt }): CylinderClock => {
@@ -39,16 +40,5 @@ export function valveClock(request: ValveClockRequest): ValveClock {
       ...(crankThrow && { pistonFromTop: pistonFromTop(crankThrow, phase) }),
     };
   });
-  return { cylinders, ...timingFigures(timing) };
-}
-
-function timingFigures({ ivo, ivc, evo, evc }: ValveTiming): Omit<ValveClock, 'cylinders'> {
-  const duration = { inlet: ivo + 180 + ivc, exhaust: evo + 180 + evc };
-  const lobeCentre = { inlet: duration.inlet / 2 - ivo, exhaust: duration.exhaust / 2 - evc };
-  return {
-    duration,
-    overlap: ivo + evc,
-    lobeCentre,
-    lobeSeparation: (lobeCentre.inlet + lobeCentre.exhaust) / 2,
-  };
+  return { cylinders, ...durationsOf(timing) };
 }

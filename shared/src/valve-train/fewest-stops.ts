@@ -1,0 +1,58 @@
+/** A closed piece of a circle: where it begins, in [0, round), and how far it runs on. */
+export interface Arc {
+  readonly from: number;
+  readonly length: number;
+}
+
+/** Rounding noise of sums of firing angles. */
+const noise = 1e-9;
+
+/**
+ * The fewest points of a circle that touch every arc, and of all such choices one with the least way from the first
+ * point to the last; counted on from the first point, which lies in [0, round), so that the last may lie beyond
+ * `round`. Of equal choices the one that begins earliest.
+ *
+ * In an optimal choice the first point is the end of some arc: moving it on towards the nearest end loses no arc and
+ * only shortens the way. With the first point fixed, what it leaves is intervals on a line, and taking again and
+ * again the latest beginning among them from the far end gives both the fewest points and the earliest last one.
+ * So n arcs take n² log n steps.
+ */
+export function fewestStops(arcs: readonly Arc[], round: number): readonly number[] {
+  let best: readonly number[] = [];
+  for (const { from, length } of arcs) {
+    const found = stopsFrom(fold(from + length, round), arcs, round);
+    if (best.length === 0 || isBetter(found, best)) best = found;
+  }
+  return best;
+}
+
+function stopsFrom(first: number, arcs: readonly Arc[], round: number): readonly number[] {
+  const left = arcs
+    .filter(({ from, length }) => fold(first - from, round) > length + noise)
+    .map(({ from, length }) => {
+      const begins = first + fold(from - first, round);
+      return { begins, ends: begins + length };
+    })
+    .sort((a, b) => b.begins - a.begins);
+  const stops: number[] = [];
+  for (const { begins, ends } of left) {
+    const last = stops[0];
+    if (last === undefined || ends < last - noise) stops.unshift(begins);
+  }
+  return [first, ...stops];
+}
+
+function isBetter(one: readonly number[], other: readonly number[]): boolean {
+  if (one.length !== other.length) return one.length < other.length;
+  const [way, otherWay] = [wayOf(one), wayOf(other)];
+  if (Math.abs(way - otherWay) > noise) return way < otherWay;
+  return (one[0] ?? 0) < (other[0] ?? 0) - noise;
+}
+
+const wayOf = (stops: readonly number[]): number => (stops.at(-1) ?? 0) - (stops[0] ?? 0);
+
+/** An angle brought into [0, round); one that is `round` but for rounding noise is 0. */
+function fold(angle: number, round: number): number {
+  const rest = ((angle % round) + round) % round;
+  return round - rest < noise ? 0 : rest;
+}
