@@ -40,7 +40,7 @@ export interface RotorCheck extends Judgement {
   readonly crankError: number;
   /** The rotor stands at the companion's post: exhaust TDC, or the distributor half a turn out. */
   readonly atCompanion: boolean;
-  /** How to tell which of the two it is, where `atCompanion`. */
+  /** How to tell which of the two it is, where it is half a turn out; also without a companion. */
   readonly howToTell?: string;
   readonly assumed: readonly string[];
 }
@@ -51,6 +51,8 @@ export interface LeadTestRequest {
   readonly length: Quantity;
   /** The maker's figure for a resistive lead: a resistance from `low` to `high` for each `per` of length. */
   readonly nominal?: { readonly low: Quantity; readonly high: Quantity; readonly per: Quantity };
+  /** The maker's limits for a whole lead with its fittings, whatever its length. */
+  readonly whole?: { readonly low?: Quantity; readonly high: Quantity };
   /** Both end fittings together, added to the length's figure. */
   readonly endFittings?: Quantity;
   readonly uncertainty?: Quantity;
