@@ -56,6 +56,9 @@ describe('limits of a class', () => {
     [200, 'N6', -22, -51],
     [250, 'R7', -67, -113],
     [200, 'H11', 290, 0],
+    // T5-041 (DIN ISO 286 extract); P8 has the same upper limit, ISO 286-2:2010 (from memory).
+    [5, 'P9', -12, -42],
+    [5, 'P8', -12, -30],
   ] as const)('%d mm hole %s', (size, code, upper, lower) => {
     expect(limits(size, code)).toEqual([upper, lower]);
   });
