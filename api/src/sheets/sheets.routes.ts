@@ -4,7 +4,7 @@ import { badInput } from '../platform/errors/http-problem.js';
 import { passwordLimit } from '../platform/http/rate-limits.js';
 import { allow, signedInOnly } from '../platform/signing-in/authentication.js';
 import { signedIn, type SignedIn } from '../platform/signing-in/signed-in.js';
-import { parsePaging } from '../platform/validation/paging.js';
+import { byTime, parsePaging } from '../platform/validation/paging.js';
 import { parseBody } from '../platform/validation/parse-body.js';
 import { isId, parseId } from '../platform/validation/parse-id.js';
 import { NewSheetDto, SendBackDto, SettleSnagDto, SignDto } from './sheets.dto.js';
@@ -16,7 +16,7 @@ export function sheetRoutes(services: SheetServices): Router {
   const { reading, history, layOut, start, snags, signing } = services;
   const router = Router();
   router.get('/', allow('sheets.read'), async (request, response) => {
-    const paging = parsePaging(request.query, 2);
+    const paging = parsePaging(request.query, byTime);
     response.json(await reading.list(signedIn(request), parseFilter(request.query), paging));
   });
   router.post('/', allow('sheets.start'), async (request, response) => {

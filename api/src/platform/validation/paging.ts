@@ -1,5 +1,6 @@
 import type { Page } from '@second-spanner/shared/contracts/paging';
 import { badInput } from '../errors/http-problem.js';
+import { isId } from './parse-id.js';
 
 /** Which page of a list is asked for: the key after which it begins, and how many items. */
 export interface Paging {
@@ -10,8 +11,19 @@ export interface Paging {
 const usualLimit = 50;
 const largestLimit = 200;
 
-/** Reads `cursor` and `limit`; `parts` is how many columns the list's cursor has. */
-export function parsePaging(query: Readonly<Record<string, unknown>>, parts = 1): Paging {
+/** Whether a text can stand for a column of a cursor. */
+type Part = (text: string) => boolean;
+
+const anyText: Part = () => true;
+const aTime: Part = (text) => /^\d{4}-\d\d-\d\dT[\d:.]+Z$/.test(text) && !Number.isNaN(Date.parse(text));
+/** The columns of a list in order of time, such as the newest change first. */
+export const byTime: readonly Part[] = [aTime, isId];
+
+/** Reads `cursor` and `limit`; `parts` are the columns of the list's cursor. */
+export function parsePaging(
+  query: Readonly<Record<string, unknown>>,
+  parts: readonly Part[] = [anyText],
+): Paging {
   return { after: readCursor(query['cursor'], parts), limit: readLimit(query['limit']) };
 }
 
@@ -34,7 +46,7 @@ export function pageOf<Row, T>(
 const writeCursor = (key: readonly string[]): string =>
   Buffer.from(JSON.stringify(key)).toString('base64url');
 
-function readCursor(text: unknown, parts: number): readonly string[] | null {
+function readCursor(text: unknown, parts: readonly Part[]): readonly string[] | null {
   if (text === undefined) return null;
   const refusal = badInput({ field: 'cursor', message: 'This cursor is none that was given out here.' });
   if (typeof text !== 'string' || text.length > 500) throw refusal;
@@ -44,9 +56,11 @@ function readCursor(text: unknown, parts: number): readonly string[] | null {
   } catch {
     throw refusal;
   }
-  if (!Array.isArray(key) || key.length !== parts) throw refusal;
-  const texts = key.filter((part) => typeof part === 'string' && !part.includes('\0'));
-  if (texts.length !== parts) throw refusal;
+  if (!Array.isArray(key) || key.length !== parts.length) throw refusal;
+  const texts = key.filter(
+    (text, column) => typeof text === 'string' && !text.includes('\0') && parts[column]?.(text),
+  );
+  if (texts.length !== parts.length) throw refusal;
   return texts;
 }
 

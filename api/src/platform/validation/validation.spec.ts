@@ -3,7 +3,7 @@ import { Type } from 'class-transformer';
 import { IsArray, IsIn, IsNumber, IsString, ValidateNested } from 'class-validator';
 import { describe, expect, it } from 'vitest';
 import { HttpProblem } from '../errors/http-problem.js';
-import { pageOf, parsePaging } from './paging.js';
+import { byTime, pageOf, parsePaging } from './paging.js';
 import { parseBody } from './parse-body.js';
 
 class PostDto {
@@ -89,5 +89,25 @@ describe('a page', () => {
       (row) => row,
     );
     expect(page.next).toBeNull();
+  });
+
+  const cursor = (...key: unknown[]): string => Buffer.from(JSON.stringify(key)).toString('base64url');
+  const id = '00000000-0000-4000-8000-000000000000';
+
+  it.each([
+    [cursor('2026-12-01T14:06:00.000Z'), 'a column is missing'],
+    [cursor('yesterday', id), 'the first is no time'],
+    [cursor('2026-13-41T14:06:00.000Z', id), 'the first is no day there is'],
+    [cursor('2026-12-01T14:06:00.000Z', 'me'), 'the second is no id'],
+    [cursor('2026-12-01T14:06:00.000Z', 1), 'the second is no text'],
+  ])('does not begin at %s: %s', (text) => {
+    expect(errorsOf(() => parsePaging({ cursor: text }, byTime))).toEqual([
+      { field: 'cursor', message: 'This cursor is none that was given out here.' },
+    ]);
+  });
+
+  it('in order of time begins at a time and an id', () => {
+    const after = ['2026-12-01T14:06:00.000Z', id];
+    expect(parsePaging({ cursor: cursor(...after) }, byTime).after).toEqual(after);
   });
 });
