@@ -26,6 +26,8 @@ import { sheetEventRoutes } from './sheets/sheet-events.routes.js';
 import { sheetRoutes } from './sheets/sheets.routes.js';
 import { specRoutes } from './spec-book/specs.routes.js';
 import { verificationRoutes } from './verification/verification.routes.js';
+import { keptWorkingRoutes } from './workings/kept-workings.routes.js';
+import { workingRoutes } from './workings/workings.routes.js';
 
 export interface AppDependencies {
   readonly config: Pick<Config, 'publicUrl' | 'clientDir' | 'trustedProxies' | 'requestsPerMinute'>;
@@ -69,7 +71,8 @@ function apiRoutes({ config, database, services, events, heartbeatMs = 15_000 }:
   api.use('/session', sessionRoutes(sessions, cookies));
   api.use('/people', peopleRoutes(people));
   api.use('/preferences', preferencesRoutes(people));
-  api.use('/cars', carRoutes(cars));
+  api.use('/cars', carRoutes(cars), keptWorkingRoutes(services.keptWorkings, services.workingPrints));
+  api.use('/workings', workingRoutes(services.workingPrints));
   api.use('/specs', specRoutes(specs));
   api.use('/tools', toolRoutes(tools));
   const { readSession } = services;

@@ -3,7 +3,7 @@ import { createServer, type Server } from 'node:http';
 import type { AddressInfo } from 'node:net';
 import type { Logger } from 'pino';
 import { createApp } from './app.js';
-import { renderOnThread } from './build-sheets/render-thread.js';
+import { printOnThread } from './printing/print-thread.js';
 import { readConfig, type Config } from './config.js';
 import { loadWholeDemo } from './demo/load-demo.js';
 import { HashingThread } from './people/hashing-thread.js';
@@ -33,7 +33,7 @@ async function main(): Promise<void> {
   });
   await events.start();
   const hashing = new HashingThread();
-  const services = createServices({ ...config, hashing, render: renderOnThread() }, database, {
+  const services = createServices({ ...config, hashing, print: printOnThread() }, database, {
     sendMail: createMailer(config.smtpUrl, config.publicUrl, log),
   });
   if (config.demo) {

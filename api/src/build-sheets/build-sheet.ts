@@ -1,9 +1,7 @@
 import type { Dialect } from '@second-spanner/shared/contracts/people';
 import type { Tool } from '@second-spanner/shared/contracts/registers';
 import type { Sheet, StepDetail } from '@second-spanner/shared/contracts/sheets';
-
-export const papers = ['a4', 'letter'] as const;
-export type Paper = (typeof papers)[number];
+import type { Paper } from '../paper/paper-size.js';
 
 /** Everything that a build sheet prints, as its reader may see it. */
 export interface BuildSheet {
@@ -18,6 +16,3 @@ export interface BuildSheet {
   readonly verificationAddress: string;
   readonly paper: Paper;
 }
-
-/** Makes the PDF of a build sheet, on whichever thread. */
-export type RenderBuildSheet = (build: BuildSheet) => Promise<Uint8Array>;

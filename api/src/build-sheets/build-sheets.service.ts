@@ -1,7 +1,7 @@
-import { requireOneOf } from '@second-spanner/shared/quantities/require';
+import { parsePaper } from '../paper/paper-size.js';
 import type { SignedIn } from '../platform/signing-in/signed-in.js';
 import type { SheetReading } from '../sheets/sheet-reading.service.js';
-import { papers, type Paper, type RenderBuildSheet } from './build-sheet.js';
+import type { Print } from '../printing/print-task.js';
 
 export interface PrintedSheet {
   readonly name: string;
@@ -13,19 +13,20 @@ export class BuildSheetsService {
   constructor(
     private readonly sheets: SheetReading,
     private readonly publicUrl: URL,
-    private readonly render: RenderBuildSheet,
+    private readonly toPdf: Print,
   ) {}
 
   /** @throws InputError on `paper`; a problem when there is no such sheet for this person */
   async print(who: SignedIn, id: string, paper: unknown): Promise<PrintedSheet> {
-    const size: Paper = paper === undefined ? 'a4' : requireOneOf(paper, papers, 'paper');
+    const size = parsePaper(paper);
     const details = await this.sheets.details(who, id);
-    const pdf = await this.render({
+    const build = {
       ...details,
       paper: size,
       ...{ shopName: who.shop.name, demo: who.shop.demo, dialect: who.shop.dialect },
       verificationAddress: new URL('/v', this.publicUrl).href,
-    });
+    };
+    const pdf = await this.toPdf({ kind: 'build-sheet', build });
     return { name: pdfName(details.sheet.code), pdf };
   }
 }

@@ -1,18 +1,7 @@
-import { getDocument } from 'pdfjs-dist/legacy/build/pdf.mjs';
 import { beforeAll, describe, expect, it, vi } from 'vitest';
+import { pagesOf } from '../paper/testing/pages-of.js';
 import { renderBuildSheet } from './render.js';
 import { sampleBuildSheet } from './testing/sample-build-sheet.js';
-
-async function pagesOf(pdf: Buffer): Promise<readonly string[]> {
-  const document = await getDocument({ data: new Uint8Array(pdf), useSystemFonts: false, verbosity: 0 })
-    .promise;
-  const pages: string[] = [];
-  for (let page = 1; page <= document.numPages; page += 1) {
-    const { items } = await (await document.getPage(page)).getTextContent();
-    pages.push(items.map((item) => ('str' in item ? item.str : '')).join(' '));
-  }
-  return pages;
-}
 
 describe('a build sheet', () => {
   let released: Buffer;

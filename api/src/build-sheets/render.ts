@@ -7,7 +7,8 @@ import { signatures } from './blocks/signatures.js';
 import { simpleSteps } from './blocks/simple.js';
 import { hasOrder, tightening } from './blocks/tightening.js';
 import { wiring } from './blocks/wiring.js';
-import { Pages } from './paper/page.js';
+import { Pages } from '../paper/page.js';
+import { frameOf } from './frame.js';
 import { Wording } from './words.js';
 
 /**
@@ -15,7 +16,7 @@ import { Wording } from './words.js';
  * Gives way between the stages to whatever else this thread has to do.
  */
 export async function renderBuildSheet(build: BuildSheet): Promise<Buffer> {
-  const pages = new Pages(build);
+  const pages = new Pages(frameOf(build));
   const words = new Wording(build);
   front(pages, build, words);
   const byCode = new Map(build.steps.map((step) => [step.code, step]));
@@ -25,7 +26,7 @@ export async function renderBuildSheet(build: BuildSheet): Promise<Buffer> {
     await setImmediate();
   }
   signatures(pages, build);
-  return collect(pages.finish());
+  return pages.finish();
 }
 
 function renderStage(
@@ -69,10 +70,4 @@ function blockOf(step: StepDetail): Block | null {
       readings(pages, of, words, build.tools);
     };
   return null;
-}
-
-async function collect(document: PDFKit.PDFDocument): Promise<Buffer> {
-  const chunks: Buffer[] = [];
-  for await (const chunk of document) chunks.push(chunk as Buffer);
-  return Buffer.concat(chunks);
 }

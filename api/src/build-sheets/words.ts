@@ -5,18 +5,6 @@ import { tradeText } from '@second-spanner/shared/contracts/trade-words';
 import { printQuantity } from '@second-spanner/shared/quantities/print';
 import type { BuildSheet } from './build-sheet.js';
 
-const dayMonth = new Intl.DateTimeFormat('en-GB', {
-  day: 'numeric',
-  month: 'short',
-  year: 'numeric',
-  timeZone: 'UTC',
-});
-const hours = new Intl.DateTimeFormat('en-GB', { hour: '2-digit', minute: '2-digit', timeZone: 'UTC' });
-
-/** `1 Dec 2026, 14:52`, in UTC as the record has it. */
-export const stamp = (iso: string): string =>
-  `${dayMonth.format(new Date(iso))}, ${hours.format(new Date(iso))}`;
-
 /** `T. Brandt` */
 export function initialled(name: string): string {
   const words = name.split(' ');

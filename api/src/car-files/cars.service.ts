@@ -46,6 +46,13 @@ export class CarsService {
     });
   }
 
+  /** The car within somebody else's work on the database. Throws a 404 problem when it is not this person's to see. */
+  readonly summaryIn = async (who: SignedIn, scope: ShopScope, id: string): Promise<CarSummary> => {
+    const car = await carsFor(who, scope).find(id);
+    if (!car) throw notFound('car');
+    return toCarSummary(car);
+  };
+
   /** Opens a car file and answers its id. */
   async add(shopId: string, car: NewCar): Promise<string> {
     const id = randomUUID();

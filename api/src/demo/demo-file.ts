@@ -1,4 +1,5 @@
 import { readFile } from 'node:fs/promises';
+import type { KeepWorkingRequest } from '@second-spanner/shared/contracts/kept-workings';
 import type { Dialect, Role } from '@second-spanner/shared/contracts/people';
 import type { Tool } from '@second-spanner/shared/contracts/registers';
 import type { EditionState } from '@second-spanner/shared/contracts/spec';
@@ -53,6 +54,14 @@ export interface DemoShop extends DemoWork {
     readonly file: string;
     readonly editions: readonly DemoEdition[];
   }[];
+  readonly keptWorkings: readonly DemoKeptWorking[];
+}
+
+/** A working kept with a car, by its code and the person's key. */
+export interface DemoKeptWorking extends KeepWorkingRequest {
+  readonly car: string;
+  readonly by: string;
+  readonly daysAgo: number;
 }
 
 export interface DemoFile {

@@ -3,6 +3,7 @@ import { DemoClock } from './demo-clock.js';
 import { readDemo } from './demo-file.js';
 import { seedDemo, type SeededShop } from './seed-demo.js';
 import { seedDemoSheets } from './seed-demo-sheets.js';
+import { seedKeptWorkings } from './seed-kept-workings.js';
 
 /**
  * Loads the whole demo into an empty database: people and books first, then their sheets, played as if it had been
@@ -19,7 +20,9 @@ export async function loadWholeDemo(
   const seeded = await seedDemo(services, today);
   for (const shop of shops) {
     const ofShop = seeded.find(({ key }) => key === shop.key);
-    if (ofShop) await seedDemoSheets(services, { shop, seeded: ofShop, sightings }, clock, today);
+    if (!ofShop) continue;
+    await seedDemoSheets(services, { shop, seeded: ofShop, sightings }, clock, today);
+    await seedKeptWorkings(services, { shop, seeded: ofShop }, clock, today);
   }
   return seeded;
 }

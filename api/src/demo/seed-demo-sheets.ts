@@ -6,6 +6,7 @@ import type { DemoShop } from './demo-file.js';
 import { demoPictures } from './demo-photos.js';
 import type { DemoSheet, DemoSightings } from './demo-sheet-file.js';
 import { DemoTools } from './demo-tools.js';
+import { demoId, demoPerson } from './demo-person.js';
 import { playSheet } from './play-sheet.js';
 import type { Play } from './play-step.js';
 import type { SeededShop } from './seed-demo.js';
@@ -26,7 +27,7 @@ export async function seedDemoSheets(
   clock: DemoClock,
   today: Date,
 ): Promise<void> {
-  const person = (key: string): SignedIn => asSignedIn(shop, seeded, key);
+  const person = (key: string): SignedIn => demoPerson(shop, seeded, key);
   const tellOne = async (sheet: DemoSheet): Promise<void> => {
     const builder = person(sheet.builder);
     const photos = await photosOf(services, builder, sheet);
@@ -54,10 +55,10 @@ async function layOut(
   builder: SignedIn,
 ): Promise<string> {
   const request = {
-    carId: idOf(cars, sheet.car),
-    specEditionId: idOf(editions, `${sheet.spec}/${sheet.edition}`),
-    builderId: idOf(people, sheet.builder),
-    countersignerId: idOf(people, sheet.countersigner),
+    carId: demoId(cars, sheet.car),
+    specEditionId: demoId(editions, `${sheet.spec}/${sheet.edition}`),
+    builderId: demoId(people, sheet.builder),
+    countersignerId: demoId(people, sheet.countersigner),
   };
   return sheets.layOut.layOut(builder, request, { code: sheet.code });
 }
@@ -68,22 +69,4 @@ async function photosOf({ files }: Services, builder: SignedIn, { state }: DemoS
   const stored: string[] = [];
   for (const picture of await demoPictures()) stored.push((await files.add(builder, picture)).id);
   return stored;
-}
-
-/** A person of the demo as they would be signed in. */
-function asSignedIn(shop: DemoShop, seeded: SeededShop, key: string): SignedIn {
-  const found = shop.people.find((each) => each.key === key);
-  if (!found) throw new Error(`The demo names ${key}, who is not in its shop.`);
-  const { name, email, role } = found;
-  return {
-    sessionId: '',
-    person: { id: idOf(seeded.people, key), name, email, role, dialect: null },
-    shop: { id: seeded.id, name: shop.name, dialect: shop.dialect, demo: true },
-  };
-}
-
-function idOf(ids: ReadonlyMap<string, string>, key: string): string {
-  const id = ids.get(key);
-  if (id === undefined) throw new Error(`The demo names ${key}, which is not in its shop.`);
-  return id;
 }

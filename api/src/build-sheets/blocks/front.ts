@@ -1,7 +1,8 @@
 import { sheetStateWords } from '@second-spanner/shared/sheet/words';
 import type { BuildSheet } from '../build-sheet.js';
-import type { Pages } from '../paper/page.js';
-import { stamp, type Wording } from '../words.js';
+import type { Pages } from '../../paper/page.js';
+import { stamp } from '../../paper/stamp.js';
+import type { Wording } from '../words.js';
 
 /** What the sheet is of, and who worked it. */
 export function front(pages: Pages, { sheet, shopName }: BuildSheet, words: Wording): void {

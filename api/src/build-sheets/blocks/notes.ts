@@ -1,6 +1,7 @@
 import type { StepDetail } from '@second-spanner/shared/contracts/sheets';
 import { secondCheckWords } from '@second-spanner/shared/sheet/words';
-import { initialled, stamp, type Wording } from '../words.js';
+import { stamp } from '../../paper/stamp.js';
+import { initialled, type Wording } from '../words.js';
 
 const settlementWords = {
   redone: 'redone',

@@ -1,8 +1,8 @@
 import { signatureWords } from '@second-spanner/shared/sheet/words';
 import { signatureMeanings } from '@second-spanner/shared/contracts/sheets';
 import type { BuildSheet } from '../build-sheet.js';
-import type { Pages } from '../paper/page.js';
-import { stamp } from '../words.js';
+import type { Pages } from '../../paper/page.js';
+import { stamp } from '../../paper/stamp.js';
 
 const height = 58;
 

@@ -3,8 +3,8 @@ import { printQuantity } from '@second-spanner/shared/quantities/print';
 import type { SignKind } from '@second-spanner/shared/drawing/signs';
 import { printLimits } from '@second-spanner/shared/spec/print-limits';
 import { sourceText } from '@second-spanner/shared/spec/source-text';
-import type { Pages } from '../paper/page.js';
-import { table, type Cell, type Row } from '../paper/table.js';
+import type { Pages } from '../../paper/page.js';
+import { table, type Cell, type Row } from '../../paper/table.js';
 import { people, type Wording } from '../words.js';
 import { notes } from './notes.js';
 

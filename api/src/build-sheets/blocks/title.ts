@@ -1,6 +1,6 @@
 import type { StepDetail } from '@second-spanner/shared/contracts/sheets';
-import type { Pages } from '../paper/page.js';
-import { verdict } from '../paper/table.js';
+import type { Pages } from '../../paper/page.js';
+import { verdict } from '../../paper/table.js';
 import { people, type Wording } from '../words.js';
 import { judged } from './simple.js';
 

@@ -8,7 +8,8 @@ import { checkSpecDocument } from '@second-spanner/shared/spec/check-document';
 import { planOf } from '@second-spanner/shared/sheet/plan-of';
 import { proposeSheet } from '@second-spanner/shared/sheet/proposal/propose-sheet';
 import { slotsOf } from '@second-spanner/shared/sheet/slots';
-import type { BuildSheet, Paper } from '../build-sheet.js';
+import type { Paper } from '../../paper/paper-size.js';
+import type { BuildSheet } from '../build-sheet.js';
 
 const tomasz: PersonName = { id: 'tomasz', name: 'Tomasz Brandt', role: 'builder' };
 const imogen: PersonName = { id: 'imogen', name: 'Imogen Vale', role: 'countersigner' };

@@ -9,6 +9,7 @@ import { SheetEntity } from '../../sheets/sheet.entity.js';
 import { StepEntity } from '../../sheets/step.entity.js';
 import { SpecEditionEntity } from '../../spec-book/spec-edition.entity.js';
 import { SpecEntity } from '../../spec-book/spec.entity.js';
+import { KeptWorkingEntity } from '../../workings/kept-working.entity.js';
 
 /** Every entity, by name: nothing is found by searching folders. */
 export const entities = [
@@ -23,4 +24,5 @@ export const entities = [
   StepEntity,
   LedgerLineEntity,
   StoredFileEntity,
+  KeptWorkingEntity,
 ];

@@ -1,4 +1,5 @@
 import { AppendOnly1764547200007 } from './append-only.js';
+import { KeptWorkings1796083200012 } from './kept-workings.js';
 import { Loading1764547200011 } from './loading.js';
 import { People1764547200001 } from './people.js';
 import { Records1764547200005 } from './records.js';
@@ -23,4 +24,5 @@ export const migrations = [
   RowSecurity1764547200009,
   SheetContent1764547200010,
   Loading1764547200011,
+  KeptWorkings1796083200012,
 ];

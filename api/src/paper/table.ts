@@ -25,8 +25,8 @@ interface Place {
   readonly width: number;
 }
 
-const size = 8.5;
-const pad = 8;
+export const cellSize = 8.5;
+export const cellPad = 8;
 
 /** A table of ruled rows at the pages' present place; its head is repeated on a new page. */
 export function table(pages: Pages, columns: readonly Column[], rows: readonly Row[], within?: Place): void {
@@ -65,7 +65,7 @@ function head(pages: Pages, columns: readonly Column[], places: readonly Place[]
       pages.text(words, place.x, pages.y, {
         font: 'plate',
         size: 8,
-        width: place.width - pad,
+        width: place.width - cellPad,
         align,
         colour: '#404040',
       });
@@ -83,11 +83,16 @@ function heightOf(
 ): number {
   const heights = row.cells.map((cell, index) => {
     if (typeof cell !== 'string') return 11;
-    return pages.heightOf(cell, (places[index]?.width ?? 0) - pad, columns[index]?.font ?? 'text', size);
+    return pages.heightOf(
+      cell,
+      (places[index]?.width ?? 0) - cellPad,
+      columns[index]?.font ?? 'text',
+      cellSize,
+    );
   });
   const underWidth = area.x + area.width - (places[1]?.x ?? area.x);
   const under = (row.under ?? []).reduce(
-    (sum, words) => sum + pages.heightOf(words, underWidth - pad, 'text', 8) + 1,
+    (sum, words) => sum + pages.heightOf(words, underWidth - cellPad, 'text', 8) + 1,
     0,
   );
   return Math.max(11, ...heights) + under + 6;
@@ -102,7 +107,7 @@ function drawRow(pages: Pages, row: Row, columns: readonly Column[], places: rea
     if (typeof cell === 'string') {
       lowest = Math.max(
         lowest,
-        pages.text(cell, place.x, pages.y + 3, { font, size, width: place.width - pad, align }),
+        pages.text(cell, place.x, pages.y + 3, { font, size: cellSize, width: place.width - cellPad, align }),
       );
     } else {
       verdict(pages, cell.sign, place.x, pages.y + 2.5);
@@ -113,7 +118,7 @@ function drawRow(pages: Pages, row: Row, columns: readonly Column[], places: rea
   const to = places.at(-1);
   if (!from || !to) return;
   for (const words of row.under ?? []) {
-    const width = to.x + to.width - from.x - pad;
+    const width = to.x + to.width - from.x - cellPad;
     y += pages.text(words, from.x, y, { size: 8, width, colour: '#404040' }) + 1;
   }
 }

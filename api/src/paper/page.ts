@@ -1,16 +1,15 @@
 import PDFDocument from 'pdfkit';
 import { mark } from '@second-spanner/shared/drawing/mark';
-import type { BuildSheet } from '../build-sheet.js';
 import { draw } from './draw.js';
 import { fonts, printable, type FontName } from './fonts.js';
-import { drawCode, runsOf, type Run } from './quick-response.js';
+import type { Frame } from './frame.js';
 
 /** Points. More than the 10 mm that must be kept. */
 export const margin = 32;
 const headHeight = 40;
 const footHeight = 62;
 const gap = 14;
-const grey = '#404040';
+export const grey = '#404040';
 
 export interface TextStyle {
   readonly font?: FontName;
@@ -25,12 +24,10 @@ export class Pages {
   readonly document: PDFKit.PDFDocument;
   /** Where the next thing stands. */
   y = 0;
-  private code: readonly Run[] | undefined;
 
-  constructor(private readonly build: BuildSheet) {
-    const { sheet } = build;
+  constructor(private readonly frame: Frame) {
     this.document = new PDFDocument({
-      size: build.paper === 'a4' ? 'A4' : 'LETTER',
+      size: frame.paper === 'a4' ? 'A4' : 'LETTER',
       margin: 0,
       bufferPages: true,
       autoFirstPage: false,
@@ -39,12 +36,11 @@ export class Pages {
       // None, or Helvetica slips in.
       font: '',
       info: {
-        Title: `Build sheet ${sheet.code}, ${sheet.carName}, engine ${sheet.engineCode}`,
-        Author: build.shopName,
+        Title: frame.title,
+        Author: frame.author,
         Producer: 'Second Spanner',
         Creator: 'Second Spanner',
-        // Fixed, so that two renderings are the same to the byte.
-        CreationDate: new Date(sheet.changedAt),
+        CreationDate: frame.made,
       },
     });
     for (const [name, font] of Object.entries(fonts)) this.document.registerFont(name, font);
@@ -96,6 +92,11 @@ export class Pages {
       : this.document.currentLineHeight(true);
   }
 
+  /** The width of a text on one line. */
+  widthOf(words: string, font: FontName, size: number): number {
+    return this.document.font(font).fontSize(size).widthOfString(printable(words));
+  }
+
   /** The width of a text that fits on one line, as most do: those need not be broken into lines, which is slow. */
   private lineWidth(printed: string, width: number): number | undefined {
     if (printed.includes('\n')) return undefined;
@@ -119,83 +120,47 @@ export class Pages {
   }
 
   private head(): void {
-    const { sheet } = this.build;
-    const cells: readonly (readonly [string, string, number, FontName])[] = [
-      ['Sheet', sheet.code, 74, 'figures-medium'],
-      ['Spec', `${sheet.engineCode}, edition ${sheet.specEdition}`, 96, 'text-medium'],
-      ['Engine number', sheet.engineNumber, 104, 'figures-medium'],
-    ];
+    const { caption, name, cells } = this.frame.head;
     const top = margin;
     this.document.lineWidth(1.4).rect(this.left, top, this.width, headHeight).stroke('#000000');
     draw(this.document, mark, this.left + 8, top + 7, 26);
     let x = this.left + this.width;
-    for (const [caption, value, width, font] of [...cells].reverse()) {
-      x -= width;
+    for (const cell of [...cells].reverse()) {
+      x -= cell.width;
       this.document
         .lineWidth(0.8)
         .moveTo(x, top)
         .lineTo(x, top + headHeight)
         .stroke('#000000');
-      this.text(caption, x + 7, top + 7, { font: 'plate', size: 8, width: width - 10, colour: grey });
-      this.text(value, x + 7, top + 19, { font, size: 10.5, width: width - 10 });
+      const width = cell.width - 10;
+      this.text(cell.caption, x + 7, top + 7, { font: 'plate', size: 8, width, colour: grey });
+      this.text(cell.value, x + 7, top + 19, { font: cell.font, size: 10.5, width });
     }
-    const wide = x - this.left - 50;
-    const title = this.isReleased ? 'Build sheet' : 'Build sheet: RUNNING, NOT SIGNED';
-    this.text(title, this.left + 44, top + 7, { font: 'plate', size: 8, width: wide, colour: grey });
-    this.text(`${sheet.carName}, engine ${sheet.engineCode}`, this.left + 44, top + 18, {
-      font: 'text-medium',
-      size: 12,
-      width: wide,
-    });
-  }
-
-  private get isReleased(): boolean {
-    return this.build.sheet.state === 'released';
+    const width = x - this.left - 50;
+    this.text(caption, this.left + 44, top + 7, { font: 'plate', size: 8, width, colour: grey });
+    this.text(name, this.left + 44, top + 18, { font: 'text-medium', size: 12, width });
   }
 
   /** Writes the foot of every page, now that their number is known, and ends the document. */
-  finish(): PDFKit.PDFDocument {
+  async finish(): Promise<Buffer> {
     const { count } = this.document.bufferedPageRange();
     for (let page = 0; page < count; page += 1) {
       this.document.switchToPage(page);
       this.foot(page + 1, count);
     }
     this.document.end();
-    return this.document;
+    const chunks: Buffer[] = [];
+    for await (const chunk of this.document) chunks.push(chunk as Buffer);
+    return Buffer.concat(chunks);
   }
 
   private foot(page: number, count: number): void {
     const top = this.document.page.height - margin - footHeight + 10;
-    const { sheet, shopName, demo, verificationAddress } = this.build;
     this.rule(top, 1.2);
-    const x = this.left;
-    if (this.isReleased && sheet.verificationCode) {
-      const address = `${verificationAddress}/${sheet.verificationCode}`;
-      drawCode(this.document, (this.code ??= runsOf(address)), x, top + 8, 44);
-      this.text('To check that this is the sheet that was signed', x + 54, top + 9, {
-        font: 'plate',
-        size: 8,
-        width: 300,
-      });
-      this.text(sheet.verificationCode, x + 54, top + 20, { font: 'figures-medium', size: 11, width: 300 });
-      this.text(address, x + 54, top + 36, { size: 8, width: 330, colour: grey });
-    } else {
-      this.text('Running sheet, not signed', x, top + 9, { font: 'text-strong', size: 12, width: 300 });
-      this.text(
-        `As it stood on version ${sheet.version}. It can't be verified until it is released.`,
-        x,
-        top + 27,
-        {
-          size: 8,
-          width: 330,
-          colour: grey,
-        },
-      );
-    }
-    const note = demo ? `${shopName}. Demo: all data invented.` : shopName;
+    this.frame.foot(this, top);
     const right = { width: 180, align: 'right' } as const;
-    const rightX = this.left + this.width - 180;
-    this.text(note, rightX, top + 20, { ...right, font: 'plate', size: 8, colour: grey });
-    this.text(`Page ${page} of ${count}`, rightX, top + 32, { ...right, font: 'text-medium', size: 10.5 });
+    const x = this.left + this.width - 180;
+    this.text(this.frame.note, x, top + 20, { ...right, font: 'plate', size: 8, colour: grey });
+    this.text(`Page ${page} of ${count}`, x, top + 32, { ...right, font: 'text-medium', size: 10.5 });
   }
 }

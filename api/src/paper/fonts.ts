@@ -48,15 +48,44 @@ const replacements: Readonly<Record<string, string>> = {
   '→': ' to ',
   Ω: 'ohm',
   '−': '–',
+  '‒': '–',
+  '‑': '-',
   '√': 'root ',
+  '≈': 'about ',
   '☑': 'x',
+  '′': "'",
+  '″': '"',
+  '⁄': '/',
+  '∕': '/',
+  π: 'pi',
+  θ: 'theta',
+  α: 'alpha',
+  φ: 'phi',
+  λ: 'lambda',
+  δ: 'delta ',
+  Δ: 'delta ',
+  Σ: 'sum of ',
 };
+
+const raised = '⁰¹²³⁴⁵⁶⁷⁸⁹';
+const lowered = '₀₁₂₃₄₅₆₇₈₉';
+/** A raised figure that the subsets lack, alone or in a run with those that they have. */
+const raisedRun = /[⁰¹²³⁴-⁹]*[⁻⁰⁴-⁹][⁰¹²³⁴-⁹]*/g;
+
+/** `10⁻⁶` as `10^-6`, `x₁` as `x1`. */
+const onTheLine = (text: string): string =>
+  text
+    .replace(
+      raisedRun,
+      (run) => `^${[...run].map((sign) => (sign === '⁻' ? '-' : raised.indexOf(sign))).join('')}`,
+    )
+    .replace(/[₀-₉]/g, (figure) => String(lowered.indexOf(figure)));
 
 const hasGlyph = new Set(drawable.map((code) => String.fromCodePoint(code)));
 
 /** A text with only characters that every face can draw; what is unknown becomes a question mark. */
 export function printable(text: string): string {
-  return [...text]
+  return [...onTheLine(text)]
     .map((character) => (hasGlyph.has(character) ? character : (replacements[character] ?? '?')))
     .join('');
 }
