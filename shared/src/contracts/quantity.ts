@@ -13,7 +13,7 @@ export const units = {
 } as const;
 
 export type Kind = keyof typeof units;
-export type Unit = (typeof units)[Kind][number];
+export type Unit = { readonly [K in Kind]: (typeof units)[K][number] }[Kind];
 
 /** A physical figure with its unit. There is no default unit. */
 export interface Quantity {
