@@ -31,7 +31,7 @@ test('from the sign-in to a recorded step by the keys alone @desk', async ({ pag
   await tabTo(page, page.locator(`main a[href="${sheet}/steps/1.1"]`));
   await page.keyboard.press('Enter');
 
-  await expect(page.getByRole('heading', { name: 'Engine on its stand' })).toBeVisible();
+  await expect(page.getByRole('heading', { name: 'Engine on its stand', level: 1 })).toBeVisible();
   await tabTo(page, page.getByLabel('Right'), 150);
   await page.keyboard.press('Space');
   await tabTo(page, page.getByRole('button', { name: 'Keep it' }));

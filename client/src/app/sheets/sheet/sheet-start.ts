@@ -47,7 +47,7 @@ export class SheetStart {
   private readonly api = inject(SheetApi);
   private readonly router = inject(Router);
   private readonly sessions = inject(SessionStore);
-  private readonly isDesk = inject(Wide).isDesk;
+  protected readonly isDesk = inject(Wide).isDesk;
   protected readonly store = inject(SheetStore);
 
   protected readonly saving = new Saving();
