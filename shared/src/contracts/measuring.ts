@@ -15,6 +15,8 @@ export interface RoundReadingsRequest {
   readonly readings: readonly RoundReading[];
   /** The axis at a shell's split, which is relieved there and is not judged. */
   readonly splitAxis?: string;
+  /** The axis at 90° to a shell's split, the only one that is then judged. */
+  readonly judgedAxis?: string;
   readonly limits?: { readonly low?: Quantity; readonly high?: Quantity };
   readonly ovalityLimit?: Quantity;
   readonly taperLimit?: Quantity;
@@ -27,10 +29,10 @@ export interface RoundReadings extends Judgement {
   readonly mean: Quantity;
   readonly least: Quantity;
   readonly most: Quantity;
-  /** Greatest difference between axes at one height. */
-  readonly ovality: Quantity;
-  /** Greatest difference between heights on one axis. */
-  readonly taper: Quantity;
+  /** Greatest difference between axes at one height; null where no height has two. */
+  readonly ovality: Quantity | null;
+  /** Greatest difference between heights on one axis; null where no axis has two. */
+  readonly taper: Quantity | null;
   readonly worstHeight: string;
   readonly worstAxis: string;
   readonly parts: readonly {
@@ -61,7 +63,7 @@ export interface RunningClearance extends Judgement {
 export interface RingGapRequest {
   readonly bore: Quantity;
   readonly gap: Quantity;
-  /** Gap for each unit of bore, as the ring's maker states it, such as 0.0045. */
+  /** Gap for each unit of bore, as the ring's maker states it, such as 0.0045; instead of limits. */
   readonly perBore?: { readonly low: number; readonly high?: number };
   readonly limits?: { readonly low?: Quantity; readonly high?: Quantity };
   /** How much hotter than the bore the ring may run, a difference. */
@@ -132,6 +134,7 @@ export interface CompressionRatio {
   readonly compressionRatio: number;
   /** Gasket's thickness and deck together: piston's edge to head. */
   readonly squish: Quantity;
+  /** What the chamber must hold for the ratio wanted. */
   readonly chamberFor?: Quantity;
   readonly cautions: readonly string[];
 }
@@ -139,7 +142,10 @@ export interface CompressionRatio {
 export interface CylinderReading {
   readonly cylinder: Cylinder;
   readonly dry: Quantity | number;
+  /** With a spoonful of oil in the cylinder. */
   readonly wet?: Quantity | number;
+  /** Only cylinders of one bank are neighbours. */
+  readonly bank?: string;
 }
 
 /** Compression in pressures, leak-down in percent lost. */
@@ -153,12 +159,15 @@ export interface CylinderTestRequest {
   readonly mostLeak?: number;
   /** Newly rebuilt: the rings are not bedded, so that only the trend counts. */
   readonly rebuilt?: boolean;
-  /** Leak-down: both the same as in the readings it is compared with. */
+  /** Leak-down: the tester's orifice and supply pressure. */
   readonly orifice?: Quantity;
   readonly supply?: Quantity;
+  /** What `mostLeak` was set with; it holds for no other. */
+  readonly mostLeakAt?: { readonly orifice: Quantity; readonly supply: Quantity };
 }
 
 export interface CylinderTest extends Judgement {
+  /** By the figure: for leak-down the tightest and the leakiest. */
   readonly lowest: Cylinder;
   readonly highest: Cylinder;
   /** Lowest over highest; null for leak-down. */
