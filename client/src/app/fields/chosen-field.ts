@@ -1,7 +1,6 @@
 import { ChangeDetectionStrategy, Component, computed, input, output } from '@angular/core';
-import { Sentence } from '../quantity/sentence';
-import { Sign } from '../verdict/sign';
 import { TradeWords } from '../words/trade-words';
+import { describedBy, FieldNotes } from './field-notes';
 
 export interface Choice {
   readonly value: string;
@@ -14,7 +13,7 @@ let fields = 0;
 /** A caption over a choice on a rule. */
 @Component({
   selector: 'ss-chosen-field',
-  imports: [Sentence, Sign, TradeWords],
+  imports: [FieldNotes, TradeWords],
   changeDetection: ChangeDetectionStrategy.OnPush,
   template: `
     <label [for]="id">{{ label() | tradeWords }}</label>
@@ -23,7 +22,7 @@ let fields = 0;
         #field
         [id]="id"
         [attr.aria-invalid]="error() ? true : null"
-        [attr.aria-describedby]="error() ? id + '-error' : null"
+        [attr.aria-describedby]="notes()"
         (change)="chosen.emit(field.value)"
       >
         @if (isUnknown()) {
@@ -36,11 +35,7 @@ let fields = 0;
         }
       </select>
     </span>
-    <p [id]="id + '-error'" class="error" aria-live="polite">
-      @if (error(); as words) {
-        <ss-sign name="fail" /><ss-sentence [text]="words" />
-      }
-    </p>
+    <ss-field-notes [of]="id" [hint]="hint()" [error]="error()" />
   `,
   styleUrl: './field.scss',
 })
@@ -49,8 +44,10 @@ export class ChosenField {
   readonly value = input.required<string>();
   readonly choices = input.required<readonly Choice[]>();
   readonly error = input<string | undefined>();
+  readonly hint = input<string | null>(null);
   readonly chosen = output<string>();
 
   protected readonly id = `chosen-${(fields += 1)}`;
   protected readonly isUnknown = computed(() => !this.choices().some(({ value }) => value === this.value()));
+  protected readonly notes = computed(() => describedBy(this.id, this.hint(), this.error()));
 }

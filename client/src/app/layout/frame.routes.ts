@@ -28,7 +28,7 @@ export const frameRoutes: Routes = [
       { path: 'sheets', loadChildren: async () => (await import('../sheets/sheets.routes')).sheetsRoutes },
       {
         path: 'workings',
-        loadChildren: async () => (await import('../wiring/wiring.routes')).wiringRoutes,
+        loadChildren: async () => (await import('../workings/workings.routes')).workingsRoutes,
       },
       {
         path: 'account',

@@ -18,7 +18,7 @@ const places: readonly Place[] = [
   { name: 'Car files', icon: 'car', link: '/cars', permission: 'cars.read' },
   { name: 'Sheets', icon: 'sheet', link: '/sheets', permission: 'sheets.read' },
   { name: 'Spec book', icon: 'book', link: '/specs', permission: 'specs.read' },
-  { name: 'Workings', icon: 'workings', link: '/workings/wiring', permission: 'calculate' },
+  { name: 'Workings', icon: 'workings', link: '/workings', permission: 'calculate' },
 ];
 
 /** Where one can go, with what waits on the bench; below it the account and the way out. */

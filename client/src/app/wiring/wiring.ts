@@ -27,7 +27,9 @@ import { ProblemLine } from '../states/problem-line';
 import { VerdictLine } from '../verdict/verdict';
 import { printMoment } from '../words/dates';
 import { TradeWords } from '../words/trade-words';
+import { WorkingActs } from '../workings/acts/working-acts';
 import { caseAddress } from '../workings/case-address';
+import { GroupStrip } from '../workings/group-strip';
 import { editionName, SpecEditions } from '../workings/spec-editions';
 import { EngineFacts } from './answer/engine-facts';
 import { Judgement } from './answer/judgement';
@@ -49,6 +51,7 @@ const longestInHead = 16;
     EngineFacts,
     EngineFields,
     FittedCells,
+    GroupStrip,
     Judgement,
     LeadTable,
     LoadState,
@@ -58,6 +61,7 @@ const longestInHead = 16;
     TitleBlock,
     TradeWords,
     VerdictLine,
+    WorkingActs,
   ],
   providers: [SpecEditions, SpecEngines],
   changeDetection: ChangeDetectionStrategy.OnPush,
@@ -74,7 +78,6 @@ export class WiringPage {
   /** The engine's fields stand open until there is a map, and when they are asked for. */
   protected readonly engineOpen = signal(true);
   protected readonly problem = signal<ApiProblem | null>(null);
-  protected readonly copied = signal<'yes' | 'by-hand' | null>(null);
 
   private readonly address = caseAddress((typed) => {
     const form = fromQuery((name) => typed[name] ?? null);
@@ -138,15 +141,13 @@ export class WiringPage {
       ? null
       : drawSparkStrip({ request: { valveTiming, advance }, diagnosis }, this.options());
   });
-  protected readonly text = computed(() => {
-    const typed = toCase(this.form());
+  protected readonly typed = computed(() => toCase(this.form()));
+  protected readonly text = (): string => {
     const options = this.options();
-    const answer = wiringMapWorking.workOut(typed, options);
-    return workingText(wiringMapWorking, typed, answer, {
-      ...options,
-      address: this.document.location.href,
-    });
-  });
+    const answer = wiringMapWorking.workOut(this.typed(), options);
+    const address = this.document.location.href;
+    return workingText(wiringMapWorking, this.typed(), answer, { ...options, address });
+  };
 
   protected change(changes: Partial<WiringForm>): void {
     this.show({ ...this.form(), ...changes });
@@ -171,23 +172,9 @@ export class WiringPage {
     this.change({ fitted: {} });
   }
 
-  protected print(): void {
-    this.document.defaultView?.print();
-  }
-
-  protected async copy(): Promise<void> {
-    try {
-      await this.document.defaultView?.navigator.clipboard.writeText(this.text());
-      this.copied.set('yes');
-    } catch {
-      this.copied.set('by-hand');
-    }
-  }
-
   private show(form: WiringForm): void {
-    this.copied.set(null);
     this.form.set(form);
-    this.address.write(toCase(form));
+    this.address.write(this.typed());
   }
 
   private say(text: string): string {

@@ -1,6 +1,7 @@
 import { DOCUMENT } from '@angular/common';
 import { ChangeDetectionStrategy, Component, inject, signal } from '@angular/core';
 import { MatButton } from '@angular/material/button';
+import { saveFile } from '../../http/save-file';
 import { SaveLine } from '../saving/save-line';
 import { Saving } from '../saving/save-state';
 import { SheetApi } from '../sheet-api';
@@ -84,12 +85,7 @@ export class BuildSheetDownload {
   protected async download(): Promise<void> {
     const pdf = await this.reading.follow(this.api.buildSheet(this.store.id(), this.paper()));
     if (pdf === null) return;
-    const url = URL.createObjectURL(pdf);
-    const link = this.document.createElement('a');
-    link.href = url;
-    link.download = `build-sheet-${this.store.sheet.hasValue() ? this.store.sheet.value().code : 'sheet'}.pdf`;
-    link.click();
-    // The browser has taken it over by the next turn.
-    setTimeout(() => URL.revokeObjectURL(url), 0);
+    const code = this.store.sheet.hasValue() ? this.store.sheet.value().code : 'sheet';
+    saveFile(this.document, pdf, `build-sheet-${code}.pdf`);
   }
 }

@@ -1,0 +1,25 @@
+import { ChangeDetectionStrategy, Component, computed, input } from '@angular/core';
+import type { AnswerPart, WorkingAnswer } from '@second-spanner/shared/workings/working';
+import { Sentence } from '../../quantity/sentence';
+import { CautionSign } from '../../sheets/step/caution-sign';
+import { VerdictLine } from '../../verdict/verdict';
+import { TradeWords } from '../../words/trade-words';
+import { AnswerParts } from './answer-parts';
+
+/** What is said of a case: each judgement, its cautions, the figures, what was assumed, and by which formula. */
+@Component({
+  selector: 'ss-judged',
+  imports: [AnswerParts, CautionSign, Sentence, TradeWords, VerdictLine],
+  changeDetection: ChangeDetectionStrategy.OnPush,
+  templateUrl: './judged.html',
+  styleUrl: './judged.scss',
+})
+export class Judged {
+  readonly answer = input.required<WorkingAnswer>();
+  /** Figures that stand beside the judgement. */
+  readonly facts = input.required<readonly AnswerPart[]>();
+
+  protected readonly judgements = computed(() =>
+    this.answer().parts.filter((part) => part.kind === 'judgement'),
+  );
+}
