@@ -106,17 +106,18 @@ function valvesOpen(
     ringPiece(centre, low, high, round720(firesAt + from), round720(firesAt + to));
   const exhaust = piece(180 - evo, 360 + evc, middle, outer - 0.5);
   const inlet = piece(360 - ivo, 540 + ivc, inner, middle);
-  const spacing = pitch > 14 ? 4.2 : 3;
+  const isNarrow = pitch <= 14;
+  const [edge, blue] = isNarrow ? (['dimension', 'blue-thin'] as const) : (['edge', 'blue'] as const);
   return [
     ...(evo + 180 + evc > 0
       ? [
           path(`${track(exhaust)}Z`, { fill: 'paper' }),
-          hatching(exhaust, 45, spacing),
-          path(`${track(exhaust)}Z`, { pen: 'edge', part: 'exhaust-open' }),
+          hatching(exhaust, 45, isNarrow ? 3 : 4.2),
+          path(`${track(exhaust)}Z`, { pen: edge, part: 'exhaust-open' }),
         ]
       : []),
     ...(ivo + 180 + ivc > 0
-      ? [path(`${track(inlet)}Z`, { pen: 'blue', fill: 'blue-wash', part: 'inlet-open' })]
+      ? [path(`${track(inlet)}Z`, { pen: blue, fill: 'blue-wash', part: 'inlet-open' })]
       : []),
   ];
 }
@@ -124,9 +125,9 @@ function valvesOpen(
 function number({ cylinder }: CylinderClock, firesAt: number, radius: number): readonly Shape[] {
   const at = polar(centre, radius, round720(firesAt));
   const name = shortened(String(cylinder), 3);
-  const size = name.length > 1 ? 9 + 2 * name.length : 8.5;
+  const disc = [8.5, 10.5, 13][name.length - 1] ?? 13;
   return [
-    circle(at.x, at.y, Math.min(size, 13), { pen: 'edge', fill: 'paper', part: `cylinder:${cylinder}` }),
+    circle(at.x, at.y, disc, { pen: 'edge', fill: 'paper', part: `cylinder:${cylinder}` }),
     centredText(at.x, at.y, name, { face: 'figures', weight: 600 }),
   ];
 }
