@@ -133,8 +133,10 @@ export interface ThreadStack extends Judgement {
   readonly engagementInDiameters: number;
   /** Past the nut: length and pitches; negative where it does not come through. */
   readonly protrusion?: { readonly length: Quantity; readonly pitches: number };
-  /** From the end of the bolt to the bottom of the hole, or to the end of its thread. */
+  /** From the end of the bolt to the end of the full thread of a blind hole; negative where it jams. */
   readonly spare?: Quantity;
+  /** As given, or as taken from the table. */
+  readonly nutHeight?: Quantity;
   readonly lengthNeeded: Quantity;
   readonly assumed: readonly string[];
 }

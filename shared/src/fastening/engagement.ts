@@ -35,11 +35,11 @@ export function judgeEngagement(
     };
   }
   const got = toSi(engagement);
-  const inDiameters = `${printQuantity(engagement)} of thread in ${words}, ${printNumber(got / thread.diameter, 2)} × the diameter,`;
+  const has = `${printQuantity(engagement)} of thread in ${words} is ${printNumber(got / thread.diameter, 2)} × the diameter`;
   return got >= needed * (1 - 1e-9)
-    ? { verdict: 'pass', reason: `${inDiameters} is no less than ${least}.` }
+    ? { verdict: 'pass', reason: `${has}; it needs at least ${least}.` }
     : {
         verdict: 'fail',
-        reason: `${inDiameters} is less than ${least}: the female thread may strip before the bolt is tight.`,
+        reason: `${has}; it needs at least ${least}: the female thread may strip before the bolt is tight.`,
       };
 }

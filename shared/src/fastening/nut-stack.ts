@@ -36,6 +36,7 @@ export function nutStack(joint: NutCase): StackFigures {
     }`,
     engagement: Math.max(0, Math.min(nutHeight, reach)),
     protrusion,
+    nutHeight,
     lengthNeeded,
     assumed: [
       ...(isListed ? [`Nut height ${printLength(fromSi(nutHeight, unit))}: the greatest of ISO 4032.`] : []),

@@ -7,6 +7,7 @@ export interface StackFigures {
   readonly engagement: number;
   readonly protrusion?: number;
   readonly spare?: number;
+  readonly nutHeight?: number;
   readonly lengthNeeded: number;
   readonly assumed: readonly string[];
 }

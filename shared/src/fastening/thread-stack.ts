@@ -44,7 +44,7 @@ export function threadStack(request: ThreadStackRequest): ThreadStack {
 }
 
 function inUnit(
-  { verdict, reason, engagement, protrusion, spare, lengthNeeded, assumed }: StackFigures,
+  { verdict, reason, engagement, protrusion, spare, nutHeight, lengthNeeded, assumed }: StackFigures,
   unit: Unit,
   thread: Thread,
   more: readonly string[],
@@ -59,6 +59,7 @@ function inUnit(
       protrusion: { length: length(protrusion), pitches: protrusion / thread.pitch },
     }),
     ...(spare !== undefined && { spare: length(spare) }),
+    ...(nutHeight !== undefined && { nutHeight: length(nutHeight) }),
     lengthNeeded: length(lengthNeeded),
     assumed: [...more, ...assumed],
   };
