@@ -17,7 +17,10 @@ type Definition = Omit<Working, 'workOut'> & {
    * path, or where `fieldOf` puts it.
    */
   readonly answer: (read: CaseReader, options: WorkingOptions) => WorkedOut;
-  /** Paths of the calculations' requests by the field that they were typed in: `[/^gaps\.driverNear/, 'near']`. */
+  /**
+   * Paths of the calculations' requests by the field that they were typed in: `[/^gaps\.driverNear/, 'near']`, or
+   * with what the pattern found, `[/^passes\[(\d+)\]/, 'passes.$1.to']`.
+   */
   readonly fieldOf?: readonly (readonly [RegExp, string])[];
 };
 
@@ -37,11 +40,17 @@ export function defineWorking({ answer, basis, fieldOf = [], ...working }: Defin
         return { errors: {}, missing: null, parts, assumed, cautions, basis };
       } catch (error) {
         if (!(error instanceof InputError)) throw error;
-        const path = fieldOf.find(([pattern]) => pattern.test(error.field))?.[1] ?? error.field;
-        return { ...nothing, errors: { [path]: error.message }, missing: null };
+        return { ...nothing, errors: { [fieldAt(error.field, fieldOf)]: error.message }, missing: null };
       }
     },
   };
+}
+
+function fieldAt(path: string, fieldOf: NonNullable<Definition['fieldOf']>): string {
+  const found = fieldOf.find(([pattern]) => pattern.test(path));
+  if (found === undefined) return path;
+  const [pattern, field] = found;
+  return field.replace(/\$(\d)/g, (_, group: string) => pattern.exec(path)?.[Number(group)] ?? '');
 }
 
 function sayMissing(labels: readonly string[]): string | null {
