@@ -59,6 +59,9 @@ describe('problems', () => {
     ['a list', 'application/json', '[]', 400],
     ['a bare text', 'application/json', '"text"', 400],
     ['an unknown charset', 'application/json; charset=utf-17', '{}', 415],
+    ['another charset', 'application/json; charset="utf-16le"', '{}', 415],
+    ['brackets far inside each other', 'application/json', `${'['.repeat(51)}${']'.repeat(51)}`, 400],
+    ['brackets in a text', 'application/json', `{"email":"${'['.repeat(200)}"}`, 400],
   ])('answer %s with its status', async (_case, type, body, status) => {
     const answer = await supertest(app.address).post('/api/session').set('Content-Type', type).send(body);
     expect(answer.status).toBe(status);
