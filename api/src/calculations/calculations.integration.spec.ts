@@ -3,6 +3,7 @@ import supertest from 'supertest';
 import { startTestApp, type TestApp } from '../testing/test-app.js';
 import { signedInClient, type TestClient } from '../testing/test-client.js';
 import { openWorkshop } from '../testing/workshop.js';
+import { calculations } from './calculations.js';
 
 let app: TestApp;
 let ravi: TestClient;
@@ -73,6 +74,34 @@ const plain: readonly [string, object, object][] = [
     },
     { verdict: 'pass', en: expect.closeTo(-0.7056828550594477, 9) },
   ],
+  // ISO 286-2:2010, tables 6 and 25: 40 H7 is 0 to +25 µm, 40 p6 is +26 to +42 µm.
+  [
+    'fit',
+    { hole: { size: length(40), class: 'H7' }, shaft: { size: length(40), class: 'p6' } },
+    {
+      kind: 'interference',
+      least: { value: expect.closeTo(-0.042, 9), unit: 'mm' },
+      most: { value: expect.closeTo(-0.001, 9), unit: 'mm' },
+    },
+  ],
+  // ISO 898-1:2013, table 4: the nominal stress area of M10 is 58.0 mm².
+  ['thread', { thread: 'M10x1.5' }, { stressArea: { value: expect.closeTo(58, 1), unit: 'mm2' } }],
+  // Arithmetic: π ÷ 4 × 8² × 9 cm³.
+  [
+    'swept-volume',
+    { bore: length(80), stroke: length(90), cylinders: 4 },
+    { total: { value: expect.closeTo(1809.5573684677208, 6), unit: expect.any(String) } },
+  ],
+  // Arithmetic: 60.02 − 59.975.
+  [
+    'formula',
+    {
+      formula: 'bore_min - journal_max',
+      readings: { bore_min: length(60.02), journal_max: length(59.975) },
+      unit: 'mm',
+    },
+    { value: { value: expect.closeTo(0.045, 9), unit: 'mm' }, uses: ['bore_min', 'journal_max'] },
+  ],
 ];
 
 /** One bad input of each, and the field that must be named. */
@@ -116,6 +145,43 @@ describe('the workings', () => {
     expect(body.errors[0].field).toBe('colour');
   });
 
+  it.each(calculations.map((each) => [each.name, each] as const))(
+    'answer the example of %s as the calculation itself does',
+    async (name, { example, calculate }) => {
+      const { status, body } = await ravi.post(`/calculations/${name}`, example);
+      expect({ status, body }).toEqual({
+        status: 200,
+        body: JSON.parse(JSON.stringify(await calculate(example))),
+      });
+    },
+  );
+
+  it.each(calculations.map((each) => [each.name, each] as const))(
+    'refuse a field that %s does not know, however deep',
+    async (name, { example }) => {
+      const { request, path } = withUnknown(example);
+      const { status, body } = await ravi.post(`/calculations/${name}`, request);
+      expect(status).toBe(400);
+      expect(body.errors).toEqual([{ field: path, message: expect.stringContaining('not known here') }]);
+    },
+  );
+
+  it.each([
+    ['a megabyte of digits', `{"quantity":{"value":${'9'.repeat(1_000_000)},"unit":"m"},"to":"mm"}`, 413],
+    ['a number of 90,000 digits', `{"quantity":{"value":${'9'.repeat(90_000)},"unit":"m"},"to":"mm"}`, 400],
+    ['ten thousand brackets', `{"quantity":${'['.repeat(10_000)}${']'.repeat(10_000)},"to":"mm"}`, 400],
+    ['ten thousand braces', `${'{"quantity":'.repeat(7_000)}1${'}'.repeat(7_000)}`, 400],
+    ['brackets that never close', '['.repeat(90_000), 400],
+    ['a text that cannot be kept, deep down', `${'['.repeat(40_000)}"\\u0000"${']'.repeat(40_000)}`, 400],
+    ['ninety thousand items', `{"firingOrder":[${'1,'.repeat(45_000)}1],"rotation":"clockwise"}`, 400],
+  ])('refuse %s', async (_what, sent, status) => {
+    for (const name of ['convert', 'cap-map']) {
+      const answer = await ravi.post(`/calculations/${name}`).type('json').send(sent);
+      expect(answer.status).toBe(status);
+      expect(answer.type).toBe('application/problem+json');
+    }
+  });
+
   it('are there for signed-in people alone', async () => {
     const answer = await supertest(app.address)
       .post('/api/calculations/convert')
@@ -128,3 +194,14 @@ describe('the workings', () => {
     expect((await ravi.post(path, {})).status).toBe(404);
   });
 });
+
+/** A request with one unknown field in the innermost of its first objects, or at the top where there is none. */
+function withUnknown(request: object): { request: object; path: string } {
+  const inner = Object.entries(request).find(
+    ([, value]) => typeof value === 'object' && !Array.isArray(value),
+  );
+  if (!inner) return { request: { ...request, colour: 'red' }, path: 'colour' };
+  const [name, value] = inner as [string, object];
+  const found = withUnknown(value);
+  return { request: { ...request, [name]: found.request }, path: `${name}.${found.path}` };
+}
