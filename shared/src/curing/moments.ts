@@ -67,11 +67,25 @@ export function isoOf(at: number, { offset }: MomentStyle): string {
 const months = 'Jan Feb Mar Apr May Jun Jul Aug Sep Oct Nov Dec'.split(' ');
 
 /** A time for a sentence, to the minute after it: `15:20 on 1 Dec 2026`, as the case's own clock shows it. */
-export function sayMoment(at: number, { offset }: MomentStyle): string {
-  const shown = new Date(Math.ceil(at / 60_000) * 60_000 + (offset ?? 0) * 60_000);
-  const [hour, minute] = [shown.getUTCHours(), shown.getUTCMinutes()].map((n) => String(n).padStart(2, '0'));
-  const on = `${shown.getUTCDate()} ${months[shown.getUTCMonth()] ?? ''} ${shown.getUTCFullYear()}`;
-  return `${hour ?? ''}:${minute ?? ''}${offset === 0 ? ' UTC' : ''} on ${on}`;
+export function sayMoment(at: number, style: MomentStyle): string {
+  const { clock, day: on, year } = shown(at, style);
+  return `${clock}${style.offset === 0 ? ' UTC' : ''} on ${on} ${year}`;
+}
+
+/** The same, short enough for a drawing: `15:20, 1 Dec`. */
+export function sayClock(at: number, style: MomentStyle): string {
+  const { clock, day: on } = shown(at, style);
+  return `${clock}, ${on}`;
+}
+
+function shown(at: number, { offset }: MomentStyle): { clock: string; day: string; year: number } {
+  const time = new Date(Math.ceil(at / 60_000) * 60_000 + (offset ?? 0) * 60_000);
+  const [hour, minute] = [time.getUTCHours(), time.getUTCMinutes()].map((n) => String(n).padStart(2, '0'));
+  return {
+    clock: `${hour ?? ''}:${minute ?? ''}`,
+    day: `${time.getUTCDate()} ${months[time.getUTCMonth()] ?? ''}`,
+    year: time.getUTCFullYear(),
+  };
 }
 
 /** A span of milliseconds for a sentence, to the minute after it: `1 h 20 min`, `3 d 2 h`. */
