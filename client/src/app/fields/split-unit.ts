@@ -7,14 +7,15 @@ export interface FigureAndUnit {
   readonly unit?: Unit;
 }
 
+const endsAsFigure = /[\d¼-¾⅐-⅞][.,]?$/;
+
 /** Parts `27 lb ft` into `27` and `lbf·ft`. What has no known unit at its end is a figure as a whole. */
 export function splitUnit(text: string): FigureAndUnit {
   for (let at = 1; at < text.length; at += 1) {
+    const figure = text.slice(0, at).trim();
     const rest = text.slice(at).trim();
-    const unit = /^[\d.,/]/.test(rest) ? undefined : readUnit(rest);
-    if (unit !== undefined && /\d|[¼-¾⅐-⅞]/.test(text.slice(0, at))) {
-      return { figure: text.slice(0, at).trim(), unit };
-    }
+    const unit = endsAsFigure.test(figure) && !/^[\d.,/]/.test(rest) ? readUnit(rest) : undefined;
+    if (unit !== undefined) return { figure, unit };
   }
   return { figure: text.trim() };
 }

@@ -1,12 +1,10 @@
-import { inject } from '@angular/core';
-import { Router, type CanMatchFn, type Routes } from '@angular/router';
+import type { CanMatchFn, Routes } from '@angular/router';
 import { workingNamed } from '@second-spanner/shared/workings/registry';
 import { needs } from '../session/signed-in';
 import { groups } from './groups';
 
-const isGroup: CanMatchFn = (_route, [group]) => groups.some(({ key }) => key === group?.path);
 const isWorking: CanMatchFn = (_route, [group, key]) =>
-  workingNamed(key?.path ?? '')?.group === group?.path && group !== undefined;
+  group !== undefined && workingNamed(key?.path ?? '')?.group === group.path;
 
 export const workingsRoutes: Routes = [
   {
@@ -24,18 +22,12 @@ export const workingsRoutes: Routes = [
         title: 'Wiring map',
         loadComponent: async () => (await import('../wiring/wiring')).WiringPage,
       },
-      // A group opens with its first working, and takes along what the address says of the case.
-      {
-        path: ':group',
-        pathMatch: 'full',
-        canMatch: [isGroup],
-        redirectTo: ({ params, queryParams }) => {
-          const first = groups.find(({ key }) => key === params['group'])?.workings[0];
-          return inject(Router).createUrlTree(['/workings', params['group'], first?.key ?? ''], {
-            queryParams,
-          });
-        },
-      },
+      // A group opens with its first working, and takes along what the address says of a case.
+      ...groups.map(({ key, workings }) => ({
+        path: key,
+        pathMatch: 'full' as const,
+        redirectTo: `${key}/${workings[0]?.key ?? ''}`,
+      })),
       {
         path: ':group/:key',
         canMatch: [isWorking],

@@ -8,12 +8,13 @@ import { SessionStore } from '../../session/session-store';
 import { SheetTable } from '../../sheets/list/sheet-table';
 import { EmptyState } from '../../states/empty-state';
 import { LoadState } from '../../states/load-state';
+import { KeptWorkings } from '../kept/kept-workings';
 import { StartSheet } from '../start/start-sheet';
 
-/** One car: its details, its owner, its sheets, and a new sheet for whoever may start one. */
+/** One car: its details, its owner, its sheets, a new sheet for whoever may start one, its workings. */
 @Component({
   selector: 'ss-car-page',
-  imports: [Cell, EmptyState, LoadState, SheetTable, StartSheet, TitleBlock],
+  imports: [Cell, EmptyState, KeptWorkings, LoadState, SheetTable, StartSheet, TitleBlock],
   changeDetection: ChangeDetectionStrategy.OnPush,
   templateUrl: './car-page.html',
   styleUrl: './car-page.scss',

@@ -6,7 +6,7 @@ import { VerdictLine } from '../../verdict/verdict';
 import { TradeWords } from '../../words/trade-words';
 import { AnswerParts } from './answer-parts';
 
-/** What is said of a case: each judgement, its cautions, the figures, what was assumed, and by which formula. */
+/** What is said of a case: each judgement, its cautions, and the figures beside it. */
 @Component({
   selector: 'ss-judged',
   imports: [AnswerParts, CautionSign, Sentence, TradeWords, VerdictLine],

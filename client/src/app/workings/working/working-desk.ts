@@ -11,11 +11,13 @@ import { printMoment } from '../../words/dates';
 import { TradeWords } from '../../words/trade-words';
 import { WorkingActs } from '../acts/working-acts';
 import { AnswerParts } from '../answer/answer-parts';
+import { Grounds } from '../answer/grounds';
 import { Judged } from '../answer/judged';
 import { NotYet } from '../answer/not-yet';
 import { Spoken } from '../answer/spoken';
 import { caseAddress } from '../case-address';
 import { GroupStrip } from '../group-strip';
+import { groupNames } from '../groups';
 import { SpecEditions } from '../spec-editions';
 import { WorkingFieldControl } from './working-field';
 import { isSameCase, onlyOwn, strayErrors, visibleSections } from './case';
@@ -27,6 +29,7 @@ import { WorkingStart, type StartCase } from './working-start';
   imports: [
     AnswerParts,
     Cell,
+    Grounds,
     GroupStrip,
     Judged,
     NotYet,
@@ -92,6 +95,13 @@ export class WorkingDesk {
     this.shapes().length === 0 ? [] : this.answer().parts.filter(({ kind }) => kind === 'facts'),
   );
 
+  /** Whether anything stands beside what is large. */
+  protected readonly isJudged = computed(() => {
+    const { parts, cautions } = this.answer();
+    return cautions.length > 0 || this.beside().length > 0 || parts.some(({ kind }) => kind === 'judgement');
+  });
+
+  protected readonly group = computed(() => groupNames[this.working().group]);
   protected readonly title = computed(() => this.say(this.working().title));
   protected readonly person = computed(() => this.sessions.person()?.name ?? '');
   /** Where the case comes from, as long as it is still as it came. */

@@ -1,0 +1,101 @@
+import { provideHttpClient } from '@angular/common/http';
+import { ChangeDetectionStrategy, Component, signal } from '@angular/core';
+import { TestBed, type ComponentFixture } from '@angular/core/testing';
+import { provideRouter } from '@angular/router';
+import { beforeEach, describe, expect, it } from 'vitest';
+import { QuantityField } from './quantity-field';
+
+@Component({
+  imports: [QuantityField],
+  changeDetection: ChangeDetectionStrategy.OnPush,
+  template: `<ss-quantity-field
+    label="Torque"
+    kind="torque"
+    unit="N·m"
+    [value]="text()"
+    [error]="error()"
+    (typed)="text.set($event)"
+  />`,
+})
+class Page {
+  readonly text = signal('');
+  readonly error = signal<string | undefined>(undefined);
+}
+
+describe('a quantity field', () => {
+  let fixture: ComponentFixture<Page>;
+  let page: HTMLElement;
+
+  beforeEach(async () => {
+    TestBed.configureTestingModule({ providers: [provideHttpClient(), provideRouter([])] });
+    fixture = TestBed.createComponent(Page);
+    page = fixture.nativeElement as HTMLElement;
+    await fixture.whenStable();
+  });
+
+  const field = (): HTMLInputElement => page.querySelector('input')!;
+  const unit = (): HTMLSelectElement => page.querySelector('select')!;
+  const text = (): string => fixture.componentInstance.text();
+  const type = async (typed: string): Promise<void> => {
+    field().value = typed;
+    field().dispatchEvent(new Event('input'));
+    await fixture.whenStable();
+  };
+  const leave = async (): Promise<void> => {
+    field().dispatchEvent(new Event('blur'));
+    await fixture.whenStable();
+  };
+  const choose = async (name: string): Promise<void> => {
+    unit().value = name;
+    unit().dispatchEvent(new Event('change'));
+    await fixture.whenStable();
+  };
+
+  it('says a figure in the unit that stands beside it', async () => {
+    await type('36,6');
+    expect(text()).toBe('36,6 N·m');
+    expect(field().value).toBe('36,6');
+  });
+
+  it('takes the unit that is typed, and leaves what is typed alone until it is done', async () => {
+    await type('27 lb ft');
+    expect(field().value).toBe('27 lb ft');
+    expect(text()).toBe('27 lb ft');
+    expect(unit().value).toBe('lbf·ft');
+    await leave();
+    expect(field().value).toBe('27');
+    await type('28');
+    expect(text()).toBe('28 lbf·ft');
+  });
+
+  it('leaves the figure as it is when another unit is chosen', async () => {
+    await type('27');
+    await choose('lbf·ft');
+    expect(text()).toBe('27 lbf·ft');
+    expect(field().value).toBe('27');
+  });
+
+  it('keeps the chosen unit while there is no figure yet', async () => {
+    await choose('kgf·m');
+    expect(text()).toBe('');
+    await type('3');
+    expect(text()).toBe('3 kgf·m');
+  });
+
+  it('keeps what it cannot read, and says so at the field', async () => {
+    await type('27 furlongs');
+    fixture.componentInstance.error.set('There is no unit “furlongs”.');
+    await leave();
+    expect(field().value).toBe('27 furlongs');
+    expect(field().getAttribute('aria-invalid')).toBe('true');
+    const notes = field().getAttribute('aria-describedby')!;
+    expect(page.querySelector(`#${notes}`)?.textContent).toContain('There is no unit “furlongs”.');
+  });
+
+  it('shows a unit of another kind as it was typed, rather than as one of its own', async () => {
+    await type('27 mm');
+    await leave();
+    expect(field().value).toBe('27 mm');
+    expect(unit().value).toBe('N·m');
+  });
+});
