@@ -18,6 +18,8 @@ export interface CapDrawingInput {
   readonly diagnosis?: Pick<CapDiagnosis, 'swaps'>;
   /** False while what is fitted is being entered: then nothing shows what ought to be. */
   readonly showRequired: boolean;
+  /** Where the rotor was seen to point, clockwise from the mark; by default it points at the first cylinder's post. */
+  readonly rotorAngle?: number;
   /** The outlet being asked about while entering. */
   readonly inHand?: string;
   /** How a side-outlet cap's outlets lie; by default in order of name, down the left and then the right. */

@@ -104,9 +104,12 @@ function besidePost(centre: Point, at: Point): Point {
   return { x: at.x + outward * 11, y: at.y + (at.y > centre.y + 1 ? 16 : -16) };
 }
 
-/** The rotor, its tip at the first cylinder's post, and the way it turns. */
-export function rotor({ centre, ring, leads }: CapLayout, rotation: Rotation): readonly Shape[] {
-  const angle = leads[0]?.row.angle ?? 0;
+/** The rotor, its tip at an angle or at the first cylinder's post, and the way it turns. */
+export function rotor(
+  { centre, ring, leads }: CapLayout,
+  rotation: Rotation,
+  angle = leads[0]?.row.angle ?? 0,
+): readonly Shape[] {
   const tip = -(ring - 11);
   const arm: Shape[] = [
     polygon(

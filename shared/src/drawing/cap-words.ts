@@ -77,8 +77,10 @@ function required(
     `${leads.length} posts at ${inWords(angles.map(degrees))} degrees clockwise from the mark.`,
     first === undefined
       ? ''
-      : `The rotor turns ${rotation} and points at the ${degrees(first.angle)} degree post, ` +
-        `cylinder ${first.cylinder}.`,
+      : input.rotorAngle === undefined
+        ? `The rotor turns ${rotation} and points at the ${degrees(first.angle)} degree post, ` +
+          `cylinder ${first.cylinder}.`
+        : `The rotor turns ${rotation} and was seen to point at ${degrees(input.rotorAngle)} degrees.`,
     ...(sideOutlets
       ? leads.map(({ row }) => `{Outlet} ${row.outlet} is joined to the ${degrees(row.angle)} degree post.`)
       : []),

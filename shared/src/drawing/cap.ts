@@ -37,10 +37,10 @@ export function drawCap(input: CapDrawingInput, options?: DrawingOptions): Drawi
   };
 }
 
-function requiredInside(layout: CapLayout, { request }: CapDrawingInput): readonly Shape[] {
+function requiredInside(layout: CapLayout, { request, rotorAngle }: CapDrawingInput): readonly Shape[] {
   return [
     ...(layout.sideOutlets ? conductors(layout) : []),
-    ...rotor(layout, rotationOnCap(request)),
+    ...rotor(layout, rotationOnCap(request), rotorAngle),
     ...posts(layout),
   ];
 }

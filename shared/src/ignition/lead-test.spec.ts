@@ -72,6 +72,12 @@ describe('a wire-core lead', () => {
     expect(leadTest({ ...copper, reading }).verdict).toBe(verdict);
   });
 
+  it('is judged by the maker’s limit for a whole lead, where there is one', () => {
+    const limited = { ...copper, whole: { high: ohms(5) } };
+    expect(leadTest({ ...limited, reading: ohms(4) }).verdict).toBe('pass');
+    expect(leadTest({ ...limited, reading: ohms(6) }).verdict).toBe('fail');
+  });
+
   it('has the resistance of its suppressors, and none is then wrong', () => {
     const suppressed = { ...copper, endFittings: kilohms(5) };
     expect(leadTest({ ...suppressed, reading: kilohms(4.6) }).verdict).toBe('pass');

@@ -20,9 +20,9 @@ export interface SoundLead {
 }
 
 /**
- * What a sound lead of its kind and length may read, `limits` in `unit`: a resistive one by the maker's resistance
- * per length plus the end fittings, within the maker's limits for a whole lead, if any; a wire-core one next to
- * nothing but its end fittings. Null where nothing of a resistive lead is known.
+ * What a sound lead of its kind and length may read, `limits` in `unit`: by the maker's resistance per length plus
+ * the end fittings, within the maker's limits for a whole lead, where there are any. Without either a wire-core lead
+ * may read next to nothing but its end fittings, and of a resistive one nothing is known: null.
  */
 export function soundLead(
   given: Readonly<Record<string, unknown>>,
@@ -33,7 +33,8 @@ export function soundLead(
   const fitted = given['endFittings'] === undefined ? 0 : ohms(given['endFittings'], 'endFittings');
   const byLength = readByLength(given['nominal'], length);
   const whole = readWhole(given['whole']);
-  const limits = kind === 'wire-core' ? wireCore(fitted) : resistive(byLength, whole, fitted);
+  const known = byMaker(byLength, whole, fitted);
+  const limits = known ?? (kind === 'wire-core' ? wireCore(fitted) : null);
   if (limits !== null && limits.low > limits.high) {
     throw new InputError(
       whole === undefined ? 'nominal.low' : 'whole.high',
@@ -43,7 +44,7 @@ export function soundLead(
   return {
     limits: limits && { low: fromSi(limits.low, unit), high: fromSi(limits.high, unit) },
     fitted,
-    assumed: assumedOf(kind, given['endFittings'] === undefined, fitted),
+    assumed: assumedOf(known === null && kind === 'wire-core', given['endFittings'] === undefined, fitted),
   };
 }
 
@@ -76,16 +77,16 @@ function wireCore(fitted: number): Range {
   return { low: fitted * (1 - fittingSpread), high: fitted * (1 + fittingSpread) + nearZero };
 }
 
-function resistive(byLength: Range | undefined, whole: Range | undefined, fitted: number): Range | null {
+function byMaker(byLength: Range | undefined, whole: Range | undefined, fitted: number): Range | null {
   const core = byLength && { low: byLength.low + fitted, high: byLength.high + fitted };
   if (core === undefined) return whole ?? null;
   if (whole === undefined) return core;
   return { low: Math.max(core.low, whole.low), high: Math.min(core.high, whole.high) };
 }
 
-function assumedOf(kind: LeadTestRequest['kind'], unsaid: boolean, fitted: number): readonly string[] {
+function assumedOf(byPractice: boolean, unsaid: boolean, fitted: number): readonly string[] {
   const ends = unsaid ? ['The end fittings have no resistance of their own.'] : [];
-  if (kind === 'resistive') return ends;
+  if (!byPractice) return ends;
   const spread =
     fitted > 0
       ? [`Suppressors in the end fittings may be ${fittingSpread * 100} % off: common practice.`]

@@ -1,0 +1,155 @@
+import type { Sighting, TdcAnswer, WhichTdcRequest } from '../contracts/calculations.js';
+import { InputError } from '../contracts/input-error.js';
+import type { Verdict } from '../contracts/verdict.js';
+import { whichTdc } from '../valve-train/which-tdc.js';
+import { defineWorking } from './define-working.js';
+import {
+  cylinderOf,
+  engineErrors,
+  firingCase,
+  firingOf,
+  timingCase,
+  timingOf,
+  type TypedFiring,
+} from './engine/engine-fields.js';
+import { assumedEven, printAngle } from './engine/engine-words.js';
+import type { CaseReader } from './read-case.js';
+import { sightingColumns, whichTdcSections } from './which-tdc-fields.js';
+import { writeRows } from './rows.js';
+import { spoken } from './wiring-map/spoken.js';
+
+const verdicts: Readonly<Record<TdcAnswer, Verdict>> = {
+  'compression-tdc': 'pass',
+  'exhaust-tdc': 'pass',
+  'cannot-tell': 'not-judged',
+  contradiction: 'doubtful',
+};
+const titles: Readonly<Record<TdcAnswer, string>> = {
+  'compression-tdc': 'Compression TDC',
+  'exhaust-tdc': 'Exhaust TDC',
+  'cannot-tell': 'Cannot be told yet',
+  contradiction: 'It contradicts itself',
+};
+
+/** Which of its two TDCs a cylinder is at, by what was seen. */
+export const whichTdcWorking = defineWorking({
+  key: 'which-tdc',
+  group: 'valve-timing',
+  title: 'Which TDC',
+  asks: 'Is this cylinder at compression or at exhaust TDC?',
+  sections: whichTdcSections,
+  example: {
+    typed: {
+      order: '1-5-3-6-2-4',
+      ivo: '10',
+      ivc: '50',
+      evo: '50',
+      evc: '10',
+      cylinder: '1',
+      seen: writeRows(
+        [
+          { position: '1', cylinder: '1', piston: 'top' },
+          { position: '1', cylinder: '6', rocking: 'yes' },
+        ],
+        sightingColumns.map(({ name }) => name),
+      ),
+    },
+    from: 'TM 5-6115-400-12, figure 3-11: No. 6’s valves are watched to set No. 1',
+  },
+  fromSpec: (document) => [
+    {
+      name: 'The first cylinder of the order',
+      typed: {
+        ...firingCase(document),
+        ...timingCase(document),
+        cylinder: String(document.engine.firingOrder.value[0] ?? ''),
+      },
+    },
+  ],
+  basis: [
+    'Where the valves’ events leave the crank, worked out as exact sets of angles; definition of the valve timing.',
+    'A companion’s valves rock at compression TDC: TM 5-6115-400-12, figure 3-11.',
+  ],
+  fieldOf: [...engineErrors, [/^sightings/, 'seen'], [/^marksTogether/, 'marks']],
+  answer: (read) => {
+    const firing = firingOf(read);
+    const request = requestOf(read, firing);
+    const { answer, reason, next, windows } = whichTdc(request);
+    return {
+      parts: [
+        { kind: 'judgement', of: titles[answer], verdict: verdicts[answer], reason: spoken(reason) },
+        ...(next === undefined
+          ? []
+          : [
+              {
+                kind: 'steps' as const,
+                heading: answer === 'cannot-tell' ? 'Look for this next' : 'Then',
+                steps: spoken(next).split(/(?<=\.) (?=[A-Z])/),
+              },
+            ]),
+        ...(windows.length === 0
+          ? []
+          : [
+              {
+                kind: 'facts' as const,
+                heading: 'Where it may stand in its own cycle, 0° its compression TDC',
+                facts: windows.map(([from, to], i) => ({
+                  name: windows.length === 1 ? 'From and to' : `Place ${i + 1}`,
+                  value: `${printAngle(from)} to ${printAngle(to)}`,
+                })),
+              },
+            ]),
+      ],
+      assumed: [
+        ...assumedEven(firing.intervals),
+        'Between two positions the crank was turned the normal way, by less than one turn.',
+        ...(read.numberIf('tolerance') === undefined
+          ? ['Everything seen may be 10° of crank off: common practice.']
+          : []),
+        ...(read.numberIf('about') === undefined ? ['The question is of the last position.'] : []),
+      ],
+      cautions: ['Take the plugs out and switch the ignition off before turning the engine by hand.'],
+    };
+  },
+});
+
+function requestOf(read: CaseReader, firing: TypedFiring): WhichTdcRequest {
+  const rows = read.rows('seen');
+  const positions = [...new Set(rows.map((row) => row.number('position')))].sort((a, b) => a - b);
+  const [about, tolerance] = [read.numberIf('about'), read.numberIf('tolerance')];
+  const marks = read.choice<'none' | 'compression' | 'exhaust'>('marks');
+  const asked = about === undefined ? undefined : positions.indexOf(about);
+  if (asked === -1)
+    throw new InputError('about', `Nothing was seen at that position; there are ${positions.join(', ')}.`);
+  return {
+    ...firing,
+    valveTiming: timingOf(read),
+    cylinder: cylinderOf(read.text('cylinder'), firing),
+    sightings: positions.map((position) =>
+      rows.filter((row) => row.number('position') === position).map((row) => sightingOf(row, firing)),
+    ),
+    ...(asked === undefined ? {} : { about: asked }),
+    ...(tolerance === undefined ? {} : { tolerance }),
+    ...(marks === 'none' ? {} : { marksTogether: marks }),
+  };
+}
+
+function sightingOf(row: CaseReader, firing: TypedFiring): Sighting {
+  const seen = <T extends string>(name: string): T | undefined => {
+    const chosen = row.choice<T | '-'>(name);
+    return chosen === '-' ? undefined : chosen;
+  };
+  const [inlet, exhaust] = [
+    seen<NonNullable<Sighting['inlet']>>('inlet'),
+    seen<NonNullable<Sighting['exhaust']>>('exhaust'),
+  ];
+  const piston = seen<NonNullable<Sighting['piston']>>('piston');
+  return {
+    cylinder: cylinderOf(row.text('cylinder'), firing),
+    ...(inlet && { inlet }),
+    ...(exhaust && { exhaust }),
+    ...(piston && { piston }),
+    ...(seen('rocking') === undefined ? {} : { rocking: true as const }),
+    ...(seen('pressure') === undefined ? {} : { pressure: true as const }),
+  };
+}
