@@ -1,3 +1,4 @@
+import { InputError } from '../contracts/input-error.js';
 import type { Quantity } from '../contracts/quantity.js';
 import { wrenchSetting } from '../fastening/wrench-setting.js';
 import { convert } from '../quantities/convert.js';
@@ -106,6 +107,9 @@ export const wrenchSettingWorking = defineWorking({
 
 function toDivision(setting: Quantity, division: Quantity): Quantity {
   const step = convert(division, setting.unit).value;
+  if (step <= 0 || step > setting.value) {
+    throw new InputError('division', 'A division is more than nothing and less than the setting.');
+  }
   return { value: Math.round(setting.value / step) * step, unit: setting.unit };
 }
 
