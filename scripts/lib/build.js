@@ -2,6 +2,7 @@
 // Builds what is out of date, which it knows by a fingerprint of everything that goes in.
 import { existsSync, readFileSync, writeFileSync } from 'node:fs';
 import { fingerprint } from './fingerprint.js';
+import { partOffline } from './offline.js';
 import { apiMain, clientBuilt, root } from './places.js';
 import { run, runQuietly, runTool } from './run.js';
 import { Trouble, say } from './say.js';
@@ -44,7 +45,8 @@ export const compile = async () => {
 export const buildPages = async (runner = run) => {
   const current = fingerprint(pages.inputs);
   const env = { ...process.env, NG_CLI_ANALYTICS: 'false' };
-  const code = await runTool('@angular/cli/bin/ng.js', ['build', '--no-progress'], { env, runner });
+  const built = await runTool('@angular/cli/bin/ng.js', ['build', '--no-progress'], { env, runner });
+  const code = built === 0 ? await partOffline(runner) : built;
   if (code === 0) writeFileSync(pages.stamp, current);
   return code;
 };
