@@ -5,7 +5,7 @@ import { limitDecision } from '../measuring/limit-decision.js';
 import { toSi } from '../quantities/convert.js';
 import { printQuantity } from '../quantities/print.js';
 import { requireOneOf, requireQuantity, requireRecord, requireYesOrNo } from '../quantities/require.js';
-import { nearZero, soundLead, type SoundLead } from './sound-lead.js';
+import { nearZero, roundedLimits, soundLead, type SoundLead } from './sound-lead.js';
 
 type Reading = Quantity | 'open' | 'short';
 type LeadKind = LeadTestRequest['kind'];
@@ -68,7 +68,19 @@ function judge(reading: Reading, kind: LeadKind, lead: SoundLead, uncertainty?: 
     const reason = `${printQuantity(reading)} is a resistance, so the core is whole; without the maker’s figure it cannot be judged further.`;
     return { verdict: 'not-judged', reason };
   }
-  const { low, high } = lead.limits;
+  return judgeWithin(reading, lead.limits, uncertainty);
+}
+
+type Limits = NonNullable<SoundLead['limits']>;
+
+/** Judged by the limits as they are, told with limits rounded inwards to what an ohmmeter shows. */
+function judgeWithin(reading: Quantity, limits: Limits, uncertainty?: Quantity): Judgement {
+  const exact = decide(reading, limits, uncertainty);
+  const told = decide(reading, roundedLimits(limits), uncertainty);
+  return told.verdict === exact.verdict ? told : exact;
+}
+
+function decide(reading: Quantity, { low, high }: Limits, uncertainty?: Quantity): Judgement {
   return limitDecision({
     value: reading,
     ...(low.value > 0 ? { low } : {}),

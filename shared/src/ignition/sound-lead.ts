@@ -2,7 +2,7 @@ import type { LeadTest, LeadTestRequest } from '../contracts/ignition-checks.js'
 import { InputError } from '../contracts/input-error.js';
 import type { Unit } from '../contracts/quantity.js';
 import { fromSi, toSi } from '../quantities/convert.js';
-import { printQuantity } from '../quantities/print.js';
+import { digitsFor, printQuantity, roundInwards } from '../quantities/print.js';
 import { requireQuantity, requireRecord } from '../quantities/require.js';
 
 /** A wire core with its joints reads less than this, and a resistive one more, ohms: common practice, no source. */
@@ -46,6 +46,18 @@ export function soundLead(
     fitted,
     assumed: assumedOf(known === null && kind === 'wire-core', given['endFittings'] === undefined, fitted),
   };
+}
+
+type Limits = NonNullable<LeadTest['limits']>;
+
+/** The limits rounded inwards to two digits past the width between them. */
+export function roundedLimits({ low, high }: Limits): Limits {
+  const digits = digitsFor({ tolerance: high.value - low.value });
+  const rounded = {
+    low: roundInwards(low, low.unit, digits, 'low'),
+    high: roundInwards(high, high.unit, digits, 'high'),
+  };
+  return rounded.low.value > rounded.high.value ? { low, high } : rounded;
 }
 
 interface Range {

@@ -65,7 +65,7 @@ export const dwellWorking = defineWorking({
       betweenSparks === undefined || closedFor === undefined
         ? []
         : [
-            { name: 'From spark to spark', value: milliseconds(betweenSparks.value) },
+            { name: 'Time from spark to spark', value: milliseconds(betweenSparks.value) },
             { name: 'Points closed', value: milliseconds(closedFor.value), note: 'the coil charges' },
           ];
     return {

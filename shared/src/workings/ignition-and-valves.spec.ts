@@ -58,7 +58,7 @@ describe('examples answer with what is printed', () => {
   it('timing marks: 0.35016 in', () => {
     // DMP1, T3-049: prints 0.3501.
     const answer = answerOf(timingMarksWorking);
-    expect(fact(answer, 'Distance along the rim')).toBe('0.350157 in');
+    expect(fact(answer, 'Distance along the rim')).toBe('0.350 in');
     expect(fact(answerOf(timingMarksWorking, { from: 'arc', arc: '0.350157 in' }), 'Angle')).toBe('6°');
   });
 
@@ -66,8 +66,8 @@ describe('examples answer with what is printed', () => {
     // LEAD-M, T2-067.
     const answer = answerOf(leadTestWorking);
     expect(judgement(answer)?.verdict).toBe('pass');
-    expect(fact(answer, 'Least that is right')).toBe('13.7795 kΩ');
-    expect(fact(answer, 'Most that is right')).toBe('19.685 kΩ');
+    expect(fact(answer, 'Least that is right')).toBe('13.78 kΩ');
+    expect(fact(answer, 'Most that is right')).toBe('19.68 kΩ');
     expect(judgement(answerOf(leadTestWorking, { shows: 'open' }))?.verdict).toBe('fail');
   });
 
@@ -102,10 +102,10 @@ describe('examples answer with what is printed', () => {
   it('clearance order: valve 1 when valve 8 is fully open', () => {
     // R9O, T3-020.
     const answer = answerOf(lashOrderWorking);
-    expect(fact(answer, 'Rule of 9')).toBe('holds');
+    expect(fact(answer, 'Rule of nine')).toBe('holds');
     const table = answer.parts.find((part) => part.kind === 'table');
     expect(table?.rows.map((row) => row[3])).toEqual(['8', '7', '6', '5', '4', '3', '2', '1']);
-    expect(fact(answerOf(lashOrderWorking, { valves: 'E I E I E I E I' }), 'Rule of 9')).toBeUndefined();
+    expect(fact(answerOf(lashOrderWorking, { valves: 'E I E I E I E I' }), 'Rule of nine')).toBeUndefined();
   });
 
   it('timing figures: lobe centres 106° and 114°', () => {
@@ -118,8 +118,8 @@ describe('examples answer with what is printed', () => {
   });
 
   it('stop: the pointer is 0.75° out', () => {
-    // DEG, T3-016, to a tenth of a degree.
-    expect(fact(answerOf(positiveStopWorking), 'Pointer to be moved by')).toBe('0.8°');
+    // DEG, T3-016.
+    expect(fact(answerOf(positiveStopWorking), 'Pointer to be moved by')).toBe('0.75°');
   });
 
   it('shim: 2.40 mm', () => {

@@ -143,6 +143,8 @@ function nearTdc(crank: number, { firingOrder, intervals }: TypedFiring): string
   return ` (${printAngle(at - passed.firesAt)} past the firing TDC of ${cylinderName(passed.cylinder)})`;
 }
 
+const ruleNames: Readonly<Record<number, string>> = { 9: 'nine', 13: 'thirteen', 17: 'seventeen' };
+
 /** The rule of nine, of thirteen and so on, where it holds. */
 function ruleOf({ mates }: LashOrder): readonly {
   readonly kind: 'facts';
@@ -152,7 +154,7 @@ function ruleOf({ mates }: LashOrder): readonly {
   const [sum] = sums;
   if (sums.size !== 1 || sum === undefined || Number.isNaN(sum)) return [];
   const fact = {
-    name: `Rule of ${sum}`,
+    name: `Rule of ${ruleNames[sum] ?? sum}`,
     value: 'holds',
     note: `the valve to set and the one fully open add up to ${sum}, because the valves are laid out as a mirror`,
   };

@@ -1,5 +1,6 @@
 import type { SpecDocument } from '../contracts/spec.js';
 import { leadTest } from '../ignition/lead-test.js';
+import { roundedLimits } from '../ignition/sound-lead.js';
 import { printQuantity } from '../quantities/print.js';
 import { defineWorking } from './define-working.js';
 import type { CaseReader } from './read-case.js';
@@ -120,8 +121,8 @@ export const leadTestWorking = defineWorking({
               {
                 kind: 'facts' as const,
                 facts: [
-                  { name: 'Least that is right', value: printQuantity(limits.low) },
-                  { name: 'Most that is right', value: printQuantity(limits.high) },
+                  { name: 'Least that is right', value: printQuantity(roundedLimits(limits).low) },
+                  { name: 'Most that is right', value: printQuantity(roundedLimits(limits).high) },
                 ],
               },
             ]),

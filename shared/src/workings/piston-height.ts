@@ -2,7 +2,7 @@ import type { SpecDocument } from '../contracts/spec.js';
 import { printNumber, printQuantity } from '../quantities/print.js';
 import { pistonHeight } from '../valve-train/piston-position.js';
 import { defineWorking } from './define-working.js';
-import { printAngle } from './engine/engine-words.js';
+import { printAngle, printLength } from './engine/engine-words.js';
 import type { WorkingCase } from './working.js';
 
 const byHeight = ({ from }: WorkingCase): boolean => from === 'height';
@@ -90,10 +90,10 @@ export const pistonHeightWorking = defineWorking({
               value: `${printNumber(answer.crank, 2)}°`,
               note: 'from TDC, the same before and after',
             },
-            { name: 'Piston below its top', value: printQuantity(answer.fromTop) },
+            { name: 'Piston below its top', value: printLength(answer.fromTop, 1) },
             {
               name: 'Pin height',
-              value: printQuantity(answer.pinHeight),
+              value: printLength(answer.pinHeight, 1),
               note: 'from the crank’s centre to the {gudgeon pin}’s',
             },
           ],

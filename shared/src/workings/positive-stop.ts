@@ -29,35 +29,33 @@ export const positiveStopWorking = defineWorking({
       forward: read.number('forward'),
       back: read.number('back'),
     });
-    const after = (angle: number): string =>
-      printAngle(Math.round((((angle % 360) + 360) % 360) * 100) / 100);
     const move =
       correction === 0
         ? []
         : [
-            `Move the pointer, or the wheel under it, until it shows 0° there: by ${printAngle(Math.abs(correction))}.`,
+            `Move the pointer, or the wheel under it, until it shows 0° there: by ${printAngle(Math.abs(correction), 2)}.`,
           ];
     return {
       parts: [
         {
           kind: 'facts',
           facts: [
-            { name: 'True TDC is where the wheel shows', value: printAngle(tdc) },
+            { name: 'True TDC is where the wheel shows', value: printAngle(tdc, 2) },
             {
               name: 'Pointer to be moved by',
-              value: printAngle(correction),
+              value: printAngle(correction, 2),
               note: correction === 0 ? 'it is right' : 'added to what the wheel shows',
             },
-            { name: 'The stop is from TDC', value: printAngle(half), note: 'either side' },
+            { name: 'The stop is from TDC', value: printAngle(half, 2), note: 'either side' },
           ],
         },
         {
           kind: 'steps',
           heading: 'To finish',
           steps: [
-            `Take the stop out and turn the crank the normal way until the wheel shows ${printAngle(tdc)}.`,
+            `Take the stop out and turn the crank the normal way until the wheel shows ${printAngle(tdc, 2)}.`,
             ...move,
-            `Check: with the stop in again the two readings must be ${after(-half)} and ${after(half)}.`,
+            `Check: with the stop in again the two readings must be ${printAngle(360 - half, 2)} and ${printAngle(half, 2)}.`,
           ],
         },
       ],

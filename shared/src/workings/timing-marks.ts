@@ -1,7 +1,6 @@
 import { timingMarks } from '../ignition/timing-marks.js';
-import { printQuantity } from '../quantities/print.js';
 import { defineWorking } from './define-working.js';
-import { printAngle } from './engine/engine-words.js';
+import { printAngle, printLength } from './engine/engine-words.js';
 import type { WorkingCase } from './working.js';
 
 const byArc = ({ from }: WorkingCase): boolean => from === 'arc';
@@ -72,10 +71,10 @@ export const timingMarksWorking = defineWorking({
             { name: 'Angle', value: printAngle(angle), note: 'of crank' },
             {
               name: 'Distance along the rim',
-              value: printQuantity(arc),
+              value: printLength(arc),
               note: 'measured round it, not across',
             },
-            { name: 'One degree', value: printQuantity(arcPerDegree) },
+            { name: 'One degree', value: printLength(arcPerDegree, 1) },
           ],
         },
         {

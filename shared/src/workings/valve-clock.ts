@@ -12,7 +12,7 @@ import {
   timingFields,
   timingOf,
 } from './engine/engine-fields.js';
-import { assumedEven, printAngle, stateWords } from './engine/engine-words.js';
+import { assumedEven, printAngle, printLength, stateWords } from './engine/engine-words.js';
 
 /** What every cylinder does at one crank angle. */
 export const valveClockWorking = defineWorking({
@@ -103,9 +103,7 @@ export const valveClockWorking = defineWorking({
             printAngle(one.phase),
             stateWords[one.inlet],
             stateWords[one.exhaust],
-            ...(one.pistonFromTop === undefined
-              ? []
-              : [printQuantity(one.pistonFromTop, { digits: one.pistonFromTop.unit === 'in' ? 3 : 2 })]),
+            ...(one.pistonFromTop === undefined ? [] : [printLength(one.pistonFromTop)]),
           ]),
         },
         {

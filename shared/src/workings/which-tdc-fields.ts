@@ -58,11 +58,11 @@ export const whichTdcSections: readonly FieldSection[] = [
         name: 'marks',
         label: 'Timing marks together at that position',
         choices: [
-          { value: 'none', words: 'not looked at' },
+          notLooked,
           { value: 'compression', words: 'yes: they mean compression TDC' },
           { value: 'exhaust', words: 'yes: they mean exhaust TDC' },
         ],
-        starts: 'none',
+        starts: '-',
       },
       {
         kind: 'number',

@@ -1,4 +1,4 @@
-import type { Sighting, TdcAnswer, WhichTdcRequest } from '../contracts/calculations.js';
+import type { Sighting, TdcAnswer, WhichTdc, WhichTdcRequest } from '../contracts/calculations.js';
 import { InputError } from '../contracts/input-error.js';
 import type { Verdict } from '../contracts/verdict.js';
 import { whichTdc } from '../valve-train/which-tdc.js';
@@ -93,9 +93,9 @@ export const whichTdcWorking = defineWorking({
               {
                 kind: 'facts' as const,
                 heading: 'Where it may stand in its own cycle, 0° its compression TDC',
-                facts: windows.map(([from, to], i) => ({
-                  name: windows.length === 1 ? 'From and to' : `Place ${i + 1}`,
-                  value: `${printAngle(from)} to ${printAngle(to)}`,
+                facts: rangesOf(windows).map((value, i, all) => ({
+                  name: all.length === 1 ? 'From and to' : `Place ${i + 1}`,
+                  value,
                 })),
               },
             ]),
@@ -113,11 +113,19 @@ export const whichTdcWorking = defineWorking({
   },
 });
 
+/** The windows as ranges; one that was split at 720° is one again. */
+function rangesOf(windows: WhichTdc['windows']): readonly string[] {
+  const [first, last] = [windows[0], windows.at(-1)];
+  const isSplit = windows.length > 1 && first?.[0] === 0 && last?.[1] === 720;
+  const joined = isSplit && first && last ? [...windows.slice(1, -1), [last[0], first[1]] as const] : windows;
+  return joined.map(([from, to]) => `${printAngle(from)} to ${printAngle(to)}`);
+}
+
 function requestOf(read: CaseReader, firing: TypedFiring): WhichTdcRequest {
   const rows = read.rows('seen');
   const positions = [...new Set(rows.map((row) => row.number('position')))].sort((a, b) => a - b);
   const [about, tolerance] = [read.numberIf('about'), read.numberIf('tolerance')];
-  const marks = read.choice<'none' | 'compression' | 'exhaust'>('marks');
+  const marks = read.choice<'-' | 'compression' | 'exhaust'>('marks');
   const asked = about === undefined ? undefined : positions.indexOf(about);
   if (asked === -1)
     throw new InputError('about', `Nothing was seen at that position; there are ${positions.join(', ')}.`);
@@ -130,7 +138,7 @@ function requestOf(read: CaseReader, firing: TypedFiring): WhichTdcRequest {
     ),
     ...(asked === undefined ? {} : { about: asked }),
     ...(tolerance === undefined ? {} : { tolerance }),
-    ...(marks === 'none' ? {} : { marksTogether: marks }),
+    ...(marks === '-' ? {} : { marksTogether: marks }),
   };
 }
 

@@ -23,16 +23,20 @@ export function typedLines(working: Working, typed: WorkingCase): readonly Typed
     .filter(({ value }) => value !== '');
 }
 
+/** The value of a choice that says nothing, such as `not looked at`: it is left out with the fields left open. */
+const nothingChosen = '-';
+
 function typedValue(field: WorkingField, text: string): string {
   switch (field.kind) {
     case 'choice': {
       const value = text === '' ? field.starts : text;
+      if (value === nothingChosen) return '';
       return field.choices.find((choice) => choice.value === value)?.words ?? value;
     }
     case 'quantity':
       return /^[^a-zµ°Ω"']*$/i.test(text) && text !== '' ? `${text} ${field.unit}` : text;
     case 'number':
-      return text === '' ? '' : text + (field.counts === '°' ? '°' : ` ${field.counts}`);
+      return text === '' ? '' : (text + (field.counts === '°' ? '°' : ` ${field.counts}`)).trim();
     case 'turn':
       return text === '' ? '' : `${text}°`;
     case 'rows':

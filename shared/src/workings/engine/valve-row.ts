@@ -19,7 +19,7 @@ export function readValveRow(
 ): readonly ListedValve[] {
   const letters = [...typed.toUpperCase().replace(/[\s,;–-]+/g, '')];
   if (letters.some((letter) => letter !== 'E' && letter !== 'I')) {
-    throw new InputError('valves', 'Write E for each exhaust valve and I for each {inlet} valve: E I I E.');
+    throw new InputError('valves', 'Write E for each exhaust valve and I for each inlet valve: E I I E.');
   }
   const inOrder = cylindersOf(cylinders, firing);
   const each = letters.length / inOrder.length;
