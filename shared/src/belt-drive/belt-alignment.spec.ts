@@ -78,7 +78,7 @@ describe('the limits', () => {
 
   it('stand in the reason', () => {
     expect(beltAlignment(drive(0, 0, 3, 3)).reason).toMatch(
-      /3\smm out of one plane, and may be at most 2\.61\smm/,
+      /3\smm out of one plane \(at most 2\.61\smm over this span\)/,
     );
   });
 });

@@ -44,9 +44,9 @@ function moveWords(
   shims: number | undefined,
 ): string {
   const isInPlane = Math.abs(offset) / span <= limit.offsetPerSpan;
-  if (isInPlane) return Math.abs(angle) <= limit.angle ? `${name} may stay as it is.` : '';
+  if (isInPlane) return Math.abs(angle) <= limit.angle ? `The ${name} may stay as it is.` : '';
   const way = offset > 0 ? 'forward, towards the straight edge' : 'back, away from the straight edge';
-  const move = `Move ${name} ${printLength(Math.abs(offset), unit)} ${way}`;
+  const move = `Move the ${name} ${printLength(Math.abs(offset), unit)} ${way}`;
   if (shims === undefined || shim === undefined || shims === 0) return `${move}.`;
   const count = shims === 1 ? 'one shim' : `${shims} shims`;
   const left = Math.abs(Math.abs(offset) - shims * shim);
@@ -58,7 +58,7 @@ function turnWords({ name, diameter, unit }: Driven, { angle }: Misalignment, li
   if (Math.abs(angle) <= limit.angle) return '';
   const swing = diameter * Math.tan((Math.abs(angle) * Math.PI) / 180);
   const way = angle > 0 ? 'back' : 'forward';
-  return `Turn ${name} until its far rim has come ${printLength(swing, unit)} ${way} against its near one.`;
+  return `Turn the ${name} until its far rim has come ${printLength(swing, unit)} ${way} against its near one.`;
 }
 
 function roomWords({ unit }: Driven, offset: number, room: number | undefined): string {

@@ -17,8 +17,18 @@ export function judgeLine(
 ): Judgement {
   const isStraight = Math.abs(angle) <= limit.angle + noise;
   const isInPlane = Math.abs(offset) / span <= limit.offsetPerSpan + noise;
-  const allowed = printLength(limit.offsetPerSpan * span, unit);
-  const off = `The grooves are ${printLength(Math.abs(offset), unit)} out of one plane, ${isInPlane ? 'of' : 'and may be'} at most ${allowed} over this span`;
-  const turned = `they are turned ${printNumber(Math.abs(angle), 2)}° to each other, ${isStraight ? 'of' : 'and may be'} at most ${printNumber(limit.angle, 2)}°`;
-  return { verdict: isStraight && isInPlane ? 'pass' : 'fail', reason: `${off}; ${turned}.` };
+  const out = lengths(Math.abs(offset), limit.offsetPerSpan * span, unit);
+  const turned = `turned ${printNumber(Math.abs(angle), 2)}° to each other (at most ${printNumber(limit.angle, 2)}°)`;
+  return {
+    verdict: isStraight && isInPlane ? 'pass' : 'fail',
+    reason: `The grooves are ${out.found} out of one plane (at most ${out.allowed} over this span) and ${turned}.`,
+  };
+}
+
+/** Both printed alike, with a digit more where they would look the same. */
+function lengths(found: number, allowed: number, unit: Unit): { found: string; allowed: string } {
+  const coarse = { found: printLength(found, unit), allowed: printLength(allowed, unit) };
+  return coarse.found === coarse.allowed
+    ? { found: printLength(found, unit, 4), allowed: printLength(allowed, unit, 4) }
+    : coarse;
 }

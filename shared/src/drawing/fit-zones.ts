@@ -17,11 +17,11 @@ const width = 340;
 const top = 62;
 const tall = 120;
 const foot = top + tall;
-const zoneWidth = 50;
-const holeAt = 88;
-const shaftAt = 202;
-const leastAt = 154;
-const mostAt = 186;
+const zoneWidth = 44;
+const holeAt = 76;
+const shaftAt = 220;
+const leastAt = 148;
+const mostAt = 192;
 
 /** Metres, from a size near the parts' own, so that no digits are lost. */
 interface Zones {
@@ -32,8 +32,8 @@ interface Zones {
 }
 
 /**
- * The zones in which a hole and a shaft may lie, side by side on one scale of sizes, with the least and the most
- * clearance between them. The drawing states its scale by a bar.
+ * The zones in which a hole and a shaft may lie, side by side on one scale of sizes, with the tightest and the
+ * loosest that they can be. The drawing states its scale by a bar.
  */
 export function drawFitZones(input: FitZonesInput, options?: DrawingOptions): Drawing {
   const words = wording(options);
@@ -135,8 +135,8 @@ function headings(): readonly Shape[] {
     text(x, 22, word, { anchor: 'middle', weight, ink: weight === 600 ? 'ink' : 'ink-2' });
   return [
     one(holeAt + zoneWidth / 2 - 10, 'hole', 600),
-    one(leastAt - 4, 'least', 400),
-    one(mostAt + 6, 'most', 400),
+    one(leastAt - 2, 'tightest', 400),
+    one(mostAt + 8, 'loosest', 400),
     one(shaftAt + zoneWidth / 2 + 10, 'shaft', 600),
   ];
 }
@@ -162,9 +162,9 @@ function scaleBar(
 function answerLines({ least, most }: Fit, words: Wording): readonly Shape[] {
   const one = (y: number, word: string, quantity: Quantity): readonly Shape[] => [
     text(12, y, word, { ink: 'ink-2' }),
-    text(52, y, clearance(quantity, words), { weight: 600 }),
+    text(70, y, clearance(quantity, words), { weight: 600 }),
   ];
-  return [...one(foot + 38, 'least', least), ...one(foot + 58, 'most', most)];
+  return [...one(foot + 38, 'tightest', least), ...one(foot + 58, 'loosest', most)];
 }
 
 function clearance({ value, unit }: Quantity, { figure }: Wording): string {

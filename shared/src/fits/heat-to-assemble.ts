@@ -81,7 +81,7 @@ function readHeat(given: Readonly<Record<string, unknown>>): Heat {
   const coldest = temperatureIf(given, 'coldest');
   if (by === 'both') {
     if (coldest === undefined) {
-      throw new InputError('coldest', 'Say how cold the shaft is made before the hub is heated.');
+      throw new InputError('coldest', 'Say how cold the inner part is made before the outer one is heated.');
     }
     if (toSi(coldest) >= toSi(room)) throw new InputError('coldest', 'This must be colder than the room.');
   }
@@ -108,12 +108,12 @@ function shaftDrop({ by, coldest, room, diameter, shaft }: Heat, needed: number)
 
 function refuseImpossible(hub: number, shaft: number): void {
   if (shaft <= 0) {
-    throw new InputError('by', 'No cold shrinks the shaft so far: heat the hub, or do both.');
+    throw new InputError('by', 'No cold shrinks the inner part so far: heat the outer one, or do both.');
   }
   if (hub > hottest + 273.15) {
     throw new InputError(
       'by',
-      `The hub would have to be over ${hottest} °C: this interference is too large.`,
+      `The outer part would have to be over ${hottest} °C: this interference is too large.`,
     );
   }
 }

@@ -47,7 +47,7 @@ export function judgeHeat(
 
 function hubFinding({ rise, hub, hottestAllowed }: HeatWorkedOut): readonly Finding[] {
   if (rise === 0) return [];
-  const to = `Heat the hub to ${shown(hub)}, ${risen(rise, hub.unit)} above the room`;
+  const to = `Heat the outer part to ${shown(hub)}, ${risen(rise, hub.unit)} above the room`;
   if (hottestAllowed === undefined) {
     return [{ verdict: 'not-judged', words: `${to}; nothing says how hot it may get.` }];
   }
@@ -64,7 +64,7 @@ function hubFinding({ rise, hub, hottestAllowed }: HeatWorkedOut): readonly Find
 
 function shaftFinding({ drop, shaft, coldestAllowed }: HeatWorkedOut): readonly Finding[] {
   if (drop === 0) return [];
-  const to = `Cool the shaft to ${shown(shaft)}, ${risen(drop, shaft.unit)} below the room`;
+  const to = `Cool the inner part to ${shown(shaft)}, ${risen(drop, shaft.unit)} below the room`;
   if (coldestAllowed === undefined) {
     return [{ verdict: 'not-judged', words: `${to}; nothing says how cold it may get.` }];
   }

@@ -69,11 +69,14 @@ function side({ form, width, play, unit }: KeyInPlace, where: 'shaft' | 'hub'): 
       words: `The key has ${figure} of play in the ${where}, and a free fit has at most ${printed(most, unit)}: ${harm}.`,
     };
   }
-  const words =
-    found < 0
-      ? `The key is ${figure} tight in the ${where}, as a slot may be.`
-      : `The key has ${figure} of play in the ${where}, of at most ${printed(most, unit)}.`;
-  return { verdict: 'pass', words };
+  return { verdict: 'pass', words: goodWords(found, where, figure, printed(most, unit)) };
+}
+
+function goodWords(found: number, where: 'shaft' | 'hub', figure: string, most: string): string {
+  if (found < 0) return `The key is ${figure} tight in the ${where}, as a slot may be.`;
+  return found === 0
+    ? `The key just fills its slot in the ${where}.`
+    : `The key has ${figure} of play in the ${where} (at most ${most}).`;
 }
 
 function top({ form, play, standsOut, unit }: KeyInPlace): Finding {
@@ -100,8 +103,8 @@ function top({ form, play, standsOut, unit }: KeyInPlace): Finding {
     : { verdict: 'pass', words: `Over the key ${figure} is free.` };
 }
 
-/** Four significant digits: one past what a micrometer reads on a play. */
+/** Three significant digits: what a micrometer reads on a play. */
 function printed(length: number, unit: Unit): string {
   const { value } = fromSi(length, unit);
-  return printQuantity({ value: Number(value.toPrecision(4)), unit });
+  return printQuantity({ value: Number(value.toPrecision(3)), unit });
 }
