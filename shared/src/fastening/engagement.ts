@@ -3,6 +3,7 @@ import type { Judgement } from '../contracts/verdict.js';
 import type { Quantity } from '../contracts/quantity.js';
 import { fromSi, toSi } from '../quantities/convert.js';
 import { printNumber, printQuantity } from '../quantities/print.js';
+import { printLength } from './print-length.js';
 import { leastEngagement } from './tables/least-engagement.js';
 import type { Thread } from './thread.js';
 
@@ -23,11 +24,8 @@ export function judgeEngagement(
 ): Judgement {
   const { diameters, words } = leastEngagement[material];
   const needed = engagementNeeded(thread, material);
-  const print = (metres: number): string =>
-    printQuantity(fromSi(metres, engagement?.unit ?? thread.nominal.unit), {
-      digits: (engagement?.unit ?? thread.nominal.unit) === 'in' ? 3 : 1,
-    });
-  const least = `${print(needed)} (${diameters} × the diameter, common practice)`;
+  const unit = engagement?.unit ?? thread.nominal.unit;
+  const least = `${printLength(fromSi(needed, unit))} (${diameters} × the diameter, common practice)`;
   if (engagement === undefined) {
     return {
       verdict: 'not-judged',

@@ -30,7 +30,7 @@ const spellings: Readonly<Record<string, Series>> = {
 
 const written = new RegExp(
   '^(?<number>no\\.? ?|#)?(?<size>(?:\\d{1,2}[ -])?\\d{1,2}/\\d{1,2}|\\d{1,2}) ?(?:"|in(?:ch)?\\b)?' +
-    '(?: ?[-x×] ?(?<perInch>\\d{1,2})(?: ?tpi)?)?(?: (?<series>[a-z]{1,9}))?\\.?$',
+    '(?: ?[-x×] ?(?<perInch>\\d{1,2})(?: ?tpi)?)?(?: ?(?<series>[a-z]{1,9}))?\\.?$',
   'i',
 );
 

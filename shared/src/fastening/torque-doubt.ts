@@ -42,7 +42,7 @@ interface Given extends ClampCase {
  * `nutFactorSpread`, `use`, `printedFor`, `tapped.material`, `tapped.engagement`
  * Source: T = K·d·F with F = 75 % of proof, reference TQ-E; proof stress ISO 898-1:2013 and SAE J429; the bounds of
  * 25 and 90 % and the nut factors common practice, no source.
- * Example: 30.9 lbf·ft, 3/8-16 UNC, SAE 5, dry: 4941 lbf, 75 % of proof.
+ * Example: 30.88 lbf·ft, 3/8-16 UNC, SAE 5, dry: 4941 lbf, 75 % of proof.
  */
 export function torqueDoubt(request: TorqueDoubtRequest): TorqueDoubt {
   const given = requireGiven(request);

@@ -104,7 +104,7 @@ function percent(share: number): string {
 /** What becomes of the clamp load where a torque for one condition is used in another. */
 export function changeInWords(printedFor: NutFactor, used: NutFactor): string {
   const change = printedFor.factor / used.factor;
-  const condition = `The figure is printed for threads ${printedFor.words}`;
-  if (Math.abs(change - 1) < 1e-9) return `${condition}, as they are used.`;
+  const condition = `The figure is printed for use ${printedFor.words}`;
+  if (Math.abs(change - 1) < 1e-9) return `${condition}, as it is used.`;
   return `${condition}; used ${used.words} it clamps ${printNumber(change, 2)} times as hard as was meant.`;
 }

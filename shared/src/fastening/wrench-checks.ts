@@ -1,7 +1,8 @@
 import type { WrenchSuits } from '../contracts/fastening.js';
 import type { Quantity } from '../contracts/quantity.js';
 import { convert } from '../quantities/convert.js';
-import { digitsFor, printNumber, printQuantity } from '../quantities/print.js';
+import { printNumber, printQuantity } from '../quantities/print.js';
+import { printFigure } from './print-figure.js';
 import type { TorqueLimits } from './torque-limits.js';
 import type { wrenchKinds } from './wrench-kinds.js';
 
@@ -26,8 +27,7 @@ const lowestPoint = 0.2;
 /** The torque lies in the range; in the lowest fifth of it the maker alone vouches for the wrench. */
 export function checkRange({ torque, range }: WrenchCase): Check {
   const [low, high] = [convert(range.low, torque.unit), convert(range.high, torque.unit)];
-  const digits = { digits: digitsFor({ tolerance: high.value / 10 }) };
-  const span = `${printQuantity(low, digits)} to ${printQuantity(high, digits)}`;
+  const span = `${printFigure(low)} to ${printFigure(high)}`;
   const isInside = torque.value >= low.value * (1 - noise) && torque.value <= high.value * (1 + noise);
   if (!isInside) {
     return {
@@ -51,8 +51,7 @@ export function checkRange({ torque, range }: WrenchCase): Check {
 export function checkDeviation({ torque, limits, deviation }: WrenchCase): Check {
   const off = torque.value * deviation;
   const share = `±${printNumber(deviation * 100, 1).replace(/\.0$/, '')} %`;
-  const digits = { digits: digitsFor({ tolerance: off }) };
-  const print = (value: number): string => printQuantity({ value, unit: torque.unit }, digits);
+  const print = (value: number): string => printFigure({ value, unit: torque.unit });
   const delivers = `With ${share} it may deliver ${print(torque.value - off)} to ${print(torque.value + off)}`;
   const check = (verdict: Check['verdict'], words: string): Check => ({
     of: 'deviation',

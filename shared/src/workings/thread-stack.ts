@@ -1,4 +1,5 @@
 import type { TappedMaterial, ThreadStack, ThreadStackRequest } from '../contracts/fastening.js';
+import type { Quantity } from '../contracts/quantity.js';
 import { drawThreadStack } from '../drawing/thread-stack.js';
 import { printLength } from '../fastening/print-length.js';
 import { threadStack } from '../fastening/thread-stack.js';
@@ -153,7 +154,12 @@ function factsOf(answer: ThreadStack): readonly { readonly name: string; readonl
       name: 'Engaged',
       value: `${printLength(engagement)}, ${printNumber(engagementInDiameters, 2)} × the diameter`,
     },
-    ...(spare === undefined ? [] : [{ name: 'Thread left below the bolt', value: printLength(spare) }]),
+    ...(spare === undefined ? [] : [spareFact(spare)]),
     { name: 'Bolt needed, at least', value: printLength(lengthNeeded) },
   ];
 }
+
+const spareFact = (spare: Quantity): { readonly name: string; readonly value: string } =>
+  spare.value < 0
+    ? { name: 'Bolt past the full thread', value: printLength({ ...spare, value: -spare.value }) }
+    : { name: 'Thread left below the bolt', value: printLength(spare) };

@@ -10,7 +10,8 @@ import { usualSpread } from '../fastening/tables/nut-factors.js';
 import { toSi } from '../quantities/convert.js';
 import { printNumber, printQuantity } from '../quantities/print.js';
 import { defineWorking } from './define-working.js';
-import { percent, printFigure, printInBoth, typed } from './fastening/figures.js';
+import { percent, printInBoth, typed } from './fastening/figures.js';
+import { printFigure } from '../fastening/print-figure.js';
 import { casesByThread } from './fastening/groups-of-spec.js';
 import { knownGrade, torqueDoubtSections } from './fastening/torque-doubt-fields.js';
 import { conditionOf, threadLockFactor } from './fastening/condition.js';
@@ -67,7 +68,7 @@ export const torqueDoubtWorking = defineWorking({
           : [{ kind: 'judgement' as const, of: 'Female thread', ...doubt.tapped }]),
       ],
       assumed: [
-        ...(request.nutFactorSpread === undefined
+        ...(request.nutFactorSpread === undefined && doubt.preload !== null
           ? [`The nut factor may be ${usualSpread * 100} % off either way: common practice, no source.`]
           : []),
         ...(read.choice('condition') === 'thread-lock'

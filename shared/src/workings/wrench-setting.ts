@@ -5,7 +5,8 @@ import { convert } from '../quantities/convert.js';
 import { printNumber } from '../quantities/print.js';
 import { defineWorking, type WorkedOut } from './define-working.js';
 import { torqueField } from './fastening/fields.js';
-import { newtonMetresBeside, printFigure } from './fastening/figures.js';
+import { newtonMetresBeside } from './fastening/figures.js';
+import { printFigure } from '../fastening/print-figure.js';
 import { casesOfGroups, torqueOfGroup } from './fastening/groups-of-spec.js';
 
 /** What a torque wrench is set to with an adapter or crow-foot on it. */
@@ -126,11 +127,15 @@ function nearestDivision(
 }
 
 function howToPull(angle: number): readonly string[] {
-  const square = Math.abs(Math.cos((angle * Math.PI) / 180)) < 1e-9;
-  return [
-    square
+  const along = Math.cos((angle * Math.PI) / 180);
+  const how =
+    Math.abs(along) < 1e-9
       ? 'Keep the adapter square to the wrench: the setting is then the torque itself.'
-      : `Keep the adapter at ${printNumber(angle, 1).replace(/\.0$/, '')}° to the wrench: another angle is another torque.`,
+      : Math.abs(along) > 1 - 1e-9
+        ? `Keep the adapter in line with the wrench, ${along > 0 ? 'away from' : 'back towards'} the hand.`
+        : `Keep the adapter at ${printNumber(angle, 1).replace(/\.0$/, '')}° to the wrench: another angle is another torque.`;
+  return [
+    how,
     'Hold the wrench by the middle of its grip and pull steadily, once, to the click or the figure.',
   ];
 }

@@ -4,7 +4,8 @@ import { wrenchSuits } from '../fastening/wrench-suits.js';
 import { printNumber } from '../quantities/print.js';
 import { defineWorking } from './define-working.js';
 import { toleranceFields, torqueField } from './fastening/fields.js';
-import { percent, printFigure } from './fastening/figures.js';
+import { percent } from './fastening/figures.js';
+import { printFigure } from '../fastening/print-figure.js';
 import { casesOfGroups, torqueOfGroup } from './fastening/groups-of-spec.js';
 import { toleranceOf } from './fastening/tolerance.js';
 

@@ -1,13 +1,9 @@
 import type { Quantity, Unit } from '../../contracts/quantity.js';
 import { convert } from '../../quantities/convert.js';
-import { printNumber, printQuantity } from '../../quantities/print.js';
+import { printFigure } from '../../fastening/print-figure.js';
+import { printNumber } from '../../quantities/print.js';
 
-/** A figure that was worked out, to four digits: more than any wrench is good for. */
-export function printFigure({ value, unit }: Quantity): string {
-  return printQuantity({ value: Number(value.toPrecision(4)), unit });
-}
-
-/** The same in a second unit behind it: `24 lbf·ft (32.54 N·m)`. */
+/** A figure in a second unit behind its own: `24 lbf·ft (32.54 N·m)`. */
 export function printInBoth(quantity: Quantity, other: Unit): string {
   const first = printFigure(quantity);
   return quantity.unit === other ? first : `${first} (${printFigure(convert(quantity, other))})`;
