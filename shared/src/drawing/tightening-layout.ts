@@ -25,8 +25,7 @@ export function layOutFasteners(
   outline: PartOutline,
   top: number,
 ): TighteningLayout {
-  const xs = positions.map(({ x }) => x);
-  const ys = positions.map(({ y }) => y);
+  const { xs, ys } = boundsOf(positions, outline);
   const [wide, deep] = [spread(xs), spread(ys)];
   const across = tighteningWidth - 2 * (edgeMargin + 18);
   const most = outline === 'circle' ? 220 : across;
@@ -51,6 +50,24 @@ export function layOutFasteners(
     bottom: bodyTop + deep * scaleY,
   };
   return { box, places, radius: fastenerRadius([...places.values()]) };
+}
+
+/**
+ * What the drawing reaches across and down: to the outermost fasteners, or all round the circle that they stand
+ * on, for three or five do not reach it on every side.
+ */
+function boundsOf(
+  positions: readonly FastenerPosition[],
+  outline: PartOutline,
+): { readonly xs: readonly number[]; readonly ys: readonly number[] } {
+  const xs = positions.map(({ x }) => x);
+  const ys = positions.map(({ y }) => y);
+  if (outline !== 'circle') return { xs, ys };
+  const mean = (values: readonly number[]): number =>
+    values.reduce((sum, value) => sum + value, 0) / values.length;
+  const centre = { x: mean(xs), y: mean(ys) };
+  const radius = Math.max(...positions.map((place) => distance(place, centre)));
+  return { xs: [centre.x - radius, centre.x + radius], ys: [centre.y - radius, centre.y + radius] };
 }
 
 function spread(values: readonly number[]): number {

@@ -139,6 +139,17 @@ describe('a circle', () => {
     );
     expect(angles).toEqual([0, 45, 90, 135, 180, 225, 270, 315]);
   });
+
+  it.each([2, 3, 4, 5, 7, 16])('of %i stands in the middle of its flange', (count) => {
+    const flange = draw({ pattern: 'circle', count }, 'circle');
+    const { centre, radius } = partsOf(flange, 'outline')[0] as CircleShape;
+    const out = Array.from({ length: count }, (_, i) =>
+      distance(centre, fastener(flange, `${i + 1}`).centre),
+    );
+    for (const each of out) expect(each).toBeCloseTo(out[0] ?? NaN, 1);
+    expect(out[0]).toBeLessThan(radius - 14);
+    expect(centre.y + radius).toBeLessThanOrEqual(flange.height);
+  });
 });
 
 it.each([
