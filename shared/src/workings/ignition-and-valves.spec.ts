@@ -92,6 +92,8 @@ describe('examples answer with what is printed', () => {
   it('which TDC: No. 6’s valves rock while No. 1 is to be set', () => {
     // OVLM, T3-028.
     expect(judgement(answerOf(whichTdcWorking))).toMatchObject({ of: 'Compression TDC', verdict: 'pass' });
+    const clock = answerOf(whichTdcWorking).parts.find((part) => part.kind === 'drawing');
+    expect(clock?.drawing.description).toContain('Cylinder 6: inlet opening, exhaust closing.');
     const columns = sightingColumns.map(({ name }) => name);
     const seen = writeRows([{ position: '1', cylinder: '1', piston: 'top' }], columns);
     const untold = answerOf(whichTdcWorking, { seen });

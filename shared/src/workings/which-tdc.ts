@@ -1,6 +1,9 @@
 import type { Sighting, TdcAnswer, WhichTdc, WhichTdcRequest } from '../contracts/calculations.js';
 import { InputError } from '../contracts/input-error.js';
 import type { Verdict } from '../contracts/verdict.js';
+import { drawValveClock } from '../drawing/valve-clock.js';
+import { firingAngles } from '../valve-train/firing-angles.js';
+import { valveClock } from '../valve-train/valve-clock.js';
 import { whichTdc } from '../valve-train/which-tdc.js';
 import { defineWorking } from './define-working.js';
 import {
@@ -17,6 +20,7 @@ import type { CaseReader } from './read-case.js';
 import { sightingColumns, whichTdcSections } from './which-tdc-fields.js';
 import { writeRows } from './rows.js';
 import { spoken } from './wiring-map/spoken.js';
+import type { AnswerPart, WorkingOptions } from './working.js';
 
 const verdicts: Readonly<Record<TdcAnswer, Verdict>> = {
   'compression-tdc': 'pass',
@@ -71,7 +75,7 @@ export const whichTdcWorking = defineWorking({
     'A companion’s valves rock at compression TDC: TM 5-6115-400-12, figure 3-11.',
   ],
   fieldOf: [...engineErrors, [/^sightings/, 'seen'], [/^marksTogether/, 'marks']],
-  answer: (read) => {
+  answer: (read, options) => {
     const firing = firingOf(read);
     const request = requestOf(read, firing);
     const { answer, reason, next, windows } = whichTdc(request);
@@ -99,6 +103,7 @@ export const whichTdcWorking = defineWorking({
                 })),
               },
             ]),
+        ...clockThen(request, answer, options),
       ],
       assumed: [
         ...assumedEven(firing.intervals),
@@ -112,6 +117,26 @@ export const whichTdcWorking = defineWorking({
     };
   },
 });
+
+/** The whole engine with the cylinder at the TDC that was told. */
+function clockThen(
+  request: WhichTdcRequest,
+  answer: TdcAnswer,
+  options: WorkingOptions,
+): readonly AnswerPart[] {
+  if (answer !== 'compression-tdc' && answer !== 'exhaust-tdc') return [];
+  const { firingOrder, intervals, valveTiming, cylinder } = request;
+  const firing = firingAngles(firingOrder, intervals).find((one) => one.cylinder === cylinder);
+  const crank = ((firing?.firesAt ?? 0) + (answer === 'exhaust-tdc' ? 360 : 0)) % 720;
+  const clock = { firingOrder, valveTiming, crank, ...(intervals && { intervals }) };
+  return [
+    {
+      kind: 'drawing',
+      caption: 'What every valve does at that TDC: look whether it is so',
+      drawing: drawValveClock({ request: clock, clock: valveClock(clock) }, options),
+    },
+  ];
+}
 
 /** The windows as ranges; one that was split at 720° is one again. */
 function rangesOf(windows: WhichTdc['windows']): readonly string[] {
