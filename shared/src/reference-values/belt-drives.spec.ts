@@ -62,7 +62,6 @@ const run: Readonly<Record<string, { readonly actual: () => unknown; readonly ex
 };
 
 const notRun: Readonly<Record<string, string>> = {
-  'T6-001': 'The approximate length. The product works out the exact one alone (T6-002), 4 µm longer.',
   'T6-015': 'Slip of a belt a stage: nothing in the product works it out.',
 };
 
@@ -73,6 +72,13 @@ describe('belt drives', () => {
   });
 });
 
+// The source's own approximation, 2C + π/2 (D + d) + (D − d)²/4C; the product works out the exact length, and the
+// series goes on with a term in (D − d)⁴/C³, here 4.4 µm.
+it('T6-001: the exact length is the approximate one but for the next term of its series', () => {
+  const exact = belt(1600, 500, 12000).length.value / 1000;
+  expect(Math.abs(exact - Number(checks.get('T6-001')!.expected))).toBeLessThan(1.1 ** 4 / 12 ** 3);
+});
+
 it('leaves no value of the topic out', () => {
-  expect([...Object.keys(run), ...Object.keys(notRun)].sort()).toEqual([...checks.keys()].sort());
+  expect(['T6-001', ...Object.keys(run), ...Object.keys(notRun)].sort()).toEqual([...checks.keys()].sort());
 });

@@ -7,6 +7,7 @@ import { ringGap } from '../measuring/ring-gap.js';
 import { roundReadings } from '../measuring/round-readings.js';
 import { sweptVolume } from '../measuring/swept-volume.js';
 import { convert } from '../quantities/convert.js';
+import { pistonHeight } from '../valve-train/piston-position.js';
 import { apart } from './apart.js';
 import { checksOf } from './checks.js';
 
@@ -19,6 +20,9 @@ const ofJournal = (share: number): number =>
   formula({ formula: `${share} * d`, readings: { d: of(60, 'mm') }, unit: 'µm' }).value.value;
 const gapFor = (perBore: number): number =>
   ringGap({ bore: of(4.03, 'in'), gap: of(0.02, 'in'), perBore: { low: perBore } }).wanted.low!.value;
+
+const meanSpeed = (crankSpeed: number): number | undefined =>
+  pistonHeight({ stroke: of(90, 'mm'), rodLength: of(150, 'mm'), crank: 0, crankSpeed }).meanSpeed;
 
 /** A bore of 10 cm², so that a stroke in cm sweeps ten times as many cm³. */
 const tenSquare = of(Math.sqrt(40 / Math.PI), 'cm');
@@ -70,6 +74,8 @@ const run: Readonly<Record<string, { readonly actual: () => unknown; readonly ex
         gasket: { bore: tenSquare, thickness: of(0, 'mm') },
       }).chamberFor?.value,
   },
+  'T7-030': { actual: () => meanSpeed(3000) },
+  'T7-031': { actual: () => meanSpeed(7200) },
   'T7-029': {
     actual: () =>
       compressionRatio({
@@ -79,13 +85,9 @@ const run: Readonly<Record<string, { readonly actual: () => unknown; readonly ex
   },
 };
 
-const speed =
-  'Mean piston speed: of no use in putting an engine together, and the product has no unit of speed.';
 const notRun: Readonly<Record<string, string>> = {
   'T7-011':
     'Transcribed, no evidence. The ranges of one make of strip; the scale on the packet in hand counts, so no table is kept.',
-  'T7-030': speed,
-  'T7-031': speed,
 };
 
 describe('clearances and engine geometry', () => {
