@@ -1,7 +1,7 @@
 import { describe, expect, it } from 'vitest';
 import type { LashOrderRequest, ListedValve } from '../contracts/valve-figures.js';
 import { lashOrder } from '../valve-train/lash-order.js';
-import { partsOf, unreadable, wordsOf } from './drawing-case.js';
+import { allShapes, partsOf, unreadable, wordsOf } from './drawing-case.js';
 import { drawLashPlan } from './lash-plan.js';
 import type { Drawing } from './shapes.js';
 
@@ -43,6 +43,12 @@ describe.each([
 
   it('can be read, with nothing cut off', () => {
     expect(unreadable(drawing)).toEqual([]);
+    const circles = allShapes(drawing).filter((shape) => shape.kind === 'circle');
+    for (const { centre, radius } of circles) {
+      expect(Math.min(centre.x, centre.y) - radius).toBeGreaterThanOrEqual(0);
+      expect(centre.x + radius).toBeLessThanOrEqual(drawing.width);
+      expect(centre.y + radius).toBeLessThanOrEqual(drawing.height);
+    }
   });
 
   it('has each valve in hand at the stop where the plan sets it', () => {

@@ -1,5 +1,6 @@
 import type { CapPost, Rotation } from '../contracts/calculations.js';
 import { InputError } from '../contracts/input-error.js';
+import { around } from '../quantities/around.js';
 import { requireList, requireNumber, requireRecord } from '../quantities/require.js';
 import { requireName } from './firing-order.js';
 import { named } from './words.js';
@@ -30,7 +31,7 @@ export function requirePosts(input: unknown, count: number, field: string): read
 function requirePost(input: unknown, field: string): CapPost {
   const given = requireRecord(input, field);
   const angle = requireNumber(given['angle'], `${field}.angle`, { min: -360, max: 360 });
-  return { post: requireName(given['post'], `${field}.post`), angle: aroundCap(angle) };
+  return { post: requireName(given['post'], `${field}.post`), angle: around(angle) };
 }
 
 function refuseTwins(post: CapPost, before: readonly CapPost[], field: string): void {
@@ -58,10 +59,5 @@ export function asRotorMeets(
 
 /** Degrees of cap from one angle to another the way the rotor turns, 0 to 360. */
 export function turnBetween(from: number, to: number, rotation: Rotation): number {
-  return aroundCap(rotation === 'clockwise' ? to - from : from - to);
-}
-
-function aroundCap(angle: number): number {
-  const rest = angle % 360;
-  return rest < 0 ? (rest + 360) % 360 : Math.abs(rest);
+  return around(rotation === 'clockwise' ? to - from : from - to);
 }

@@ -1,5 +1,6 @@
 import type { CapMapRow, Cylinder } from '../contracts/calculations.js';
 import type { RotorCheck, RotorCheckRequest } from '../contracts/ignition-checks.js';
+import { around } from '../quantities/around.js';
 import { requireNumber, requireOneOf, requireRecord } from '../quantities/require.js';
 import { turnBetween } from './cap-posts.js';
 import { companionsOf } from './companions.js';
@@ -71,8 +72,7 @@ export function rotorCheck(request: RotorCheckRequest): RotorCheck {
 
 /** Signed distributor degrees by which the rotor is past a post, (−180, 180]. */
 function pastBy(cap: ResolvedCap, post: CapMapRow, angle: number, past: number): number {
-  const onCap = ((angle % 360) + 360) % 360;
-  const turn = (turnBetween(post.angle, onCap, cap.rotation) - past + 720) % 360;
+  const turn = around(turnBetween(post.angle, angle, cap.rotation) - past);
   return turn > 180 ? turn - 360 : turn;
 }
 

@@ -1,4 +1,6 @@
-/** A closed piece of a circle: where it begins, in [0, round), and how far it runs on. */
+import { wrapped } from './windows.js';
+
+/** A closed piece of the cycle, crank degrees: where it begins, in [0, 720), and how far it runs on, less than 720. */
 export interface Arc {
   readonly from: number;
   readonly length: number;
@@ -8,29 +10,29 @@ export interface Arc {
 const noise = 1e-9;
 
 /**
- * The fewest points of a circle that touch every arc, and of all such choices one with the least way from the first
- * point to the last; counted on from the first point, which lies in [0, round), so that the last may lie beyond
- * `round`. Of equal choices the one that begins earliest.
+ * The fewest points of the cycle that touch every arc, and of all such choices one with the least way from the first
+ * point to the last; counted on from the first point, which lies in [0, 720), so that the last may lie beyond. Of
+ * equal choices the one that begins earliest.
  *
  * In an optimal choice the first point is the end of some arc: moving it on towards the nearest end loses no arc and
  * only shortens the way. With the first point fixed, what it leaves is intervals on a line, and taking again and
  * again the latest beginning among them from the far end gives both the fewest points and the earliest last one.
  * So n arcs take n² log n steps.
  */
-export function fewestStops(arcs: readonly Arc[], round: number): readonly number[] {
+export function fewestStops(arcs: readonly Arc[]): readonly number[] {
   let best: readonly number[] = [];
   for (const { from, length } of arcs) {
-    const found = stopsFrom(fold(from + length, round), arcs, round);
+    const found = stopsFrom(wrapped(from + length), arcs);
     if (best.length === 0 || isBetter(found, best)) best = found;
   }
   return best;
 }
 
-function stopsFrom(first: number, arcs: readonly Arc[], round: number): readonly number[] {
+function stopsFrom(first: number, arcs: readonly Arc[]): readonly number[] {
   const left = arcs
-    .filter(({ from, length }) => fold(first - from, round) > length + noise)
+    .filter(({ from, length }) => wrapped(first - from) > length + noise)
     .map(({ from, length }) => {
-      const begins = first + fold(from - first, round);
+      const begins = first + wrapped(from - first);
       return { begins, ends: begins + length };
     })
     .sort((a, b) => b.begins - a.begins);
@@ -50,9 +52,3 @@ function isBetter(one: readonly number[], other: readonly number[]): boolean {
 }
 
 const wayOf = (stops: readonly number[]): number => (stops.at(-1) ?? 0) - (stops[0] ?? 0);
-
-/** An angle brought into [0, round); one that is `round` but for rounding noise is 0. */
-function fold(angle: number, round: number): number {
-  const rest = ((angle % round) + round) % round;
-  return round - rest < noise ? 0 : rest;
-}

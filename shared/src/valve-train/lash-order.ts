@@ -43,7 +43,7 @@ export function lashOrder(request: LashOrderRequest): LashOrder {
     const room = Math.floor(Math.min(...arcs.map(({ length }) => length)) / 2 + margin);
     throw new InputError('margin', `The base circle leaves room for a margin of at most ${room}°.`);
   }
-  const cranks = fewestStops(arcs, cycle);
+  const cranks = fewestStops(arcs);
   return { mates: lashMates(valves, firings), stops: stopsWithValves(cranks, valves, arcs) };
 }
 

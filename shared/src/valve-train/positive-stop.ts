@@ -1,5 +1,6 @@
 import { InputError } from '../contracts/input-error.js';
 import type { PositiveStop, PositiveStopRequest } from '../contracts/valve-figures.js';
+import { around } from '../quantities/around.js';
 import { requireNumber, requireRecord } from '../quantities/require.js';
 
 /** A stop that catches the piston farther down than this was read the wrong way round, crank degrees. */
@@ -19,7 +20,7 @@ export function positiveStop(request: PositiveStopRequest): PositiveStop {
   const given = requireRecord(request, 'request');
   const forward = requireNumber(given['forward'], 'forward', { min: 0, max: 360 });
   const back = requireNumber(given['back'], 'back', { min: 0, max: 360 });
-  const half = round(back - forward) / 2;
+  const half = around(back - forward) / 2;
   if (half === 0) {
     throw new InputError(
       'back',
@@ -32,9 +33,6 @@ export function positiveStop(request: PositiveStopRequest): PositiveStop {
       'These readings put the stop more than 90° from TDC. Exchange the two, or count the wheel the way the crank turns.',
     );
   }
-  const tdc = round(forward + half);
+  const tdc = around(forward + half);
   return { tdc, correction: tdc < 180 ? 0 - tdc : 360 - tdc, half };
 }
-
-/** Into 0 to 360, 360 itself being 0. */
-const round = (angle: number): number => ((angle % 360) + 360) % 360;

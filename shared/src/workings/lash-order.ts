@@ -3,6 +3,7 @@ import type { LashOrder } from '../contracts/valve-figures.js';
 import { drawLashPlan } from '../drawing/lash-plan.js';
 import { inWords } from '../drawing/words.js';
 import { firingAngles } from '../valve-train/firing-angles.js';
+import { nameOf } from '../valve-train/words.js';
 import { lashOrder } from '../valve-train/lash-order.js';
 import { defineWorking } from './define-working.js';
 import {
@@ -15,7 +16,7 @@ import {
   timingOf,
   type TypedFiring,
 } from './engine/engine-fields.js';
-import { assumedEven, cylinderName, printAngle } from './engine/engine-words.js';
+import { assumedEven, printAngle } from './engine/engine-words.js';
 import { readValveRow } from './engine/valve-row.js';
 
 /** In which order the valve clearances are set, and when each may be. */
@@ -127,7 +128,7 @@ function stepsOf({ stops }: LashOrder, firing: TypedFiring): readonly string[] {
     const before = stops[i - 1]?.crank;
     const turn =
       before === undefined
-        ? `Turn the crank the normal way to ${printAngle(crank)} past the firing TDC of ${cylinderName(firing.firingOrder[0] ?? '')}`
+        ? `Turn the crank the normal way to ${printAngle(crank)} past the firing TDC of ${nameOf(firing.firingOrder[0] ?? '')}`
         : `Turn on by ${printAngle(crank - before)}, to ${printAngle(crank)}`;
     return `${turn}${nearTdc(crank, firing)}. Set ${set.length === 1 ? 'valve' : 'valves'} ${inWords(set)}.`;
   });
@@ -140,7 +141,7 @@ function nearTdc(crank: number, { firingOrder, intervals }: TypedFiring): string
     .filter(({ firesAt }) => firesAt <= at + 1e-9)
     .at(-1);
   if (passed === undefined || passed.cylinder === firingOrder[0]) return '';
-  return ` (${printAngle(at - passed.firesAt)} past the firing TDC of ${cylinderName(passed.cylinder)})`;
+  return ` (${printAngle(at - passed.firesAt)} past the firing TDC of ${nameOf(passed.cylinder)})`;
 }
 
 const ruleNames: Readonly<Record<number, string>> = { 9: 'nine', 13: 'thirteen', 17: 'seventeen' };

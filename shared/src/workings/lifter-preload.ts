@@ -1,7 +1,7 @@
-import type { MeasurementSpec } from '../contracts/spec.js';
 import { printQuantity } from '../quantities/print.js';
 import { lifterPreload } from '../valve-train/lifter-preload.js';
 import { defineWorking } from './define-working.js';
+import { limitsCases } from './engine/limits-cases.js';
 import { spoken } from './wiring-map/spoken.js';
 import type { WorkingCase } from './working.js';
 
@@ -78,8 +78,7 @@ export const lifterPreloadWorking = defineWorking({
     typed: { turns: '3/4', pitch: '1/24 in', low: '0.020 in', high: '0.045 in' },
     from: 'pitch of a thread, 24 to the inch: 3/4 of 1/24 in is 1/32 in; no printed source',
   },
-  fromSpec: ({ measurements }) =>
-    measurements.filter(({ key }) => key.startsWith('preload')).flatMap((measurement) => caseOf(measurement)),
+  fromSpec: (document) => limitsCases(document, 'preload'),
   basis: [
     'Preload = turns × pitch at the push rod: definition of the pitch.',
     'At the pivot × (1 + 1 ÷ ratio): the rocker as a lever about the valve’s tip; no printed source.',
@@ -112,12 +111,3 @@ export const lifterPreloadWorking = defineWorking({
     };
   },
 });
-
-function caseOf({
-  name,
-  limits,
-}: MeasurementSpec): readonly { name: string; typed: Record<string, string> }[] {
-  const { low, high } = limits.value;
-  if (low === undefined || high === undefined) return [];
-  return [{ name, typed: { low: printQuantity(low), high: printQuantity(high) } }];
-}

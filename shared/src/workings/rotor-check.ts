@@ -7,7 +7,7 @@ import { capMap } from '../ignition/cap-map.js';
 import { rotorCheck } from '../ignition/rotor-check.js';
 import { defineWorking } from './define-working.js';
 import { cylinderOf, engineErrors, firingCase, firingOf } from './engine/engine-fields.js';
-import { assumedEven, printAngle } from './engine/engine-words.js';
+import { assumedEven, printAngle, sentencesOf } from './engine/engine-words.js';
 import type { CaseReader } from './read-case.js';
 import { rotorSections } from './rotor-check-fields.js';
 import { readAngles } from './wiring-map/read-texts.js';
@@ -88,7 +88,7 @@ export const rotorCheckWorking = defineWorking({
               {
                 kind: 'steps' as const,
                 heading: 'How to tell which',
-                steps: sentences(spoken(check.howToTell)),
+                steps: sentencesOf(spoken(check.howToTell)),
               },
             ]),
         { kind: 'drawing', caption: 'The rotor as seen, on the outside of the cap', drawing },
@@ -119,9 +119,6 @@ export const rotorCheckWorking = defineWorking({
     };
   },
 });
-
-const sentences = (text: string): readonly string[] =>
-  text.split(/(?<=\.) (?=[A-Z])/).filter((one) => one !== '');
 
 function capOf(read: CaseReader): CapMapRequest {
   const firing = firingOf(read);

@@ -1,7 +1,7 @@
-import type { MeasurementSpec } from '../contracts/spec.js';
 import { printQuantity } from '../quantities/print.js';
 import { shim } from '../valve-train/shim.js';
 import { defineWorking } from './define-working.js';
+import { limitsCases } from './engine/limits-cases.js';
 import { spoken } from './wiring-map/spoken.js';
 import type { QuantityField } from './working.js';
 
@@ -56,8 +56,7 @@ export const shimWorking = defineWorking({
     },
     from: 'common practice, no printed source: 2.50 + 0.15 − 0.25 = 2.40 mm',
   },
-  fromSpec: ({ measurements }) =>
-    measurements.filter(({ key }) => key.startsWith('lash')).flatMap((measurement) => caseOf(measurement)),
+  fromSpec: (document) => limitsCases(document, 'lash'),
   basis: [
     'Shim = shim fitted + {clearance} measured − middle of what is wanted: definition of the {clearance}.',
   ],
@@ -102,12 +101,3 @@ export const shimWorking = defineWorking({
     };
   },
 });
-
-function caseOf({
-  name,
-  limits,
-}: MeasurementSpec): readonly { name: string; typed: Record<string, string> }[] {
-  const { low, high } = limits.value;
-  if (low === undefined || high === undefined) return [];
-  return [{ name, typed: { low: printQuantity(low), high: printQuantity(high) } }];
-}

@@ -15,7 +15,7 @@ import {
   timingOf,
   type TypedFiring,
 } from './engine/engine-fields.js';
-import { assumedEven, printAngle } from './engine/engine-words.js';
+import { assumedEven, printAngle, sentencesOf } from './engine/engine-words.js';
 import type { CaseReader } from './read-case.js';
 import { sightingColumns, whichTdcSections } from './which-tdc-fields.js';
 import { writeRows } from './rows.js';
@@ -88,7 +88,7 @@ export const whichTdcWorking = defineWorking({
               {
                 kind: 'steps' as const,
                 heading: answer === 'cannot-tell' ? 'Look for this next' : 'Then',
-                steps: spoken(next).split(/(?<=\.) (?=[A-Z])/),
+                steps: sentencesOf(spoken(next)),
               },
             ]),
         ...(windows.length === 0

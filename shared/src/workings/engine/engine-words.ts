@@ -1,4 +1,3 @@
-import type { Cylinder } from '../../contracts/calculations.js';
 import type { Quantity, Unit } from '../../contracts/quantity.js';
 import { printNumber, printQuantity } from '../../quantities/print.js';
 import { decimalsOf } from '../../drawing/words.js';
@@ -24,9 +23,9 @@ export function printLength(length: Quantity, finer = 0): string {
   return printQuantity(length, { digits: (lengthDigits[length.unit] ?? 3) + finer });
 }
 
-/** `No. 3`, or a cylinder's own name. */
-export function cylinderName(cylinder: Cylinder): string {
-  return typeof cylinder === 'number' ? `No. ${cylinder}` : cylinder;
+/** The sentences of an advice, each a step. */
+export function sentencesOf(text: string): readonly string[] {
+  return text.split(/(?<=\.) (?=[A-Z])/).filter((one) => one !== '');
 }
 
 export const stateWords = {
