@@ -17,7 +17,7 @@ const noise = 1e-9;
  * In an optimal choice the first point is the end of some arc: moving it on towards the nearest end loses no arc and
  * only shortens the way. With the first point fixed, what it leaves is intervals on a line, and taking again and
  * again the latest beginning among them from the far end gives both the fewest points and the earliest last one.
- * So n arcs take n² log n steps.
+ * So n arcs take n² log n steps. One point alone stands in the middle of what all arcs have in common.
  */
 export function fewestStops(arcs: readonly Arc[]): readonly number[] {
   let best: readonly number[] = [];
@@ -25,7 +25,14 @@ export function fewestStops(arcs: readonly Arc[]): readonly number[] {
     const found = stopsFrom(wrapped(from + length), arcs);
     if (best.length === 0 || isBetter(found, best)) best = found;
   }
-  return best;
+  const [only, ...others] = best;
+  return only === undefined || others.length > 0 ? best : [middleOfAll(only, arcs)];
+}
+
+/** The middle of what arcs have in common that all touch a point, which is the end of one of them. */
+function middleOfAll(end: number, arcs: readonly Arc[]): number {
+  const back = Math.min(...arcs.map(({ from }) => wrapped(end - from)));
+  return wrapped(end - back / 2);
 }
 
 function stopsFrom(first: number, arcs: readonly Arc[]): readonly number[] {

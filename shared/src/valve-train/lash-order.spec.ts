@@ -92,11 +92,13 @@ describe('stops', () => {
     expect(sets.flat().sort()).toEqual([...names].sort());
   });
 
-  it('is one for a single cylinder', () => {
+  it('is one for a single cylinder, in the middle of where both valves are shut', () => {
     const valves = valvesOf('E I');
     const { stops, mates } = lashOrder({ firingOrder: [1], valveTiming: usual, valves });
     expect(stops).toHaveLength(1);
     expect(stops[0]?.set).toEqual(['1', '2']);
+    // Inlet shut from 590°, exhaust until 130° of the next cycle: half way is the firing TDC.
+    expect(stops[0]?.crank).toBe(0);
     expect(mates).toEqual([
       { set: '1', whenFullyOpen: null },
       { set: '2', whenFullyOpen: null },
