@@ -134,7 +134,7 @@ function sayOutside(
     coldest === warmest
       ? `at ${say(coldest)} alone for this joint`
       : `from ${say(coldest)} to ${say(warmest)} for this joint`;
-  return `The data sheet has figures ${has}, and after ${sayMoment(from, style)} it was ${say(outside)}: outside them nothing is guessed.`;
+  return `The data sheet has figures ${has}. ${say(outside)}, from ${sayMoment(from, style)} on, is outside them, and nothing is guessed.`;
 }
 
 function stage(
@@ -154,7 +154,7 @@ function cautionsOf(given: Readonly<Record<string, unknown>>): readonly string[]
     ...(allowed
       ? []
       : [
-          'Do not tighten again while it sets or after: that breaks the bond, and its data sheet does not allow it.',
+          'Do not tighten again while it sets or after, unless its data sheet allows it: that breaks the bond.',
         ]),
     ...(given['openTime'] !== undefined && given['closed'] === undefined
       ? ['When the joint was closed was not said: it is taken as closed when the compound was applied.']

@@ -1,7 +1,7 @@
 import type { RunningClearance, RunningClearanceRequest } from '../contracts/measuring.js';
 import type { Quantity } from '../contracts/quantity.js';
 import type { Judgement } from '../contracts/verdict.js';
-import { fromSi, toSi } from '../quantities/convert.js';
+import { convert, toSi } from '../quantities/convert.js';
 import { printQuantity } from '../quantities/print.js';
 import { requireRecord } from '../quantities/require.js';
 import { judgedReadings } from './judged-readings.js';
@@ -37,8 +37,10 @@ export function runningClearance(request: RunningClearanceRequest): RunningClear
   const limits = requireLimits(given['limits'], 'length', 'limits');
   const uncertainty = quantityIfGiven(given['uncertainty'], 'length', 'uncertainty');
   const answerUnit = (limits.low ?? limits.high)?.unit ?? unit;
-  const between = (a: number, b: number): Quantity =>
-    fromSi(toSi({ value: withoutNoise(a - b, a, b), unit }), answerUnit);
+  const between = (a: number, b: number): Quantity => {
+    const [size, difference] = [a, a - b].map((value) => convert({ value, unit }, answerUnit).value);
+    return { value: withoutNoise(difference ?? 0, size ?? 0), unit: answerUnit };
+  };
   const clearance = {
     least: between(Math.min(...hole), Math.max(...shaft)),
     mean: between(mean(hole), mean(shaft)),

@@ -18,8 +18,6 @@ import type { AnswerPart, WorkingCase } from './working.js';
 
 const isShell = ({ of }: WorkingCase): boolean => of === 'shell';
 
-const partNames = { size: 'Size', ovality: 'Ovality', taper: 'Taper' } as const;
-
 /** Readings from the example's service manual: three heights on two axes. */
 const exampleRows = ['top', 'middle', 'bottom'].flatMap((height, i) => [
   { height, axis: 'along', value: ['88.012 mm', '88.010 mm', '88.006 mm'][i] ?? '' },
@@ -125,15 +123,7 @@ export const roundReadingsWorking = defineWorking({
     const answer = roundReadings(request);
     return {
       parts: [
-        { kind: 'judgement', verdict: answer.verdict, reason: answer.reason },
-        ...(answer.parts.length > 1
-          ? answer.parts.map(({ of, verdict, reason }): AnswerPart => ({
-              kind: 'judgement',
-              of: partNames[of],
-              verdict,
-              reason,
-            }))
-          : []),
+        ...judgementsOf(answer),
         { kind: 'facts', heading: 'Worked out', facts: factsOf(answer) },
         {
           kind: 'drawing',
@@ -166,6 +156,12 @@ function requestOf(read: CaseReader): RoundReadingsRequest {
     ...optional,
     ...(of === 'shell' ? { capTorqued: read.choice('cap') === 'torqued' } : {}),
   };
+}
+
+/** Of several parts each by itself; its reason says which it is. */
+function judgementsOf(answer: RoundReadings): readonly AnswerPart[] {
+  const judgements = answer.parts.length > 1 ? answer.parts : [answer];
+  return judgements.map(({ verdict, reason }) => ({ kind: 'judgement', verdict, reason }));
 }
 
 function factsOf(answer: RoundReadings): Extract<AnswerPart, { kind: 'facts' }>['facts'] {

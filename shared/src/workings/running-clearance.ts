@@ -89,11 +89,11 @@ export const runningClearanceWorking = defineWorking({
           ],
         },
         ...bandPart(
-          'The least and the most on the band',
+          'The tightest and the loosest place on the band',
           limitsOf(read),
           [
-            { value: least, uncertainty: both, label: 'least' },
-            { value: most, uncertainty: both, label: 'most' },
+            { value: least, uncertainty: both, label: 'tightest' },
+            { value: most, uncertainty: both, label: 'loosest' },
           ],
           options,
         ),
