@@ -93,6 +93,8 @@ describe('input that cannot be used', () => {
     ['gaps.drivenFar', { ...good, gaps: { ...good.gaps, drivenFar: 1 } }],
     ['gaps.driverNear.value', { ...good, gaps: { ...good.gaps, driverNear: mm(NaN) } }],
     ['driverDiameter.value', { ...good, driverDiameter: mm(-1) }],
+    ['gaps.drivenFar', drive(0, 0, 1, 102)],
+    ['gaps.driverFar', drive(0, 102, 1, 1)],
     ['drivenDiameter.unit', { ...good, drivenDiameter: { value: 1, unit: 'bar' } }],
     ['faceToGroove.driven', { ...good, faceToGroove: { driver: mm(9) } }],
     ['limit.angle', { ...good, limit: { angle: -1 } }],

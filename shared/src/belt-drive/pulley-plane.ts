@@ -1,4 +1,5 @@
 import type { BeltGaps } from '../contracts/belt-drive.js';
+import { InputError } from '../contracts/input-error.js';
 import { toSi } from '../quantities/convert.js';
 import { requireQuantity, requireRecord } from '../quantities/require.js';
 
@@ -19,7 +20,7 @@ export interface Plane {
  * Both rims' planes from their gaps to the straight edge, metres: middle (N + F) / 2, slope of the driver
  * (far − near) / diameter and of the driven pulley (near − far) / diameter.
  *
- * @throws InputError on `field` and below
+ * @throws InputError on `field` and below; on a far rim whose gap differs from the near one's by over the diameter
  */
 export function rimPlanes(
   input: unknown,
@@ -31,7 +32,16 @@ export function rimPlanes(
     toSi(requireQuantity(given[rim], 'length', `${field}.${rim}`, { negative: true })),
   );
   return {
-    driver: { middle: (driverNear + driverFar) / 2, slope: (driverFar - driverNear) / diameters.driver },
-    driven: { middle: (drivenNear + drivenFar) / 2, slope: (drivenNear - drivenFar) / diameters.driven },
+    driver: planeOf(driverFar, driverNear, diameters.driver, `${field}.driverFar`),
+    driven: planeOf(drivenNear, drivenFar, diameters.driven, `${field}.drivenFar`),
   };
+}
+
+/** A rim from its gap at the beginning of the way and at its end. */
+function planeOf(from: number, to: number, diameter: number, field: string): Plane {
+  const slope = (from - to) / diameter;
+  if (Math.abs(slope) > 1) {
+    throw new InputError(field, 'The gaps at one pulley cannot differ by more than its diameter.');
+  }
+  return { middle: (from + to) / 2, slope };
 }

@@ -24,6 +24,8 @@ export interface BeltLineLayout {
   readonly isEnlarged: boolean;
   /** The straight edge's face, from which gaps are drawn. */
   readonly edge: number;
+  /** Height of the driver's plane at the driven pulley's middle. */
+  readonly plane: number;
   readonly lowest: number;
 }
 
@@ -61,11 +63,12 @@ export function beltLineLayout(request: BeltLineRequest, index: number, line: Pu
   const edge = usualEdge - Math.min(0, near1, far1, near2, far2);
   const [r1, r2] = [Math.max(leastRadius, (d1 / 2) * scale), Math.max(leastRadius, (d2 / 2) * scale)];
   const extra = grooves * perMetre;
+  const slopes = [(near1 - far1) / (2 * r1), (far2 - near2) / (2 * r2)] as const;
   const driver: PulleyLayout = {
     x: left + (d1 / 2) * scale,
     radius: r1,
     face: edge + (near1 + far1) / 2,
-    slope: (near1 - far1) / (d1 * scale),
+    slope: gentle(slopes[0]),
     groove: thickness / 2 + Math.max(0, -extra),
     back: thickness + Math.max(0, -extra),
   };
@@ -73,16 +76,17 @@ export function beltLineLayout(request: BeltLineRequest, index: number, line: Pu
     x: right - (d2 / 2) * scale,
     radius: r2,
     face: edge + (near2 + far2) / 2,
-    slope: (far2 - near2) / (d2 * scale),
+    slope: gentle(slopes[1]),
     groove: thickness / 2 + Math.max(0, extra),
     back: thickness + Math.max(0, extra),
   };
   return {
     driver,
     driven,
-    times,
+    times: slopes.some((slope) => gentle(slope) !== slope) ? undefined : times,
     isEnlarged: Math.min(d1, d2) * scale < 2 * leastRadius,
     edge,
+    plane: placed(driven, 0, driven.groove).y - toSi(line.offset) * perMetre,
     lowest: Math.max(lowestOf(driver), lowestOf(driven)),
   };
 }
@@ -90,6 +94,9 @@ export function beltLineLayout(request: BeltLineRequest, index: number, line: Pu
 function gapsOf({ driverNear, driverFar, drivenNear, drivenFar }: BeltGaps): readonly number[] {
   return [driverNear, driverFar, drivenNear, drivenFar].map(toSi);
 }
+
+/** Steeper no pulley can be drawn and still be seen from above. */
+const gentle = (slope: number): number => Math.max(-1, Math.min(1, slope));
 
 function lowestOf(pulley: PulleyLayout): number {
   return Math.max(...[-pulley.radius, pulley.radius].map((x) => placed(pulley, x, pulley.back).y));

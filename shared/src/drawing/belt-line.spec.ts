@@ -1,3 +1,4 @@
+import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import { beltLine } from '../belt-drive/belt-line.js';
 import type { BeltLineRequest } from '../contracts/belt-drive.js';
@@ -81,5 +82,21 @@ describe('a belt line from above', () => {
     ['in metres', [0, 0.0001, 0.0012, 0.0016], { d1: 0.14, d2: 0.09, span: 0.3, unit: 'm' }],
   ] as const)('can be read where it is %s', (_, rims, sizes) => {
     expect(unreadable(drawn(rims, sizes))).toEqual([]);
+  });
+
+  it('stays inside its frame whatever the sizes', () => {
+    const size = fc
+      .integer({ min: -6, max: 6 })
+      .chain((power) => fc.integer({ min: 1, max: 99 }).map((value) => value * 10 ** power));
+    const gap = fc.tuple(size, fc.constantFrom(-1, 1)).map(([value, sign]) => value * sign);
+    fc.assert(
+      fc.property(fc.tuple(gap, gap, gap, gap), size, size, size, (rims, d1, d2, span) => {
+        fc.pre(Math.abs(rims[0] - rims[1]) <= d1 && Math.abs(rims[2] - rims[3]) <= d2);
+        const one = drawn(rims, { d1, d2, span });
+        expect(unreadable(one)).toEqual([]);
+        expect(one.height).toBeLessThan(400);
+        expect(JSON.stringify(one)).not.toMatch(/null|NaN/);
+      }),
+    );
   });
 });

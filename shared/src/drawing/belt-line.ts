@@ -3,7 +3,18 @@ import type { Quantity } from '../contracts/quantity.js';
 import { beltLineLayout, placed, type BeltLineLayout, type PulleyLayout } from './belt-line-layout.js';
 import { dimension } from './dimension.js';
 import { arrowHead, round, track } from './geometry.js';
-import { circle, line, path, polygon, rect, text, textWidth, type Drawing, type Shape } from './shapes.js';
+import {
+  circle,
+  line,
+  path,
+  polygon,
+  rect,
+  text,
+  textWidth,
+  type Drawing,
+  type Point,
+  type Shape,
+} from './shapes.js';
 import { decimalsOfUnit } from './unit-decimals.js';
 import { decimalsOf, shortened, wording, type DrawingOptions, type Wording } from './words.js';
 
@@ -27,8 +38,7 @@ export function drawBeltLine(input: BeltLineInput, options?: DrawingOptions): Dr
   const found = input.answer.pulleys[input.driven];
   if (found === undefined) throw new RangeError(`There is no driven pulley ${input.driven}.`);
   const layout = beltLineLayout(input.request, input.driven, found);
-  const drawn =
-    layout.times === undefined ? 'Across the belt not to scale' : `Misalignment drawn ×${layout.times}`;
+  const drawn = layout.times === undefined ? 'Not to scale across' : `Misalignment drawn ×${layout.times}`;
   const scale = layout.isEnlarged ? `${drawn}, pulleys enlarged` : drawn;
   const foot = round(layout.lowest + 22);
   return {
@@ -106,21 +116,20 @@ function belt({ driver, driven }: BeltLineLayout): Shape {
 }
 
 /** The driver's plane carried over the span, and the driven pulley's own. */
-function planes({ driver, driven }: BeltLineLayout): readonly Shape[] {
-  const start = placed(driver, -driver.radius - 8, driver.groove);
-  const end = { x: width - 8, y: start.y + (width - 8 - start.x) * driver.slope };
-  const [from, to] = [
-    placed(driven, -driven.radius - 12, driven.groove),
-    placed(driven, driven.radius + 10, driven.groove),
+function planes({ driver, driven, plane }: BeltLineLayout): readonly Shape[] {
+  const start = placed(driver, 0, driver.groove);
+  const rise = (plane - start.y) / (driven.x - start.x);
+  const at = (x: number): Point => ({ x, y: start.y + (x - start.x) * rise });
+  const own = [-driven.radius - 12, driven.radius + 10].map((x) => placed(driven, x, driven.groove));
+  return [
+    path(track([at(driver.x - driver.radius - 8), at(width - 8)]), { pen: 'centre' }),
+    path(track(own), { pen: 'centre' }),
   ];
-  return [path(track([start, end]), { pen: 'centre' }), path(track([from, to]), { pen: 'centre' })];
 }
 
 /** From the driver's plane to the driven groove's middle, at the driven pulley's middle. */
-function offsetMark({ driver, driven }: BeltLineLayout, { verdict }: PulleyLine): readonly Shape[] {
+function offsetMark({ driven, plane }: BeltLineLayout, { verdict }: PulleyLine): readonly Shape[] {
   const middle = placed(driven, 0, driven.groove);
-  const from = placed(driver, 0, driver.groove);
-  const plane = from.y + (middle.x - from.x) * driver.slope;
   const x = round(middle.x);
   if (Math.abs(middle.y - plane) < 1)
     return [circle(x, round(middle.y), 2.4, { fill: 'line', part: 'offset' })];

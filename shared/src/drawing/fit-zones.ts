@@ -6,7 +6,7 @@ import { dimension } from './dimension.js';
 import { corners, hatching, round } from './geometry.js';
 import { circle, line, rect, text, type Drawing, type Shape } from './shapes.js';
 import { decimalsOfUnit } from './unit-decimals.js';
-import { decimalsOf, wording, type DrawingOptions, type Wording } from './words.js';
+import { decimalsOf, shortened, wording, type DrawingOptions, type Wording } from './words.js';
 
 export interface FitZonesInput {
   readonly request: FitRequest;
@@ -176,9 +176,12 @@ function clearance({ value, unit }: Quantity, { figure }: Wording): string {
 /** A size with the decimals that all four limits need. */
 function sizeOf({ hole, shaft, from, unit }: Zones, size: number, { figure }: Wording): string {
   const value = (metres: number): number => fromSi(from + metres, unit).value;
-  const most = decimalsOfUnit(unit) + 1;
+  const largest = Math.max(hole.high, shaft.high, hole.low, shaft.low);
+  const whole = value(largest).toFixed(0).length;
+  // A figure has room for eight characters beside its zone.
+  const most = Math.max(0, Math.min(decimalsOfUnit(unit) + 1, 7 - whole));
   const decimals = [hole.low, hole.high, shaft.low, shaft.high].map((one) => decimalsOf(value(one), most));
-  return figure(value(size), Math.max(...decimals));
+  return shortened(figure(value(size), Math.max(...decimals)), 8);
 }
 
 function rowsOf({ answer }: FitZonesInput, zones: Zones, words: Wording): readonly (readonly string[])[] {

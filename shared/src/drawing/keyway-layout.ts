@@ -16,22 +16,26 @@ export interface KeywayLayout {
   readonly roof: number;
   /** Height of the shaft's surface at x. */
   readonly surface: (x: number) => number;
+  /** Where the parts are broken off. */
+  readonly ends: { readonly left: number; readonly right: number; readonly foot: number };
   readonly sides: number | undefined;
   readonly over: number | undefined;
   readonly isToScale: boolean;
 }
 
 /** Right side of the key, so that a label beside it has room whatever the key's width. */
-const right = 220;
+const right = 228;
 const keyTop = 104;
 const largest = 84;
 const smallest = 12;
 const room = 22;
-const ends = { left: 46, right: 294 } as const;
-export const sectionEnds = ends;
+/** Half of what is broken out of the parts, where the shaft's curve allows it. */
+const halfSection = 124;
+const furthest = 326;
 /** Drawn for a shaft of unknown diameter. */
 const usualRadius = 260;
-const leastRadius = 150;
+/** Of a smaller shaft the curve would be no section any more. */
+const leastRadius = 104;
 
 const clamp = (value: number, low: number, high: number): number => Math.min(Math.max(value, low), high);
 
@@ -52,11 +56,13 @@ export function keywayLayout(request: KeyFitRequest, { play }: KeyFit): KeywayLa
 
   const bottom = keyTop + h;
   const crown = bottom - depth;
-  const radius =
-    request.shaftDiameter === undefined
-      ? usualRadius
-      : Math.max(leastRadius, (toSi(request.shaftDiameter) / 2) * scale);
+  const trueRadius =
+    request.shaftDiameter === undefined ? usualRadius : (toSi(request.shaftDiameter) / 2) * scale;
+  const radius = Math.max(leastRadius, trueRadius);
   const middle = right - w / 2;
+  const half = Math.min(halfSection, 0.85 * radius);
+  const surface = (x: number): number =>
+    crown + radius - Math.sqrt(radius * radius - Math.min(Math.abs(x - middle), radius) ** 2);
   return {
     left: right - w,
     right,
@@ -65,10 +71,18 @@ export function keywayLayout(request: KeyFitRequest, { play }: KeyFit): KeywayLa
     shaftWall: right + drawn(toSi(play.shaft), sides),
     hubWall: right + drawn(toSi(play.hub), sides),
     roof: Math.min(keyTop - drawn(toSi(play.top), over), crown - 8),
-    surface: (x) => crown + radius - Math.sqrt(radius * radius - Math.min(x - middle, radius) ** 2),
+    surface,
+    ends: {
+      left: middle - half,
+      right: Math.min(middle + half, furthest),
+      foot: Math.max(bottom + 40, surface(middle - half) + 26),
+    },
     sides,
     over,
-    isToScale: Math.abs(trueDepth - depth) < 0.01 && Math.min(width, height) * scale >= smallest,
+    isToScale:
+      radius === trueRadius &&
+      Math.abs(trueDepth - depth) < 0.01 &&
+      Math.min(width, height) * scale >= smallest,
   };
 }
 

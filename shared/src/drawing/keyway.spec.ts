@@ -1,7 +1,9 @@
+import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import type { KeyFitRequest } from '../contracts/fits.js';
 import type { Unit } from '../contracts/quantity.js';
 import { keyFit } from '../fits/key-fit.js';
+import { toSi } from '../quantities/convert.js';
 import { partsOf, unreadable, wordsOf } from './drawing-case.js';
 import { drawKeyway } from './keyway.js';
 import type { Drawing, RectShape } from './shapes.js';
@@ -78,5 +80,20 @@ describe('a key in its keyway', () => {
       shaftDiameter: { value: 16, unit: 'mm' },
     });
     expect(unreadable(small)).toEqual([]);
+  });
+
+  it('stays inside its frame whatever the sizes', () => {
+    const size = fc
+      .integer({ min: -6, max: 5 })
+      .chain((power) => fc.integer({ min: 1, max: 99 }).map((value) => value * 10 ** power));
+    const unit = fc.constantFrom('mm', 'in', 'thou', 'm', 'µm', 'ft');
+    fc.assert(
+      fc.property(fc.tuple(size, size, size, size, size, size), unit, (sizes, of) => {
+        fc.pre(toSi({ value: sizes[0], unit: of }) < 0.25);
+        const one = drawn(sizes, of);
+        expect(unreadable(one)).toEqual([]);
+        expect(JSON.stringify(one)).not.toMatch(/null|NaN/);
+      }),
+    );
   });
 });

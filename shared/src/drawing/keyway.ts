@@ -1,13 +1,13 @@
 import type { KeyFit, KeyFitRequest } from '../contracts/fits.js';
-import type { Quantity } from '../contracts/quantity.js';
+import type { Quantity, Unit } from '../contracts/quantity.js';
 import { convert } from '../quantities/convert.js';
 import { dimension } from './dimension.js';
 import { corners, hatching, round, track } from './geometry.js';
-import { keywayLayout, sectionEnds, surfacePoints, type KeywayLayout } from './keyway-layout.js';
+import { keywayLayout, surfacePoints, type KeywayLayout } from './keyway-layout.js';
 import { centredText, line, path, polygon, rect, text, textWidth } from './shapes.js';
 import type { Drawing, Point, Shape } from './shapes.js';
 import { decimalsOfUnit } from './unit-decimals.js';
-import { decimalsOf, wording, type DrawingOptions, type Wording } from './words.js';
+import { decimalsOf, shortened, wording, type DrawingOptions, type Wording } from './words.js';
 
 export interface KeywayInput {
   readonly request: KeyFitRequest;
@@ -23,10 +23,13 @@ const joint = 3;
  * on the right and over the key, are drawn to the exaggeration that the drawing states. What is too tight is
  * drawn as metal in metal, in red oxide.
  */
-export function drawKeyway(input: KeywayInput, options?: DrawingOptions): Drawing {
+export function drawKeyway({ request, answer }: KeywayInput, options?: DrawingOptions): Drawing {
+  const { shaft: inShaft, hub: inHub, top } = answer.play;
+  const play = { shaft: shown(inShaft), hub: shown(inHub), top: shown(top) };
+  const input: KeywayInput = { request, answer: { ...answer, play } };
   const words = wording(options);
   const layout = keywayLayout(input.request, input.answer);
-  const foot = layout.bottom + 74;
+  const foot = round(layout.ends.foot + 34);
   const scale = scaleWords(layout);
   return {
     title: 'Key in its keyway, section across the shaft',
@@ -38,7 +41,7 @@ export function drawKeyway(input: KeywayInput, options?: DrawingOptions): Drawin
       ...shaft(layout),
       ...key(layout, input.request, words),
       ...tooTight(layout, input.answer),
-      line(middleOf(layout), 34, middleOf(layout), layout.bottom + 52, 'centre'),
+      line(middleOf(layout), 34, middleOf(layout), round(layout.ends.foot + 12), 'centre'),
       ...plays(layout, input.answer, foot, words),
       text(12, foot + 24, scale, { ink: 'ink-2' }),
     ],
@@ -58,7 +61,7 @@ function scaleWords({ sides, over, isToScale }: KeywayLayout): string {
 /** A freehand line from one point to another, bulging `bulge` to its left and right in turn. */
 function freehand(from: Point, to: Point, bulge: number): readonly Point[] {
   const count = 24;
-  const length = Math.hypot(to.x - from.x, to.y - from.y);
+  const length = Math.max(1, Math.hypot(to.x - from.x, to.y - from.y));
   const [nx, ny] = [(from.y - to.y) / length, (to.x - from.x) / length];
   return Array.from({ length: count + 1 }, (_, i) => {
     const t = i / count;
@@ -82,51 +85,49 @@ function piece(machined: readonly Point[], broken: readonly Point[], angle: 45 |
 }
 
 function hub(layout: KeywayLayout): readonly Shape[] {
-  const { left, hubWall, roof } = layout;
+  const { left, hubWall, roof, ends } = layout;
   const bore = [
-    ...surfacePoints(layout, sectionEnds.left, left, joint),
+    ...surfacePoints(layout, ends.left, left, joint),
     { x: left, y: roof },
     { x: hubWall, y: roof },
-    ...surfacePoints(layout, hubWall, sectionEnds.right, joint),
+    ...surfacePoints(layout, hubWall, ends.right, joint),
   ];
   const top = Math.min(roof, layout.top) - 30;
   const [first, last] = [bore[0], bore.at(-1)];
   if (first === undefined || last === undefined) return [];
   const broken = [
-    ...freehand(last, { x: sectionEnds.right, y: top }, 5),
-    ...freehand({ x: sectionEnds.right, y: top }, { x: sectionEnds.left, y: top }, 4),
-    ...freehand({ x: sectionEnds.left, y: top }, first, 5),
+    ...freehand(last, { x: ends.right, y: top }, 5),
+    ...freehand({ x: ends.right, y: top }, { x: ends.left, y: top }, 4),
+    ...freehand({ x: ends.left, y: top }, first, 5),
   ];
   return [
     ...piece(bore, broken, 135),
-    text(sectionEnds.right - 12, top + 26, 'hub', { anchor: 'end', weight: 600, halo: true }),
+    text(ends.right - 12, top + 26, 'hub', { anchor: 'end', weight: 600, halo: true }),
   ];
 }
 
 function shaft(layout: KeywayLayout): readonly Shape[] {
-  const { left, shaftWall, bottom } = layout;
+  const { left, shaftWall, bottom, ends } = layout;
   const surface = [
-    ...surfacePoints(layout, sectionEnds.left, left, 0),
+    ...surfacePoints(layout, ends.left, left, 0),
     { x: left, y: bottom },
     { x: shaftWall, y: bottom },
-    ...surfacePoints(layout, shaftWall, sectionEnds.right, 0),
+    ...surfacePoints(layout, shaftWall, ends.right, 0),
   ];
-  const foot = Math.max(bottom + 40, layout.surface(sectionEnds.left) + 24);
+  const { foot } = ends;
   const [first, last] = [surface[0], surface.at(-1)];
   if (first === undefined || last === undefined) return [];
   const broken = [
-    ...freehand(last, { x: sectionEnds.right, y: foot }, 5),
-    ...freehand({ x: sectionEnds.right, y: foot }, { x: sectionEnds.left, y: foot }, 4),
-    ...freehand({ x: sectionEnds.left, y: foot }, first, 5),
+    ...freehand(last, { x: ends.right, y: foot }, 5),
+    ...freehand({ x: ends.right, y: foot }, { x: ends.left, y: foot }, 4),
+    ...freehand({ x: ends.left, y: foot }, first, 5),
   ];
   return [
     ...piece(surface, broken, 45),
-    text(
-      sectionEnds.left + 14,
-      round(Math.max(bottom + 22, layout.surface(sectionEnds.left) + 18)),
-      'shaft',
-      { weight: 600, halo: true },
-    ),
+    text(ends.left + 14, round(Math.max(bottom + 22, layout.surface(ends.left) + 18)), 'shaft', {
+      weight: 600,
+      halo: true,
+    }),
   ];
 }
 
@@ -145,7 +146,7 @@ function key(
     ...(w >= 56 && h >= 62
       ? [
           ...dimension('across', top + 38, left, right),
-          text(x, top + 32, figureOf(size, words), {
+          text(x, top + 32, figureOf(shown(size), words), {
             face: 'figures',
             weight: 600,
             anchor: 'middle',
@@ -230,8 +231,17 @@ function playLabel(
   ];
 }
 
+/** In a unit that a key is measured in: a play in metres is nothing to read. */
+function shown(quantity: Quantity): Quantity {
+  const units: Partial<Record<Unit, Unit>> = { m: 'mm', cm: 'mm', ft: 'in' };
+  return convert(quantity, units[quantity.unit] ?? quantity.unit);
+}
+
+/** At most six characters and a sign, so that a label keeps its place. */
 function figureOf({ value, unit }: Quantity, { figure }: Wording): string {
-  return figure(value, decimalsOf(value, decimalsOfUnit(unit))).replace('-', '−');
+  const whole = Math.abs(value).toFixed(0).length;
+  const most = Math.max(0, Math.min(decimalsOfUnit(unit), (whole > 2 ? 4 : 5) - whole));
+  return shortened(figure(value, decimalsOf(value, most)).replace('-', '−'), 7);
 }
 
 function rowsOf({ request, answer: { play } }: KeywayInput, words: Wording): readonly (readonly string[])[] {
