@@ -49,7 +49,7 @@ describe('length of an open belt', () => {
   });
 
   it('gives ratio and wrap, and keeps the unit of the centres', () => {
-    // T6-010 (Hawkins): 48 in drives 12 in at 1200 for 300 rev/min.
+    // T6-010 (electrical handbook): 48 in drives 12 in at 1200 for 300 rev/min.
     const answer = beltLength({
       driverDiameter: { value: 48, unit: 'in' },
       drivenDiameter: { value: 1, unit: 'ft' },

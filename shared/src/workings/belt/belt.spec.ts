@@ -32,7 +32,7 @@ describe('the printed examples', () => {
   });
 
   it('48 in drives 12 in at 1200 rev/min', () => {
-    // T6-010, printed so (Hawkins).
+    // T6-010, printed so.
     const typed = { driverDiameter: '48 in', drivenDiameter: '12 in', centres: '60 in', speed: '300' };
     expect(said(beltLengthWorking, typed)).toMatch(/4\.000 times as fast \(1200 rev\/min\)/);
   });

@@ -35,7 +35,7 @@ export const heatToAssembleWorking = defineWorking({
   fromSpec: ({ keys }) => keys.flatMap(typedJoint),
   basis: [
     'ΔT = (interference + clearance) / (α · d): shrink-fit assembly, any handbook.',
-    'Coefficients: Callister, Fundamentals of Materials Science and Engineering, 3rd ed., table B.6, and two handbook tables; the least of a material’s alloys.',
+    'Coefficients: Fundamentals of Materials Science and Engineering, 3rd ed., table B.6, and two handbook tables; the least of a material’s alloys.',
     'What bearings stand: two bearing suppliers’ notes on hot mounting.',
   ],
   fieldOf: [
