@@ -100,6 +100,12 @@ describe('cure', () => {
     expect(dryAir().verdict).toBe('not-judged');
   });
 
+  it('says what the sheet says nothing of', () => {
+    const told = { gap: of(0.1, 'mm'), substrate: 'steel', humidity: 50 };
+    expect(cure({ ...request, ...told, retorqueAllowed: true }).cautions).toHaveLength(3);
+    expect(cure({ ...request, ...told }).loadAt).toBe('2026-12-01T14:00:00.000Z');
+  });
+
   it('says when it may be handled', () => {
     const handled = sheet.map((point) => ({ ...point, toHandle: of(30, 'min') }));
     expect(cure({ ...request, sheet: handled }).handleAt).toBe('2026-12-01T08:30:00.000Z');

@@ -5,7 +5,7 @@ import { fromSi, toSi } from '../quantities/convert.js';
 import { printNumber, printQuantity } from '../quantities/print.js';
 import { requireQuantity, requireRecord } from '../quantities/require.js';
 import { isoOf, requireExpiry, requireMoment, sayMoment, saySpan, type MomentStyle } from './moments.js';
-import { pointsFor } from './points-for.js';
+import { notInSheet, pointsFor } from './points-for.js';
 import { readJoint, readSheet, type SheetPoint } from './read-sheet.js';
 import { reach, readLog, shareAt, stretchesOf, type Reached, type Stretch } from './stretches.js';
 
@@ -32,7 +32,7 @@ export function cure(request: CureRequest): Cure {
   const joint = readJoint(given);
   const times = readTimes(given);
   const log = readLog(given['log'], times.style, times.now);
-  const cautions = cautionsOf(given);
+  const cautions = [...cautionsOf(given), ...notInSheet(sheet, joint)];
   const spoilt = [...lotPast(given, times), ...closedLate(given, times)];
 
   const chosen = pointsFor(sheet, joint);

@@ -22,6 +22,17 @@ export function pointsFor(sheet: readonly SheetPoint[], joint: Joint): Chosen {
   return { points: byTemperature(points) };
 }
 
+/** What is known of the joint and the data sheet says nothing of, in a sentence each. */
+export function notInSheet(sheet: readonly SheetPoint[], joint: Joint): readonly string[] {
+  const words = { gap: 'gaps', substrate: 'materials', humidity: 'humidity' } as const;
+  return (['gap', 'substrate', 'humidity'] as const)
+    .filter((name) => joint[name] !== undefined && sheet.every((point) => point[name] === undefined))
+    .map(
+      (name) =>
+        `The data sheet's figures say nothing of ${words[name]}: they are taken to hold for this joint.`,
+    );
+}
+
 type Choose = (points: readonly SheetPoint[], joint: Joint) => Chosen;
 
 const bySubstrate: Choose = (points, { substrate }) => {
