@@ -12,7 +12,7 @@ describe('the list of workings', () => {
     const keys = workings.map(({ key }) => key);
     expect(new Set(keys).size).toBe(keys.length);
     const order = workings.map(({ group }) => workingGroups.indexOf(group));
-    expect(order).toEqual(order.toSorted((a, b) => a - b));
+    expect(order).toEqual([...order].sort((a, b) => a - b));
   });
 
   it('finds a working by its key, and nothing for another', () => {

@@ -1,6 +1,7 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import { readRows, writeRows } from './rows.js';
+import type { WorkingCase } from './working.js';
 
 const columns = ['place', 'value'];
 
@@ -15,7 +16,7 @@ describe('rows in an address', () => {
   });
 
   it('are readable, and leave out empty rows at the end', () => {
-    const rows = [{ place: 'top', value: '88.01 mm' }, { place: 'middle' }, {}];
+    const rows: readonly WorkingCase[] = [{ place: 'top', value: '88.01 mm' }, { place: 'middle' }, {}];
     expect(writeRows(rows, columns)).toBe('top|88.01 mm;middle|');
   });
 
