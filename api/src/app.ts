@@ -8,6 +8,8 @@ import { carRoutes } from './car-files/cars.routes.js';
 import type { Config } from './config.js';
 import { fileRoutes } from './files/files.routes.js';
 import { peopleRoutes, preferencesRoutes, sessionRoutes } from './people/people.routes.js';
+import { ApiDocument } from './openapi/api-document.js';
+import { openApiRoutes } from './openapi/openapi.routes.js';
 import type { Database } from './platform/database/database.js';
 import { errorHandler, unknownRoute } from './platform/errors/error-handler.js';
 import { compression, noStore, securityHeaders } from './platform/http/headers.js';
@@ -65,6 +67,7 @@ function apiRoutes({ config, database, services, events, heartbeatMs = 15_000 }:
     generalLimit(config.requestsPerMinute),
     xsrf,
   );
+  api.use(openApiRoutes(new ApiDocument({ accessCookie: cookies.accessName })));
   api.use(authentication(services.readSession));
   api.use('/files', fileRoutes(services.files));
   api.use(jsonBody);

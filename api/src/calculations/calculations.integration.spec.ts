@@ -1,5 +1,5 @@
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
-import supertest from 'supertest';
+import { browser } from '../testing/documented.js';
 import { startTestApp, type TestApp } from '../testing/test-app.js';
 import { signedInClient, type TestClient } from '../testing/test-client.js';
 import { openWorkshop } from '../testing/workshop.js';
@@ -183,7 +183,7 @@ describe('the workings', () => {
   });
 
   it('are there for signed-in people alone', async () => {
-    const answer = await supertest(app.address)
+    const answer = await browser(app.address)
       .post('/api/calculations/convert')
       .set({ Cookie: 'XSRF-TOKEN=x', 'X-XSRF-TOKEN': 'x' })
       .send({});

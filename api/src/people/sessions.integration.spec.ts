@@ -1,5 +1,6 @@
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
-import supertest from 'supertest';
+import type supertest from 'supertest';
+import { browser } from '../testing/documented.js';
 import { startTestApp, type TestApp } from '../testing/test-app.js';
 import { cookieIn, setCookies, signedInClient, TestClient } from '../testing/test-client.js';
 import { demoPassword, openWorkshop, type Workshop } from '../testing/workshop.js';
@@ -57,7 +58,7 @@ describe('signing in', () => {
   });
 
   it('names the fields that are missing or not known', async () => {
-    const answer = await supertest(app.address)
+    const answer = await browser(app.address)
       .post('/api/session')
       .send({ email: 'nell@lowmill.example', role: 'foreman' });
     expect(answer.status).toBe(400);
@@ -194,7 +195,7 @@ async function tokensOf(email: string): Promise<Tokens & { all: string }> {
 }
 
 function withCookies(cookies: string): ReturnType<typeof supertest.agent> {
-  return supertest.agent(app.address).set('Cookie', cookies);
+  return browser(app.address).set('Cookie', cookies);
 }
 
 function renew({ renewal: token, xsrf }: Tokens): supertest.Test {

@@ -10,6 +10,7 @@ import { Database } from '../platform/database/database.js';
 import { SheetEvents } from '../platform/live-events/sheet-events.js';
 import { createLog } from '../platform/log.js';
 import { createTestDatabase, type TestDatabase } from '../platform/testing/test-database.js';
+import { withMountedRoutes } from '../openapi/testing/mounted-routes.js';
 import { createServices, type Services } from '../services.js';
 
 export interface TestApp {
@@ -18,6 +19,8 @@ export interface TestApp {
   readonly db: TestDatabase;
   readonly database: Database;
   readonly services: Services;
+  /** Every route that is served, such as `GET /api/cars/{id}`. */
+  readonly routes: readonly string[];
   /** Mails that would have gone out. */
   readonly sent: readonly Mail[];
   close(): Promise<void>;
@@ -57,13 +60,16 @@ export async function startTestApp(options: TestAppOptions = {}): Promise<TestAp
       return Promise.resolve(options.mailFails !== true);
     },
   });
-  const server = createServer(createApp({ config, log, database, services, events, heartbeatMs: 300 }));
+  const { made: application, routes } = withMountedRoutes(() =>
+    createApp({ config, log, database, services, events, heartbeatMs: 300 }),
+  );
+  const server = createServer(application);
   await new Promise<void>((listening) => {
     server.listen(0, '127.0.0.1', listening);
   });
   const { port } = server.address() as AddressInfo;
   return {
-    ...{ db, database, services, sent },
+    ...{ db, database, services, routes, sent },
     address: `http://127.0.0.1:${port}`,
     close: async () => {
       await events.stop();

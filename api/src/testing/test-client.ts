@@ -1,13 +1,14 @@
-import supertest from 'supertest';
+import type supertest from 'supertest';
+import { browser } from './documented.js';
 import { demoPassword } from './workshop.js';
 
-/** A browser: keeps cookies, and sends the XSRF token back as Angular does. */
+/** A browser: keeps cookies, holds answers against the document of the api, and sends the XSRF token back as Angular does. */
 export class TestClient {
   private readonly agent: ReturnType<typeof supertest.agent>;
   private xsrf = '';
 
   constructor(address: string) {
-    this.agent = supertest.agent(address);
+    this.agent = browser(address);
   }
 
   async signIn(email: string, password = demoPassword): Promise<supertest.Response> {

@@ -2,7 +2,7 @@ import { mkdtempSync, rmSync, writeFileSync } from 'node:fs';
 import { tmpdir } from 'node:os';
 import { join } from 'node:path';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
-import supertest from 'supertest';
+import { browser } from '../../testing/documented.js';
 import { startTestApp, type TestApp } from '../../testing/test-app.js';
 import { setCookies, signedInClient, TestClient } from '../../testing/test-client.js';
 import { openWorkshop } from '../../testing/workshop.js';
@@ -23,7 +23,7 @@ afterAll(async () => {
 
 describe('health', () => {
   it('answers without a sign-in', async () => {
-    const answer = await supertest(app.address).get('/api/health');
+    const answer = await browser(app.address).get('/api/health');
     expect(answer.status).toBe(200);
     expect(answer.body).toEqual({ status: 'ok' });
   });
@@ -31,7 +31,7 @@ describe('health', () => {
 
 describe('problems', () => {
   it('answer an unknown address with 404, as Problem Details', async () => {
-    const answer = await supertest(app.address).get('/api/nothing');
+    const answer = await browser(app.address).get('/api/nothing');
     expect(answer.status).toBe(404);
     expect(answer.type).toBe('application/problem+json');
     expect(answer.body).toEqual({
@@ -63,7 +63,7 @@ describe('problems', () => {
     ['brackets far inside each other', 'application/json', `${'['.repeat(51)}${']'.repeat(51)}`, 400],
     ['brackets in a text', 'application/json', `{"email":"${'['.repeat(200)}"}`, 400],
   ])('answer %s with its status', async (_case, type, body, status) => {
-    const answer = await supertest(app.address).post('/api/session').set('Content-Type', type).send(body);
+    const answer = await browser(app.address).post('/api/session').set('Content-Type', type).send(body);
     expect(answer.status).toBe(status);
     expect(answer.type).toBe('application/problem+json');
   });
@@ -71,7 +71,7 @@ describe('problems', () => {
 
 describe('headers', () => {
   it('keep answers of the api from caches, and the page from foreign scripts', async () => {
-    const { headers } = await supertest(app.address).get('/api/health');
+    const { headers } = await browser(app.address).get('/api/health');
     expect(headers['cache-control']).toBe('no-store');
     expect(headers['content-security-policy']).toContain("script-src 'self'");
     expect(headers['x-content-type-options']).toBe('nosniff');
@@ -81,19 +81,19 @@ describe('headers', () => {
 
 describe('the client', () => {
   it.each(['/', '/sheets/1/steps/8.6'])('has its page at %s', async (path) => {
-    const answer = await supertest(app.address).get(path);
+    const answer = await browser(app.address).get(path);
     expect(answer.status).toBe(200);
     expect(answer.text).toContain('The page');
     expect(answer.headers['cache-control']).toBe('no-cache');
   });
 
   it('keeps files that carry their hash', async () => {
-    const { headers } = await supertest(app.address).get('/main-ABCD1234.js');
+    const { headers } = await browser(app.address).get('/main-ABCD1234.js');
     expect(headers['cache-control']).toBe('public, max-age=31536000, immutable');
   });
 
   it.each(['/main-OLD00000.js', '/api', '/../package.json', '/.env'])('does not answer %s', async (path) => {
-    expect((await supertest(app.address).get(path)).status).toBe(404);
+    expect((await browser(app.address).get(path)).status).toBe(404);
   });
 });
 

@@ -11,7 +11,8 @@ const day = 86_400_000;
 /** Sets and reads the cookies of a session: secure ones where the workbench is reached over https. */
 export class SessionCookies {
   private readonly secure: boolean;
-  private readonly accessName: string;
+  /** The cookie that a session is told by. */
+  readonly accessName: string;
   private readonly renewalName: string;
 
   constructor(publicUrl: URL) {
