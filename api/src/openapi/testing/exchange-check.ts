@@ -26,6 +26,7 @@ export function exchangeTrouble(exchange: Exchange): string | null {
   const path = paths.find(({ pattern }) => pattern.test(address))?.path;
   const method = exchange.method.toLowerCase() as keyof OpenApiDocument['paths'][string];
   const operation = path === undefined ? undefined : document.paths[path]?.[method];
+  if (!/^\/api(?:\/|$)/.test(address)) return null;
   // An address or a method that is not there is answered without a route.
   if (path === undefined || !operation)
     return exchange.status < 300 ? 'This route is not in the document.' : null;
