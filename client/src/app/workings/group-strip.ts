@@ -23,7 +23,7 @@ import { groups, placeOf } from './groups';
         }
       </nav>
       <label class="phone-only">
-        <span class="caption">{{ group.name | tradeWords }}</span>
+        <span class="caption">Working</span>
         <select #choice (change)="goTo(choice.value)">
           @for (each of group.workings; track each.key) {
             <option [value]="each.key" [selected]="each.key === of()">{{ each.title | tradeWords }}</option>

@@ -1,5 +1,13 @@
 import { DOCUMENT } from '@angular/common';
-import { ChangeDetectionStrategy, Component, computed, inject, input, signal } from '@angular/core';
+import {
+  ChangeDetectionStrategy,
+  Component,
+  computed,
+  ElementRef,
+  inject,
+  input,
+  signal,
+} from '@angular/core';
 import { tradeText } from '@second-spanner/shared/contracts/trade-words';
 import { typedLines, workingText } from '@second-spanner/shared/workings/working-text';
 import type { Working, WorkingCase } from '@second-spanner/shared/workings/working';
@@ -7,6 +15,7 @@ import { Cell } from '../../layout/cell';
 import { TitleBlock } from '../../layout/title-block';
 import { Sentence } from '../../quantity/sentence';
 import { SessionStore } from '../../session/session-store';
+import { VerdictLine } from '../../verdict/verdict';
 import { printMoment } from '../../words/dates';
 import { TradeWords } from '../../words/trade-words';
 import { WorkingActs } from '../acts/working-acts';
@@ -37,6 +46,7 @@ import { WorkingStart, type StartCase } from './working-start';
     Spoken,
     TitleBlock,
     TradeWords,
+    VerdictLine,
     WorkingActs,
     WorkingFieldControl,
     WorkingStart,
@@ -48,6 +58,7 @@ import { WorkingStart, type StartCase } from './working-start';
 })
 export class WorkingDesk {
   private readonly document = inject(DOCUMENT);
+  private readonly host = inject<ElementRef<HTMLElement>>(ElementRef);
   private readonly sessions = inject(SessionStore);
 
   readonly working = input.required<Working>();
@@ -95,11 +106,15 @@ export class WorkingDesk {
     this.shapes().length === 0 ? [] : this.answer().parts.filter(({ kind }) => kind === 'facts'),
   );
 
+  protected readonly judgement = computed(() =>
+    this.answer().parts.find((part) => part.kind === 'judgement'),
+  );
   /** Whether anything stands beside what is large. */
-  protected readonly isJudged = computed(() => {
-    const { parts, cautions } = this.answer();
-    return cautions.length > 0 || this.beside().length > 0 || parts.some(({ kind }) => kind === 'judgement');
-  });
+  protected readonly isJudged = computed(
+    () => this.answer().cautions.length > 0 || this.beside().length > 0 || this.judgement() !== undefined,
+  );
+  /** Nothing is large: the answer needs no columns of its own. */
+  protected readonly isPlain = computed(() => this.shapes().length === 0 && this.turns().length === 0);
 
   protected readonly group = computed(() => groupNames[this.working().group]);
   protected readonly title = computed(() => this.say(this.working().title));
@@ -127,6 +142,12 @@ export class WorkingDesk {
   protected begin(start: StartCase): void {
     this.start.set(start);
     this.show(start.typed);
+  }
+
+  protected goToAnswer(): void {
+    const answer = this.host.nativeElement.querySelector<HTMLElement>('.judged, .middle');
+    answer?.scrollIntoView({ block: 'start' });
+    answer?.focus({ preventScroll: true });
   }
 
   private show(typed: WorkingCase): void {

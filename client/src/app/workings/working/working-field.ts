@@ -24,10 +24,12 @@ export class WorkingFieldControl {
   protected readonly error = computed(() => this.errors()[this.field().name]);
   protected readonly hint = computed(() => {
     const { hint, optional } = this.field();
-    const ifOpen = optional === undefined ? [] : [ifLeftOpen(optional)];
-    return [...(hint === undefined ? [] : [hint]), ...ifOpen].join(' ') || null;
+    if (optional === undefined) return hint ?? null;
+    return [...(hint === undefined ? [] : [asSentence(hint)]), ifLeftOpen(optional)].join(' ');
   });
 }
 
+const asSentence = (words: string): string => (/[.?!:]$/.test(words) ? words : `${words}.`);
+
 const ifLeftOpen = (taken: string): string =>
-  taken === '' ? 'May be left open.' : `Left open: ${taken.replace(/\.$/, '')}.`;
+  taken === '' ? 'May be left open.' : asSentence(`Left open: ${taken}`);
