@@ -21,7 +21,7 @@ export function requirePosts(input: unknown, count: number, field: string): read
   if (items.length !== count) {
     throw new InputError(field, `The cap must have a post for each cylinder: ${count}, not ${items.length}.`);
   }
-  const posts = Array.from(items, (item, i) => requirePost(item, `${field}[${i}]`));
+  const posts = items.map((item, i) => requirePost(item, `${field}[${i}]`));
   posts.forEach((post, i) => {
     refuseTwins(post, posts.slice(0, i), `${field}[${i}]`);
   });

@@ -53,6 +53,7 @@ it.each([
   ['dwell', { cylinders: 4, dwell: NaN }],
   ['crankSpeed', { cylinders: 4, dwell: 60, crankSpeed: 0 }],
   ['crankSpeed', { cylinders: 4, dwell: 60, crankSpeed: -5 }],
+  ['crankSpeed', { cylinders: 4, dwell: 60, crankSpeed: 1e-308 }],
   ['strokesPerCycle', { cylinders: 4, dwell: 60, strokesPerCycle: 6 }],
 ])('refuses by %s', (field, request) => {
   expect(() => dwell(request as DwellRequest)).toThrow(expect.objectContaining({ field }));

@@ -4,8 +4,8 @@ import { requireNumber, requireOneOf, requireRecord } from '../quantities/requir
 import { mostCylinders } from './firing-order.js';
 import { degrees } from './words.js';
 
-/** Nothing with contact points turns faster than this, crank revolutions a minute. */
-const mostSpeed = 30_000;
+/** Nothing with contact points turns slower or faster than this, crank revolutions a minute. */
+const speeds = { min: 1, max: 30_000 };
 
 /**
  * Contact-breaker dwell: of the distributor degrees from one spark to the next (360 over the cylinders, for a
@@ -13,7 +13,7 @@ const mostSpeed = 30_000;
  * crank speed the seconds that is.
  *
  * @throws InputError on `cylinders` (1 to 16), `dwell` (more than 0° and less than the interval), `crankSpeed`
- * (revolutions a minute, more than 0) or `strokesPerCycle`
+ * (1 to 30 000 revolutions a minute) or `strokesPerCycle`
  * Source: definition of the dwell angle; common practice on contact breakers.
  * Example: 60° on a four at 5000 rev/min: open 30°, a spark every 6 ms, closed for 4 ms of it.
  */
@@ -33,8 +33,7 @@ export function dwell(request: DwellRequest): Dwell {
   }
   const angles = { interval, openAngle: interval - closed, share: closed / interval };
   if (given['crankSpeed'] === undefined) return angles;
-  const speed = requireNumber(given['crankSpeed'], 'crankSpeed', { min: 0, max: mostSpeed });
-  if (speed === 0) throw new InputError('crankSpeed', 'The crank speed must be more than zero.');
+  const speed = requireNumber(given['crankSpeed'], 'crankSpeed', speeds);
   const cycleTime = (60 / speed) * (strokes / 2);
   const between = cycleTime / cylinders;
   return {

@@ -37,7 +37,7 @@ export function requireIntervals(
       `There must be as many intervals as cylinders: ${count}, not ${items.length}.`,
     );
   }
-  const each = Array.from(items, (item, i) => {
+  const each = items.map((item, i) => {
     const interval = requireNumber(item, `${field}[${i}]`, { min: 0, max: cycle });
     if (interval === 0) throw new InputError(`${field}[${i}]`, 'An interval must be more than 0°.');
     return interval;

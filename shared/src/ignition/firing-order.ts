@@ -17,7 +17,7 @@ export function requireName(input: unknown, field: string): string {
 export function requireFiringOrder(input: unknown, field: string): readonly Cylinder[] {
   const items = requireList(input, field, { min: 1, max: mostCylinders });
   const labelled = typeof items[0] === 'string';
-  const order = Array.from(items, (item, i): Cylinder => {
+  const order = items.map((item, i): Cylinder => {
     const at = `${field}[${i}]`;
     return labelled ? requireLabel(item, at) : requireCylinderNumber(item, at, items.length);
   });

@@ -46,6 +46,10 @@ describe('requireQuantity', () => {
     expect(() => requireQuantity({ value: 0, unit: 'mm' }, 'length', 'bore', { zero: false })).toThrow(
       refusal('bore.value'),
     );
+    expect(() => requireQuantity({ value: 1e-300, unit: 'mm' }, 'length', 'bore', { zero: false })).toThrow(
+      refusal('bore.value'),
+    );
+    expect(requireQuantity({ value: 1e-300, unit: 'mm' }, 'length', 'gap').value).toBe(1e-300);
   });
 
   it('takes temperatures down to absolute zero, and no negative difference of them', () => {
@@ -87,6 +91,7 @@ describe('requireText, requireList, requireOneOf', () => {
   it('take what fits', () => {
     expect(requireText('post 1', 't')).toBe('post 1');
     expect(requireList([1, 2], 'l', { min: 1, max: 2 })).toEqual([1, 2]);
+    expect(requireList(new Array(2), 'l', { max: 2 }).map(() => 'seen')).toEqual(['seen', 'seen']);
     expect(requireOneOf('cap', ['cap', 'drive'], 'seenFrom')).toBe('cap');
   });
 

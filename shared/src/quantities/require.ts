@@ -7,11 +7,14 @@ import { readUnit } from './unit-names.js';
 export interface QuantityOptions {
   /** Negative figures are taken. Temperatures always are, down to absolute zero. */
   readonly negative?: boolean;
-  /** Zero is taken; it is unless this is false. */
+  /** Zero is taken; it is unless this is false, and then next to nothing isn't either: it is divided by. */
   readonly zero?: boolean;
   /** A difference, uncertainty or tolerance: a temperature then has no zero point and is not negative. */
   readonly interval?: boolean;
 }
+
+/** Nearer to zero than this no workshop figure lies, in whichever of our units. */
+const smallestValue = 1e-12;
 
 /**
  * An unknown input as a quantity of one kind, its unit made canonical.
@@ -64,7 +67,7 @@ export function requireText(input: unknown, field: string, options: { max?: numb
   return input;
 }
 
-/** An unknown input as a list of `min` to `max` items. Throws `InputError` on `field`. */
+/** An unknown input as a list of `min` to `max` items, a copy without holes. Throws `InputError` on `field`. */
 export function requireList(
   input: unknown,
   field: string,
@@ -75,7 +78,7 @@ export function requireList(
   if (input.length < min || input.length > options.max) {
     throw new InputError(field, `This must have ${min} to ${options.max} items; it has ${input.length}.`);
   }
-  return input;
+  return Array.from<unknown>(input);
 }
 
 const dangerousKeys: ReadonlySet<string> = new Set(['__proto__', 'constructor', 'prototype']);
@@ -148,7 +151,9 @@ function within(quantity: Quantity, kind: Kind, field: string, options: Quantity
     return quantity;
   }
   if (value < 0 && options.negative !== true) throw new InputError(path, 'This cannot be negative.');
-  if (value === 0 && options.zero === false) throw new InputError(path, 'This must be more than zero.');
+  if (Math.abs(value) < smallestValue && options.zero === false) {
+    throw new InputError(path, 'This must be more than zero.');
+  }
   return quantity;
 }
 

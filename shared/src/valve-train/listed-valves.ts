@@ -18,7 +18,7 @@ export interface PlacedValve extends ListedValve {
  */
 export function requireListedValves(input: unknown, firings: readonly Firing[]): readonly PlacedValve[] {
   const items = requireList(input, 'valves', { min: 1, max: mostValves });
-  const valves = Array.from(items, (item, i): PlacedValve => {
+  const valves = items.map((item, i): PlacedValve => {
     const at = `valves[${i}]`;
     const given = requireRecord(item, at);
     const { cylinder, firesAt } = firingOf(firings, given['cylinder'], `${at}.cylinder`);
