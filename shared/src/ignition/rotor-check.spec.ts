@@ -60,6 +60,24 @@ describe('at the static timing mark', () => {
     expect(answer).toMatchObject({ verdict: 'fail', error: 180, crankError: 180, atCompanion: false });
   });
 
+  it('does not take another cylinder’s post for the companion’s where the cap is spaced wrong', () => {
+    // The companion's post stands at 120° and No. 2's at 185°, 5° from half a turn on.
+    const spaced = [0, 90, 120, 185].map((angle) => ({ post: String(angle), angle }));
+    const answer = rotorCheck({ cap: { ...cap, posts: spaced }, rotorAngle: 182, timing });
+    expect(answer).toMatchObject({ verdict: 'doubtful', atCompanion: false, nearestCylinder: 2 });
+    expect(answer.reason).toContain('half a turn from No. 1’s post');
+  });
+
+  it('is never within the tolerance of two posts', () => {
+    // Twelve posts stand 30° apart: at 18° the rotor is nearer to the second.
+    const twelve = { firingOrder: [1, 7, 5, 11, 3, 9, 6, 12, 2, 8, 4, 10], rotation: 'clockwise' } as const;
+    const ask = (tolerance?: number) => rotorCheck({ cap: twelve, rotorAngle: 18, timing, tolerance });
+    expect(() => ask(15)).toThrow(expect.objectContaining({ field: 'tolerance' }));
+    expect(() => ask(15)).toThrow('less than 15°');
+    expect(ask(14.9)).toMatchObject({ verdict: 'fail', nearestCylinder: 7, error: 18 });
+    expect(ask().assumed[0]).toContain('5° of distributor');
+  });
+
   it('may be judged at another cylinder and with another tolerance', () => {
     const answer = rotorCheck({ cap, rotorAngle: 147, timing, cylinder: 3, tolerance: 12 });
     expect(answer).toMatchObject({ verdict: 'pass', wantedPost: '135', error: 12 });

@@ -1,5 +1,6 @@
 import type { CapMapRow, Cylinder } from '../contracts/calculations.js';
 import type { RotorCheck, RotorCheckRequest } from '../contracts/ignition-checks.js';
+import { InputError } from '../contracts/input-error.js';
 import { around } from '../quantities/around.js';
 import { requireNumber, requireOneOf, requireRecord } from '../quantities/require.js';
 import { turnBetween } from './cap-posts.js';
@@ -25,7 +26,8 @@ const usualTolerance = 5;
  * out on a four-stroke is exhaust TDC or the distributor half a turn out: `doubtful`, with how to tell.
  *
  * @throws InputError on what `capMap` refuses (fields under `cap`), `rotorAngle` (−360 to 360), `rotorSeenFrom`,
- * `timing`, `crankAt`, `cylinder`, `rotationOf`, `gearedRotor`, `tolerance` (0 to 45)
+ * `timing`, `crankAt`, `cylinder`, `rotationOf`, `gearedRotor`, `tolerance` (0 to 45, and less than half way from
+ * post to post)
  * Source: geometry of the cap; the distributor turns once a cycle. The usual 5° is common practice, no source.
  * Example: 1-3-4-2 clockwise, 10° of advance, rotor at 5° with the crank at TDC: right.
  */
@@ -37,13 +39,14 @@ export function rotorCheck(request: RotorCheckRequest): RotorCheck {
   const advance = requireStaticTiming(given['timing'], 'timing');
   const crankAt = requireOneOf(given['crankAt'] ?? 'static-mark', ['static-mark', 'tdc'] as const, 'crankAt');
   const wanted = requireCylinderRow(cap, given['cylinder'], 'cylinder');
-  const tolerance = requireNumber(given['tolerance'] ?? usualTolerance, 'tolerance', { min: 0, max: 45 });
+  const tolerance = requireTolerance(given['tolerance'], cap);
 
   const past = crankAt === 'tdc' ? advance / crankPerDistributor(cap) : 0;
   const pastPost = (post: CapMapRow): number => pastBy(cap, post, side === 'cap' ? angle : -angle, past);
   const nearest = cap.rows.reduce((best, row) => (off(pastPost(row)) < off(pastPost(best)) ? row : best));
   const error = pastPost(wanted);
   const companion = companionRow(cap, wanted);
+  const halfATurnOut = isHalfATurnOut(cap, error, tolerance, companion, pastPost);
   const seen: RotorSeen = {
     cap,
     wanted,
@@ -53,7 +56,9 @@ export function rotorCheck(request: RotorCheckRequest): RotorCheck {
     past,
     crankAt,
     tolerance,
-    halfATurnOut: isHalfATurnOut(cap, error, tolerance, companion, pastPost),
+    halfATurnOut,
+    // On a cap spaced wrong the rotor may stand half a turn out and yet not at the companion's post.
+    atCompanion: halfATurnOut && nearest === companion,
   };
   return {
     ...judgeRotor(seen),
@@ -64,10 +69,22 @@ export function rotorCheck(request: RotorCheckRequest): RotorCheck {
     wantedPost: wanted.post,
     error,
     crankError: error * crankPerDistributor(cap),
-    atCompanion: companion !== undefined && seen.halfATurnOut,
-    ...(seen.halfATurnOut ? { howToTell: howToTell(seen) } : {}),
+    atCompanion: seen.atCompanion,
+    ...(halfATurnOut ? { howToTell: howToTell(seen) } : {}),
     assumed: assumedBy(given, seen),
   };
+}
+
+/** Less than half way from post to post: a rotor is never within the tolerance of two of them. */
+function requireTolerance(input: unknown, { rows, rotation }: ResolvedCap): number {
+  const gaps = rows.map((row, i) => turnBetween(row.angle, (rows[i + 1] ?? rows[0] ?? row).angle, rotation));
+  const half = rows.length === 1 ? 180 : Math.min(...gaps) / 2;
+  const tolerance = requireNumber(input ?? Math.min(usualTolerance, half / 2), 'tolerance', {
+    min: 0,
+    max: 45,
+  });
+  if (tolerance < half) return tolerance;
+  throw new InputError('tolerance', `This must be less than ${degrees(half)}, half way from post to post.`);
 }
 
 /** Signed distributor degrees by which the rotor is past a post, (−180, 180]. */

@@ -18,6 +18,8 @@ export interface RotorSeen {
   readonly crankAt: 'static-mark' | 'tdc';
   readonly tolerance: number;
   readonly halfATurnOut: boolean;
+  /** Half a turn out, at the companion's post. */
+  readonly atCompanion: boolean;
 }
 
 /** Verdict and reason of a rotor check. */
@@ -64,12 +66,11 @@ function offBy({ error, cap }: RotorSeen): string {
 }
 
 function halfATurn(seen: RotorSeen): string {
-  const { wanted, companion } = seen;
+  const { wanted, atCompanion } = seen;
   const name = nameOf(wanted.cylinder);
-  const place =
-    companion === undefined
-      ? `The rotor points half a turn from ${name}’s post, ${named(wanted.post)}`
-      : `${where(seen)}: that is the companion of ${name}, whose own post is ${named(wanted.post)}`;
+  const place = atCompanion
+    ? `${where(seen)}: that is the companion of ${name}, whose own post is ${named(wanted.post)}`
+    : `The rotor points half a turn from ${name}’s post, ${named(wanted.post)}`;
   return `${place}. Either ${name} is at exhaust TDC and not at compression, or the distributor is half a turn out.`;
 }
 
