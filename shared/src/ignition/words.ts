@@ -1,5 +1,6 @@
 import type { Cylinder } from '../contracts/calculations.js';
 import { clip } from '../quantities/clip.js';
+import { printNumber } from '../quantities/print.js';
 
 /** A cylinder's, post's or outlet's name as it stands in a sentence: a very long one is cut. */
 export function named(name: string | number): string {
@@ -29,9 +30,9 @@ export function counted(count: number, one: string): string {
   return `${count} ${count === 1 ? one : `${one}s`}`;
 }
 
-/** Degrees for a sentence, to a tenth: `90°`, `102.9°`. */
+/** Degrees for a sentence, to a tenth, with a real minus sign: `90°`, `102.9°`, `−7°`. */
 export function degrees(angle: number): string {
-  return `${Math.round(angle * 10) / 10}°`;
+  return `${printNumber(angle, 1).replace(/\.0$/, '')}°`;
 }
 
 /** Whether a spark is a full crank turn from its time, give or take what is lost in rounding. */

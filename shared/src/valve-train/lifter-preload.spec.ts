@@ -18,6 +18,8 @@ describe('preload of a hydraulic lifter', () => {
     const pitch = { value: 1, unit: 'mm' } as const;
     const answer = lifterPreload({ turns: 1, pitch, adjuster: 'pivot', rockerRatio: 1.5 });
     expect(answer.preload.value).toBeCloseTo(2.5 / 1.5, 12);
+    expect(answer.reason).toContain('1 turn past');
+    expect(lifterPreload({ turns: 0.125, pitch }).reason).toContain('0.125 turns past');
   });
 
   it.each([

@@ -3,6 +3,7 @@ import type { LifterPreload, LifterPreloadRequest } from '../contracts/valve-fig
 import { limitDecision } from '../measuring/limit-decision.js';
 import { printNumber, printQuantity } from '../quantities/print.js';
 import { requireNumber, requireOneOf, requireQuantity, requireRecord } from '../quantities/require.js';
+import { decimalsOf } from '../quantities/round.js';
 
 /**
  * How far a hydraulic lifter's plunger is pressed in by turning the adjuster past zero lash: turns × pitch at the
@@ -21,7 +22,7 @@ export function lifterPreload(request: LifterPreloadRequest): LifterPreload {
   const adjuster = requireOneOf(given['adjuster'] ?? 'push-rod', ['push-rod', 'pivot'] as const, 'adjuster');
   const factor = adjuster === 'pivot' ? 1 + 1 / requireRatio(given['rockerRatio']) : 1;
   const preload = { value: turns * pitch.value * factor, unit: pitch.unit };
-  const at = `${printNumber(turns, turns % 1 === 0 ? 0 : 2)} turns`;
+  const at = `${printNumber(turns, Math.min(3, decimalsOf(turns)))} ${turns === 1 ? 'turn' : 'turns'}`;
   return {
     ...judge(preload, given['limits'], at),
     preload,
@@ -48,7 +49,7 @@ function judge(
   at: string,
 ): Pick<LifterPreload, 'verdict' | 'reason'> {
   if (input === undefined) {
-    const reason = `${at} past zero clearance press the plunger in by ${printQuantity(preload)}. No limits were given to judge that by.`;
+    const reason = `${at} past zero clearance: the plunger is pressed in by ${printQuantity(preload)}. No limits were given to judge that by.`;
     return { verdict: 'not-judged', reason };
   }
   const limits = requireRecord(input, 'limits');

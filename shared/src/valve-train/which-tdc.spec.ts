@@ -90,7 +90,7 @@ describe('by the rocking valves', () => {
     const { answer, reason, windows } = ask([[{ cylinder: 4, rocking: true }]], { valveTiming });
     expect(answer).toBe('contradiction');
     expect(windows).toEqual([]);
-    expect(reason).toContain('overlap of -30°');
+    expect(reason).toContain('overlap of −30°');
   });
 });
 
