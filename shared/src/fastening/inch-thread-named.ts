@@ -45,6 +45,9 @@ export function inchThread(text: string, field: string): Thread | undefined {
   const groups = written.exec(text)?.groups;
   if (groups === undefined) return undefined;
   const named = namedBy(groups);
+  if (!(named.diameter > 0 && named.diameter < Infinity)) {
+    throw new InputError(field, `${named.size} is no size: write it like 3/8-16 UNC.`);
+  }
   const word = groups['series'];
   if (word === undefined) throw new InputError(field, whichSeries(named));
   const series = spellings[word.toUpperCase()];

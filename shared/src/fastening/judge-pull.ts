@@ -62,7 +62,7 @@ function judgeReading(pull: Pull): Judgement {
   const { shown } = pull;
   const wanted = convert(pull.wanted, shown.unit);
   const allowed = convert(pull.allowed ?? pull.uncertaintyAt(wanted), shown.unit);
-  const within = Math.abs(shown.value - wanted.value) <= allowed.value;
+  const within = Math.abs(shown.value - wanted.value) <= allowed.value + noise;
   return {
     verdict: within ? 'pass' : 'fail',
     reason:

@@ -64,6 +64,21 @@ describe('a torque against the proof load', () => {
   });
 
   it.each([
+    // As = 57.99 mm² and d = 10 mm (ISO 898-1, 9.1.6.1), 580 MPa: T = share · 580 · As · K · d, by hand.
+    [0.25, 'pass'],
+    [0.9, 'pass'],
+    [1, 'doubtful'],
+  ])('at exactly %s of proof is %s, whatever the nut factor', (share, verdict) => {
+    const area = (Math.PI / 4) * (10 - (13 / 24) * Math.sqrt(3) * 1.5) ** 2;
+    for (const nutFactor of [0.1, 0.12, 0.15, 0.17, 0.2]) {
+      const value = (share * 580 * area * nutFactor * 10) / 1000;
+      const at = { torque: torque(value, 'N·m'), thread: 'M10x1.5', grade: '8.8', condition: { nutFactor } };
+      expect(doubt(at).verdict).toBe(verdict);
+      expect(doubt(at)).not.toHaveProperty('readAs');
+    }
+  });
+
+  it.each([
     ['M8', '8.8', 25.473600000000005], // T4-084, ISO898P: K·d·0.75·As·Sp.
     ['M10x1.5', 'class 8.8', 50.46000000000001], // T4-085, ISO898P.
   ])('%s of %s at 75 %% of proof takes %s N·m', (thread, grade, value) => {

@@ -75,6 +75,21 @@ describe('a wrench that is read', () => {
   });
 });
 
+it.each([
+  // 4 % of 0.3 is 0.012, 6 % of 70 is 4.2: the allowance itself is good.
+  [0.3, 0.04, 0.312, 'pass'],
+  [70, 0.06, 74.2, 'pass'],
+  [70, 0.06, 65.8, 'pass'],
+  [70, 0.06, 74.3, 'fail'],
+])('%s N·m by a dial of %s that shows %s without limits: %s', (wanted, deviation, shown, verdict) => {
+  const judged = torqueReading({
+    torque: torque(wanted, 'N·m'),
+    wrench: { kind: 'dial', deviation },
+    reading: torque(shown, 'N·m'),
+  });
+  expect(judged.verdict).toBe(verdict);
+});
+
 describe('input that cannot be used', () => {
   it.each([
     ['request', null],

@@ -5,7 +5,7 @@ import { toSi } from '../quantities/convert.js';
 import { printNumber, printQuantity } from '../quantities/print.js';
 import type { Grade } from './grade.js';
 import type { NutFactor } from './nut-factor.js';
-import { leastShare } from './read-as.js';
+import { isUnder, leastShare } from './read-as.js';
 import type { Thread } from './thread.js';
 
 export interface ClampCase {
@@ -71,13 +71,13 @@ export function judgeShare(
 }
 
 function finding(share: number): { readonly verdict: Judgement['verdict']; readonly words: string } {
-  if (share > 1) {
+  if (isUnder(1, share)) {
     return {
       verdict: 'fail',
       words: 'That is over the proof load: the bolt would stretch and stay stretched.',
     };
   }
-  if (share > mostShare) {
+  if (isUnder(mostShare, share)) {
     return {
       verdict: 'doubtful',
       words:
@@ -85,7 +85,7 @@ function finding(share: number): { readonly verdict: Judgement['verdict']; reado
         'read the figure again, and the condition that it is printed for.',
     };
   }
-  if (share < leastShare) {
+  if (isUnder(share, leastShare)) {
     return {
       verdict: 'doubtful',
       words: 'That is under 25 %, too little to hold most joints: read the figure and its unit again.',
