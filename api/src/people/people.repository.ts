@@ -12,19 +12,22 @@ export interface Account {
   readonly lockedAt: Date | null;
 }
 
+/** A person as others see them: nothing more leaves the database. */
+export type PersonNameRow = Pick<PersonEntity, 'id' | 'name' | 'role'>;
+
+const ofShop = `
+  SELECT id, name, role FROM people
+  WHERE shop_id = $1 AND ($2::text[] IS NULL OR role = ANY ($2::text[]) OR id = $3::uuid)
+  ORDER BY name, id`;
+
 /** One shop and its people. */
 export class PeopleRepository {
   constructor(private readonly scope: ShopScope) {}
 
   /** Everybody by name, or only those of some roles and one person besides. */
-  async list(only?: { readonly roles: readonly Role[]; readonly orId: string }): Promise<PersonEntity[]> {
-    const query = this.scope.manager
-      .createQueryBuilder(PersonEntity, 'person')
-      .where('person.shop_id = :shopId', { shopId: this.scope.shopId })
-      .orderBy('person.name')
-      .addOrderBy('person.id');
-    if (only) query.andWhere('(person.role = ANY (:roles) OR person.id = :orId)', only);
-    return query.getMany();
+  async list(only?: { readonly roles: readonly Role[]; readonly orId: string }): Promise<PersonNameRow[]> {
+    const values = [this.scope.shopId, only?.roles ?? null, only?.orId ?? null];
+    return this.scope.prepared('people-of-shop', ofShop, values);
   }
 
   async find(id: string): Promise<PersonEntity | null> {
