@@ -30,7 +30,13 @@ export function beltAlignment(request: BeltAlignmentRequest): BeltAlignment {
   const found = misalignment(planes, span, groovesApart(given['faceToGroove']));
   const unit = unitOf(given['gaps']);
   return {
-    ...judgeLine(found, span, requireBeltLimit(given['limit']), unit),
+    ...judgeLine(
+      found,
+      span,
+      requireBeltLimit(given['limit']),
+      unit,
+      given['faceToGroove'] === undefined ? 'rims' : 'grooves',
+    ),
     offset: fromSi(found.offset, unit),
     angle: found.angle,
   };

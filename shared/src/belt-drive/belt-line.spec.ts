@@ -48,6 +48,8 @@ describe('the line of a belt', () => {
       driven: [dynamo([0, 0, -3, -3], { faceToGroove: mm(12) })],
     };
     expect(beltLine(request).pulleys[0]?.offset.value).toBeCloseTo(0, 9);
+    expect(beltLine(request).reason).toContain('The grooves are');
+    expect(beltLine(line(dynamo([0, 0, 1, 1]))).reason).toContain('The rims are');
     expect(beltLine(request).assumed.join(' ')).not.toMatch(/rims are taken/);
   });
 });
@@ -86,6 +88,16 @@ describe('the cure', () => {
     expect(pulley?.cure.move.value).toBeCloseTo(move, 9);
     expect(pulley?.cure.shims).toBe(shims);
     expect(pulley?.cure.words).toMatch(words);
+  });
+
+  it.each([
+    // 0.0087 of the span is 6.09 and 1.479 mm: on the limit, which is good.
+    [700, 6.09],
+    [170, 1.479],
+  ])('of a pulley on the limit at %d mm of span is none, room or not', (span, back) => {
+    const pulley = cureOf([0, 0, back, back], { span: mm(span), shim: mm(0.5), roomInFront: mm(0.5) });
+    expect(pulley?.verdict).toBe('pass');
+    expect(pulley?.cure.words).toBe('The dynamo pulley may stay as it is.');
   });
 
   it('turns a pulley that leans the other way', () => {

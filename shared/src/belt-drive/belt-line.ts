@@ -52,8 +52,8 @@ function lineOf(pulley: Driven, limit: LimitTaken): PulleyLine {
   const found = { offset: mean((set) => set.offset), angle: mean((set) => set.angle) };
   const [first, second] = sets;
   const runOut = first === undefined || second === undefined ? null : (first.angle - second.angle) / 2;
-  const judged = judgeLine(found, span, limit, unit);
-  const isRunningOut = runOut !== null && Math.abs(runOut) > limit.angle / 2;
+  const judged = judgeLine(found, span, limit, unit, pulley.isByGroove ? 'grooves' : 'rims');
+  const isRunningOut = runOut !== null && Math.abs(runOut) > limit.angle / 2 + noise;
   const verdict: Verdict = judged.verdict === 'pass' && isRunningOut ? 'doubtful' : judged.verdict;
   const runs = isRunningOut
     ? ` A pulley runs out by ${printNumber(Math.abs(runOut), 2)}°: find which and true it before anything is shimmed.`
@@ -71,6 +71,8 @@ function lineOf(pulley: Driven, limit: LimitTaken): PulleyLine {
   };
 }
 
+/** Floating point alone moves an angle by less than this, degrees. */
+const noise = 1e-9;
 const ranks = ['fail', 'doubtful', 'pass'] as const satisfies readonly Verdict[];
 
 function overall(pulleys: readonly PulleyLine[]): { verdict: Verdict; reason: string } {

@@ -2,6 +2,7 @@ import type { PulleyLine } from '../contracts/belt-drive.js';
 import { fromSi } from '../quantities/convert.js';
 import type { LimitTaken } from './belt-limit.js';
 import type { Driven } from './driven-pulley.js';
+import { withinLimit } from './judge-line.js';
 import type { Misalignment } from './misalignment.js';
 import { printLength } from './print-length.js';
 
@@ -28,7 +29,7 @@ export function cureLine(
       words: [
         moveWords(pulley, found, limit, shims),
         turnWords(pulley, found, limit),
-        roomWords(pulley, offset, room),
+        withinLimit(found, pulley.span, limit).isInPlane ? '' : roomWords(pulley, offset, room),
       ]
         .filter((words) => words !== '')
         .join(' '),
@@ -43,8 +44,8 @@ function moveWords(
   limit: LimitTaken,
   shims: number | undefined,
 ): string {
-  const isInPlane = Math.abs(offset) / span <= limit.offsetPerSpan;
-  if (isInPlane) return Math.abs(angle) <= limit.angle ? `The ${name} may stay as it is.` : '';
+  const { isInPlane, isStraight } = withinLimit({ offset, angle }, span, limit);
+  if (isInPlane) return isStraight ? `The ${name} may stay as it is.` : '';
   const way = offset > 0 ? 'forward, towards the straight edge' : 'back, away from the straight edge';
   const move = `Move the ${name} ${printLength(Math.abs(offset), unit)} ${way}`;
   if (shims === undefined || shim === undefined || shims === 0) return `${move}.`;
@@ -54,8 +55,9 @@ function moveWords(
   return `${move}: ${offset > 0 ? 'put' : 'take'} ${count} of ${printLength(shim, unit)} ${offset > 0 ? 'behind it' : 'out from behind it'}${rest}.`;
 }
 
-function turnWords({ name, diameter, unit }: Driven, { angle }: Misalignment, limit: LimitTaken): string {
-  if (Math.abs(angle) <= limit.angle) return '';
+function turnWords({ name, diameter, span, unit }: Driven, found: Misalignment, limit: LimitTaken): string {
+  const { angle } = found;
+  if (withinLimit(found, span, limit).isStraight) return '';
   const swing = diameter * Math.tan((Math.abs(angle) * Math.PI) / 180);
   const way = angle > 0 ? 'back' : 'forward';
   return `Turn the ${name} until its far rim has come ${printLength(swing, unit)} ${way} against its near one.`;
