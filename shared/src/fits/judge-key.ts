@@ -4,7 +4,7 @@ import type { Judgement, Verdict } from '../contracts/verdict.js';
 import { fromSi } from '../quantities/convert.js';
 import { printQuantity } from '../quantities/print.js';
 import { classLimits, leastSize } from './class-limits.js';
-import { fitNoise } from './fit-noise.js';
+import { fitNoise, settled } from './fit-noise.js';
 
 /** Lengths in metres; `unit` is what they are printed in. */
 export interface KeyInPlace {
@@ -53,20 +53,20 @@ function side({ form, width, play, unit }: KeyInPlace, where: 'shaft' | 'hub'): 
   if (found < -mostTightness - fitNoise) {
     return {
       verdict: 'fail',
-      words: `The key will not enter the ${where}: it is ${figure} wider than the slot, and a slot is at most ${printed(mostTightness, unit)} tighter.`,
+      words: `The key will not enter the ${where}: it is ${beyond(-found, mostTightness, unit)} wider than the slot, and a slot is at most ${printed(mostTightness, unit)} tighter.`,
     };
   }
   if (found < -usualTightness - fitNoise) {
     return {
       verdict: 'doubtful',
-      words: `In the ${where} the key is ${figure} wider than its slot; over ${printed(usualTightness, unit)} it goes in only by force.`,
+      words: `In the ${where} the key is ${beyond(-found, usualTightness, unit)} wider than its slot; over ${printed(usualTightness, unit)} it goes in only by force.`,
     };
   }
   if (found > most + fitNoise) {
     const harm = where === 'shaft' ? 'it falls out on assembly' : 'the hub rocks on it';
     return {
       verdict: 'fail',
-      words: `The key has ${figure} of play in the ${where}, and a free fit has at most ${printed(most, unit)}: ${harm}.`,
+      words: `The key has ${beyond(found, most, unit)} of play in the ${where}, and a free fit has at most ${printed(most, unit)}: ${harm}.`,
     };
   }
   return { verdict: 'pass', words: goodWords(found, where, figure, printed(most, unit)) };
@@ -92,19 +92,25 @@ function top({ form, play, standsOut, unit }: KeyInPlace): Finding {
   if (standsOut <= fitNoise) {
     return {
       verdict: 'fail',
-      words: `The key does not reach the hub: it lies ${printed(Math.abs(standsOut), unit)} below the shaft’s top.`,
+      words: `The key does not reach the hub: it ${settled(standsOut) === 0 ? 'ends at the shaft’s top' : `lies ${printed(-standsOut, unit)} below the shaft’s top`}.`,
     };
   }
   return play.top <= fitNoise
     ? {
         verdict: 'fail',
-        words: `The key touches at the top (${figure} too high): it would push the hub off its centre.`,
+        words: `The key touches at the top${settled(play.top) === 0 ? '' : ` (${figure} too high)`}: it would push the hub off its centre.`,
       }
     : { verdict: 'pass', words: `Over the key ${figure} is free.` };
 }
 
 /** Three significant digits: what a micrometer reads on a play. */
-function printed(length: number, unit: Unit): string {
+function printed(length: number, unit: Unit, digits = 3): string {
   const { value } = fromSi(length, unit);
-  return printQuantity({ value: Number(value.toPrecision(3)), unit });
+  return printQuantity({ value: Number(value.toPrecision(digits)), unit });
+}
+
+/** The same with digits enough to tell it from the limit that it is beyond. */
+function beyond(length: number, limit: number, unit: Unit): string {
+  const isTold = (digits: number): boolean => printed(length, unit, digits) !== printed(limit, unit, digits);
+  return printed(length, unit, [3, 4, 5].find(isTold) ?? 6);
 }

@@ -77,6 +77,10 @@ describe('the limits of width', () => {
     expect(keyFit(five({ shaft: 5.2 })).reason).toMatch(/falls out on assembly/);
     expect(keyFit(five({ hub: 5.2 })).reason).toMatch(/rocks/);
     expect(keyFit(five({ hub: 4.8 })).reason).toMatch(/will not enter the hub: it is 0\.2\smm wider/);
+    // D10 +108 µm and key h9 −30 µm leave 0.108 mm over 3 to 6 mm: a little more must not print as just that.
+    expect(keyFit(five({ hub: 5.10804 })).reason).toMatch(/has 0\.10804\smm of play .* at most 0\.108\smm/);
+    expect(keyFit(five({ t2: 2 })).reason).not.toContain('too high');
+    expect(keyFit(five({ height: 3 })).reason).toMatch(/ends at the shaft’s top/);
   });
 });
 
