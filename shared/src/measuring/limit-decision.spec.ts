@@ -38,6 +38,12 @@ describe('limitDecision at one limit of 57 N·m, tool ± 1.1 N·m', () => {
     expect(reason).toContain('Rule: it passes only when clear of the limit');
   });
 
+  it('prints the reading to no more digits than were measured, whatever the tool’s share of it comes to', () => {
+    // 4 % of 27.4 is 1.096, by hand.
+    const { reason } = limitDecision({ value: Nm(27.4), high: Nm(29), uncertainty: Nm(1.096) });
+    expect(spaced(reason)).toMatch(/^27\.4 N·m is 0\.504 N·m inside the limit of 29\.000 N·m/);
+  });
+
   it('says how far a reading is over', () => {
     expect(spaced(limitDecision({ value: Nm(58.2), high: Nm(57), uncertainty: Nm(1.1) }).reason)).toContain(
       "58.2 N·m is 1.2 N·m over the limit of 57.0 N·m, more than the tool's ±1.1 N·m can explain.",

@@ -31,7 +31,7 @@ export function limitReason(finding: Finding, figures: Figures, nearest: Limit, 
   const digits = digitsToShow(figures, spare);
   const print = (value: number): string => printQuantity({ value, unit: figures.reading.unit }, { digits });
   const words: Words = {
-    value: printQuantity(figures.reading, { digits: Math.min(digits, decimalsWritten(figures)) }),
+    value: printQuantity(figures.reading, { digits: Math.min(digits, decimalsMeasured(figures)) }),
     limit: clear === 0 ? print(nearest.at) : printLimit(nearest, figures, digits),
     spare: print(spare),
     isAt: roundTo(spare, digits) === 0,
@@ -119,7 +119,16 @@ function digitsToShow(figures: Figures, spare: number): number {
 
 /** The most decimals among the figures given in the reading's unit. */
 function decimalsWritten(figures: Figures): number {
-  const alike = givenFigures(figures).filter(({ unit }) => unit === figures.reading.unit);
+  return mostDecimals(givenFigures(figures), figures.reading.unit);
+}
+
+/** As many as the reading was taken to: a tool's uncertainty is often a share of it, with decimals of its own. */
+function decimalsMeasured({ reading, limits }: Figures): number {
+  return mostDecimals([reading, ...limits.map(({ given }) => given)], reading.unit);
+}
+
+function mostDecimals(figures: readonly Quantity[], unit: Quantity['unit']): number {
+  const alike = figures.filter((figure) => figure.unit === unit);
   return Math.max(...alike.map(({ value }) => decimalsOf(value)));
 }
 
