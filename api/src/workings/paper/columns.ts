@@ -16,7 +16,11 @@ export function columnsFor(
   const wanted = columns.map(({ name, figures }, index) => {
     const font = figures ? 'figures' : 'text';
     const cells = rows.map((row) => pages.widthOf(row[index] ?? '', font, cellSize));
-    return Math.max(pages.widthOf(name, 'plate', cellSize), ...cells) + cellPad + 6;
+    // A long text goes on several lines rather than take the others' room.
+    return Math.min(
+      pages.width / 2,
+      Math.max(pages.widthOf(name, 'plate', cellSize), ...cells) + cellPad + 6,
+    );
   });
   const all = wanted.reduce((sum, width) => sum + width, 0);
   const scale = Math.min(1.6, pages.width / all);
