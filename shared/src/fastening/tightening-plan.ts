@@ -26,6 +26,7 @@ const noise = 1e-9;
  * given in; angles in degrees. `low` and `high` stand on passes to the full torque and on check passes only.
  *
  * @throws InputError on the request's fields, such as `fasteners.rows`, `passes[2].fraction`, `sequence[3]`
+ * Source: the order as `generalSequence` says; passes and tolerances are the request's own.
  * Example: a grid of 2 × 5 begins with the two of the middle column; 27 lbf·ft in passes of ⅓, ⅔ and 1 is
  * 9, 18 and 27 lbf·ft.
  */

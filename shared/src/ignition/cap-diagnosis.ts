@@ -32,6 +32,8 @@ const usualAdvance = 10;
  * Throws `InputError`: what `capMap` refuses (fields under `cap`), a two-stroke, a post or outlet that is
  * unknown, empty or has a cylinder that another has too, valve timing or advance (−20° to 90°) out of reason.
  * Source: geometry of the cap and of the four-stroke cycle.
+ * Example: 1-3-4-2 set out on posts 1, 4, 3 and 2 of a clockwise rotor is wired against it; one swap, of posts 2
+ * and 4, cures it.
  */
 export function capDiagnosis(request: CapDiagnosisRequest): CapDiagnosis {
   const given = requireRecord(request, 'request');

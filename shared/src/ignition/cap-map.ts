@@ -16,6 +16,7 @@ import { cylindersNamed, degrees, listed } from './words.js';
  * unknown rotation or side, another number of posts than of cylinders, two posts at one angle or of one name,
  * an unknown first post, intervals that do not add up to the cycle, a trace that is not one to one.
  * Source: geometry; the distributor turns once in a cycle.
+ * Example: 1-3-4-2 with a rotor that turns anticlockwise goes on posts 1, 4, 3 and 2.
  */
 export function capMap(request: CapMapRequest): CapMap {
   const cap = resolveCap(request);

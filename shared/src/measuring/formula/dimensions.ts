@@ -18,10 +18,12 @@ const ofKind: Record<Exclude<Kind, 'temperature'>, Dimensions> = {
   resistance: [0, 0, 0, 1],
 };
 
+/** The powers that a kind of figure is made of. Example: a torque is m²·kg·s⁻². */
 export function dimensionsOf(kind: Exclude<Kind, 'temperature'>): Dimensions {
   return ofKind[kind];
 }
 
+/** Whether two figures may be added: all their powers are the same. */
 export function areAlike(a: Dimensions, b: Dimensions): boolean {
   return a.every((power, i) => power === b[i]);
 }
