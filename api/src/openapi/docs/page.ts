@@ -66,8 +66,9 @@ function contents(groups: readonly Group[]): Html {
         </li>`,
     );
     return html`<details>
-      <summary><a href="#${groupAnchor(name)}">${name}</a>, ${routes.length}</summary>
+      <summary>${name}, ${routes.length}</summary>
       <ul>
+        <li><a href="#${groupAnchor(name)}">All of them</a></li>
         ${entries}
       </ul>
     </details>`;
