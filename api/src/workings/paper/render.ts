@@ -14,7 +14,7 @@ export async function renderWorking(working: WorkingPaper): Promise<Buffer> {
   heading(pages, 'What was typed');
   tableOf(
     pages,
-    [{ name: 'Field' }, { name: 'Typed', figures: true }],
+    [{ name: 'What' }, { name: 'As typed', figures: true }],
     working.typed.map(({ label, value }) => [label, value]),
     say,
   );

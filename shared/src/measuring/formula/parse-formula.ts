@@ -41,6 +41,7 @@ export function parseFormula(input: unknown, field = 'formula'): Term {
   if (!allowed.test(text)) {
     return refuse('Only names of readings, numbers with a point, + − × ÷ and brackets may stand here.');
   }
+  if (/(?<![\w.])0[box]/i.test(text)) return refuse('Only plain decimal numbers may stand here.');
   return termOf(parsed(text, refuse), 0, refuse);
 }
 
@@ -86,6 +87,7 @@ function operationOf(
   const [fn, args] = [String(parts['fn']), parts['args']];
   const [left, right] = Array.isArray(args) ? (args as readonly unknown[]) : [];
   if (fn === 'unaryMinus') return { kind: 'minus', of: next(left) };
+  if (fn === 'unaryPlus') return next(left);
   const by = operations.get(fn);
   if (by === undefined) return refuse(`“${clip(fn)}” is not known here: only + − × ÷ and brackets.`);
   if (parts['implicit'] === true) return refuse('Write the sign between the two: × for times.');
