@@ -1,11 +1,13 @@
 import { tradeText } from '../contracts/trade-words.js';
-import type {
-  AnswerPart,
-  Working,
-  WorkingAnswer,
-  WorkingCase,
-  WorkingField,
-  WorkingOptions,
+import {
+  begunFrom,
+  type AnswerPart,
+  type ChoiceField,
+  type Working,
+  type WorkingAnswer,
+  type WorkingCase,
+  type WorkingField,
+  type WorkingOptions,
 } from './working.js';
 import { readRows } from './rows.js';
 
@@ -14,31 +16,40 @@ export interface TypedLine {
   readonly value: string;
 }
 
-/** What was typed, as label and value, in the order of the page; fields left open are not there. */
+/**
+ * What the case was begun from and what was typed, as label and value, in the order of the page; fields left open
+ * are not there.
+ */
 export function typedLines(working: Working, typed: WorkingCase): readonly TypedLine[] {
-  return working.sections
+  const fields = working.sections
     .flatMap((section) => section.fields)
     .filter((field) => field.when?.(typed) !== false)
-    .map((field) => ({ label: field.label, value: typedValue(field, typed[field.name] ?? '') }))
-    .filter(({ value }) => value !== '');
+    .map((field) => ({ label: field.label, value: typedValue(field, typed[field.name] ?? '') }));
+  return [{ label: 'Begun from', value: typed[begunFrom] ?? '' }, ...fields].filter(
+    ({ value }) => value !== '',
+  );
 }
 
 /** The value of a choice that says nothing, such as `not looked at`: it is left out with the fields left open. */
 const nothingChosen = '-';
 
 function typedValue(field: WorkingField, text: string): string {
+  if (field.kind === 'choice') {
+    const value = text === '' ? field.starts : text;
+    if (value === nothingChosen) return '';
+    return field.choices.find((choice) => choice.value === value)?.words ?? value;
+  }
+  return text === '' ? '' : writtenValue(field, text);
+}
+
+function writtenValue(field: Exclude<WorkingField, ChoiceField>, text: string): string {
   switch (field.kind) {
-    case 'choice': {
-      const value = text === '' ? field.starts : text;
-      if (value === nothingChosen) return '';
-      return field.choices.find((choice) => choice.value === value)?.words ?? value;
-    }
     case 'quantity':
-      return /^[^a-zµ°Ω"']*$/i.test(text) && text !== '' ? `${text} ${field.unit}` : text;
+      return /^[^a-zµ°Ω"']*$/i.test(text) ? `${text} ${field.unit}` : text;
     case 'number':
-      return text === '' ? '' : (text + (field.counts === '°' ? '°' : ` ${field.counts}`)).trim();
+      return (text + (field.counts === '°' ? '°' : ` ${field.counts}`)).trim();
     case 'turn':
-      return text === '' ? '' : `${text}°`;
+      return `${text}°`;
     case 'rows':
       return readRows(
         text,
@@ -51,6 +62,8 @@ function typedValue(field: WorkingField, text: string): string {
             .join(' '),
         )
         .join('; ');
+    case 'text':
+      return field.says?.(text) ?? text;
     default:
       return text;
   }
@@ -79,6 +92,10 @@ export function workingText(
 const listed = (what: string, lines: readonly string[]): readonly string[] =>
   lines.map((line) => `${what}: ${line}`);
 
+/** The word that stands before a judgement's reason. */
+const judgementWord = ({ verdict, word, waits }: Extract<AnswerPart, { kind: 'judgement' }>): string =>
+  word ?? (waits === true ? 'Waiting' : verdictWords[verdict]);
+
 const verdictWords = {
   pass: 'Pass',
   fail: 'Fail',
@@ -89,7 +106,7 @@ const verdictWords = {
 function partLines(part: AnswerPart): readonly string[] {
   switch (part.kind) {
     case 'judgement':
-      return [`${part.of === undefined ? '' : `${part.of}. `}${verdictWords[part.verdict]}: ${part.reason}`];
+      return [`${part.of === undefined ? '' : `${part.of}. `}${judgementWord(part)}: ${part.reason}`];
     case 'facts':
       return part.facts.map(
         ({ name, value, note }) => `${name}: ${value}${note === undefined ? '' : ` (${note})`}`,

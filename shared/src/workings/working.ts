@@ -21,6 +21,13 @@ export type WorkingGroup = (typeof workingGroups)[number];
  */
 export type WorkingCase = Readonly<Record<string, string>>;
 
+/**
+ * The name in every case, of no field, of what the case was begun from: `AT18, edition 2: head nuts`, at most
+ * `begunFromLength` characters.
+ */
+export const begunFrom = 'of';
+export const begunFromLength = 120;
+
 interface FieldBase {
   readonly name: string;
   /** Sentence case; trade-word tokens allowed. */
@@ -57,6 +64,8 @@ export interface TextField extends FieldBase {
   readonly kind: 'text';
   /** Set in the figures face: codes, orders, formulas. */
   readonly figures?: true;
+  /** How its text reads to a person, where it is written in short: `45° to C` for `45:C`. */
+  readonly says?: (text: string) => string;
 }
 export interface MomentField extends FieldBase {
   /** A local date, or a date and time, as `2026-12-01` or `2026-12-01T14:00`. */
@@ -87,7 +96,16 @@ export interface FieldSection {
 }
 
 export type AnswerPart =
-  | { readonly kind: 'judgement'; readonly of?: string; readonly verdict: Verdict; readonly reason: string }
+  | {
+      readonly kind: 'judgement';
+      readonly of?: string;
+      readonly verdict: Verdict;
+      /** Said in place of the verdict's own word: `Order worked out`. */
+      readonly word?: string;
+      /** Nothing failed, it is too early: shown with the waiting sign and, without `word`, the word Waiting. */
+      readonly waits?: true;
+      readonly reason: string;
+    }
   | {
       readonly kind: 'facts';
       readonly heading?: string;
