@@ -6,7 +6,7 @@ import type {
   Cylinder,
   Rotation,
 } from '../contracts/calculations.js';
-import type { CapSides, PlacedLead } from './cap-layout.js';
+import { traced, type CapSides, type PlacedLead } from './cap-layout.js';
 
 export interface CapDrawingInput {
   readonly map: Pick<CapMap, 'rows'>;
@@ -35,8 +35,10 @@ export interface LeadState {
 
 export interface LeadHere extends PlacedLead {
   readonly state: LeadState;
-  /** The name by which the outlet is called: its own where it has one, its post's angle where it has not. */
+  /** The name by which the outlet is called: its own on a traced cap, its post's angle on any other. */
   readonly name: string;
+  /** Whether that name is drawn on the outlet. */
+  readonly lettered: boolean;
   /** Where this lead belongs, if it is wrong and belongs on this cap. */
   readonly moveTo?: string;
 }
@@ -51,11 +53,13 @@ export function rotationOnCap(request: Pick<CapMapRequest, 'rotation' | 'rotatio
 
 /** Says of every placed lead what is fitted there, and whether and where it must go. */
 export function leadsHere(placed: readonly PlacedLead[], input: CapDrawingInput): readonly LeadHere[] {
+  const lettered = traced(placed.map(({ row }) => row));
+  const nameOf = ({ outlet, angle }: CapMapRow): string => (lettered ? outlet : `${degrees(angle)}°`);
   return placed.map((one) => {
     const state = stateOf(one.row, input);
     const home = placed.find(({ row }) => row.cylinder === state.cylinder);
-    const moveTo = state.wrong && home !== undefined ? outletName(home.row) : undefined;
-    return { ...one, state, name: outletName(one.row), moveTo };
+    const moveTo = state.wrong && home !== undefined ? nameOf(home.row) : undefined;
+    return { ...one, state, name: nameOf(one.row), lettered, moveTo };
   });
 }
 
@@ -67,10 +71,6 @@ function stateOf(row: CapMapRow, input: CapDrawingInput): LeadState {
   const cylinder = input.fitted[input.fittedBy === 'outlet' ? row.outlet : row.post];
   const wrong = input.showRequired && cylinder !== undefined && String(cylinder) !== String(row.cylinder);
   return { cylinder, wrong, inHand };
-}
-
-function outletName({ outlet, post, angle }: CapMapRow): string {
-  return outlet === post ? `${degrees(angle)}°` : outlet;
 }
 
 /** An angle, 0 to 360, without needless decimals. */

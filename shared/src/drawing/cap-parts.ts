@@ -208,7 +208,7 @@ function tapered(
 }
 
 function outletName({ centre }: CapLayout, placed: LeadHere, reach: number): readonly Shape[] {
-  if (placed.row.outlet === placed.row.post) {
+  if (!placed.lettered) {
     return [];
   }
   const at =

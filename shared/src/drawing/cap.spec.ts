@@ -149,6 +149,24 @@ describe('what is fitted', () => {
     expect(partsOf(drawing, 'swap')).toEqual([]);
   });
 
+  it('calls every outlet of a traced cap by its letter, also those with the name of the post they lead to', () => {
+    const named: CapMapRequest = {
+      ...four,
+      posts: [
+        { post: 'C', angle: 45 },
+        { post: 'D', angle: 135 },
+        { post: 'B', angle: 225 },
+        { post: 'A', angle: 315 },
+      ],
+      firstPost: 'A',
+      trace: { A: 'B', B: 'A', C: 'C', D: 'D' },
+    };
+    const drawing = asFitted(named, { A: 2, B: 1, C: 3, D: 4 });
+    expect(wordsOf(drawing)).toEqual(expect.arrayContaining(['A', 'B', 'C', 'D', 'to C', 'to A']));
+    expect(drawing.table.rows.map((row) => row.at(-1))).toEqual(['right', 'to C', 'right', 'to A']);
+    expect(unreadable(drawing)).toEqual([]);
+  });
+
   it('marks nothing on a cap that is right', () => {
     expect(wrong(asFitted(four, { A: 3, B: 1, C: 2, D: 4 }))).toEqual([]);
   });
