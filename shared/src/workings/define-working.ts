@@ -30,14 +30,21 @@ export function defineWorking({ answer, basis, fieldOf = [], ...working }: Defin
   return {
     ...working,
     workOut: (typed, options): WorkingAnswer => {
-      const { errors, missing, reader } = readCase(fields, typed);
+      const { errors, missing, assumed: read, reader } = readCase(fields, typed);
       const nothing = { parts: [], assumed: [], cautions: [], basis };
       if (Object.keys(errors).length > 0 || missing.length > 0) {
         return { ...nothing, errors, missing: sayMissing(missing) };
       }
       try {
         const { parts, assumed = [], cautions = [] } = answer(reader, options);
-        return { errors: {}, missing: null, parts, assumed, cautions, basis };
+        return {
+          errors: {},
+          missing: null,
+          parts,
+          assumed: [...new Set([...read, ...assumed])],
+          cautions,
+          basis,
+        };
       } catch (error) {
         if (!(error instanceof InputError)) throw error;
         return { ...nothing, errors: { [fieldAt(error.field, fieldOf)]: error.message }, missing: null };

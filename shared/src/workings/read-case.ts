@@ -4,6 +4,7 @@ import type { CellField, RowsField, WorkingCase, WorkingField } from './working.
 import { parseQuantity } from '../quantities/parse.js';
 import { requireQuantity } from '../quantities/require.js';
 import { readRows } from './rows.js';
+import { unitTaken } from './unit-taken.js';
 
 /** The fields of a case as values. A field that is asked for must be of the kind that its name says. */
 export interface CaseReader {
@@ -25,6 +26,8 @@ export interface CaseReading {
   readonly errors: Readonly<Record<string, string>>;
   /** Labels of what may not stay empty and is. */
   readonly missing: readonly string[];
+  /** What was read into a text that left it open. */
+  readonly assumed: readonly string[];
   readonly reader: CaseReader;
 }
 
@@ -34,13 +37,15 @@ type Value = Quantity | number | string;
 export function readCase(fields: readonly WorkingField[], typed: WorkingCase): CaseReading {
   const errors: Record<string, string> = {};
   const missing: string[] = [];
-  const reader = readFields(fields, typed, '', { errors, missing });
-  return { errors, missing, reader };
+  const assumed: string[] = [];
+  const reader = readFields(fields, typed, '', { errors, missing, assumed });
+  return { errors, missing, assumed, reader };
 }
 
 interface Findings {
   readonly errors: Record<string, string>;
   readonly missing: string[];
+  readonly assumed: string[];
 }
 
 function readFields(
@@ -90,7 +95,7 @@ function readValue(
   field: Exclude<WorkingField, RowsField>,
   text: string,
   path: string,
-  { errors }: Findings,
+  { errors, assumed }: Findings,
 ): Value | undefined {
   if (field.kind === 'choice') return readChoice(field, text, path, errors);
   if (text === '') return undefined;
@@ -98,7 +103,10 @@ function readValue(
     switch (field.kind) {
       case 'quantity': {
         const { signed: negative, interval } = field;
-        return requireQuantity(parseQuantity(text, field.unit, path), field.of, path, { negative, interval });
+        const unit = unitTaken(field, text);
+        const read = requireQuantity(parseQuantity(text, unit, path), field.of, path, { negative, interval });
+        if (unit !== field.unit) assumed.push(`${text} was taken as inches.`);
+        return read;
       }
       case 'number':
         return readPlain(text, path, field.signed === true);

@@ -210,3 +210,29 @@ describe('a torque that is doubted', () => {
     expect(answer(torqueDoubtWorking, typed).parts.map(({ kind }) => kind)).toEqual(['judgement', 'facts']);
   });
 });
+
+describe('a length in the wrong unit', () => {
+  it.each([
+    // 55 lbf·ft with 18 in and 2½ in: 55·18/20.5 = 48.29 lbf·ft, by hand.
+    [
+      { wrenchLength: '18', adapterLength: '2 1/2"' },
+      'Doubtful: A wrench 18 mm long? As typed, its adapter is longer',
+    ],
+    [
+      { wrenchLength: '90 mm', adapterLength: '40 mm' },
+      'Doubtful: A wrench 90 mm long? As typed, no torque wrench',
+    ],
+    [{ wrenchLength: '18 in', adapterLength: '2 1/2' }, 'Set it to: 48.29 lbf·ft'],
+    [{ wrenchLength: '18 in', adapterLength: '2 1/2' }, 'Assumed: 2 1/2 was taken as inches.'],
+    [{ wrenchLength: '18 in', adapterLength: '2 1/2' }, 'middle of the fastener: 2 1/2 in'],
+    [{ wrenchLength: '18 in', adapterLength: '2½' }, 'Set it to: 48.29 lbf·ft'],
+  ])('%j', (lengths, words) => {
+    expect(textOf(wrenchSettingWorking, { torque: '55 ft lbs', ...lengths })).toContain(words);
+  });
+
+  it('is not asked about where it can be right', () => {
+    expect(
+      textOf(wrenchSettingWorking, { torque: '55 ft lbs', wrenchLength: '18 in', adapterLength: '64 mm' }),
+    ).not.toMatch(/Doubtful|taken as inches/);
+  });
+});

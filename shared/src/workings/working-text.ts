@@ -10,6 +10,7 @@ import {
   type WorkingOptions,
 } from './working.js';
 import { readRows } from './rows.js';
+import { unitTaken } from './unit-taken.js';
 
 export interface TypedLine {
   readonly label: string;
@@ -45,7 +46,7 @@ function typedValue(field: WorkingField, text: string): string {
 function writtenValue(field: Exclude<WorkingField, ChoiceField>, text: string): string {
   switch (field.kind) {
     case 'quantity':
-      return /^[^a-zµ°Ω"']*$/i.test(text) ? `${text} ${field.unit}` : text;
+      return /^[^a-zµ°Ω"']*$/i.test(text) ? `${text} ${unitTaken(field, text)}` : text;
     case 'number':
       return (text + (field.counts === '°' ? '°' : ` ${field.counts}`)).trim();
     case 'turn':

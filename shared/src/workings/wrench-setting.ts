@@ -1,12 +1,13 @@
 import { InputError } from '../contracts/input-error.js';
 import type { Quantity } from '../contracts/quantity.js';
 import { wrenchSetting } from '../fastening/wrench-setting.js';
-import { convert } from '../quantities/convert.js';
+import { convert, toSi } from '../quantities/convert.js';
 import { printNumber } from '../quantities/print.js';
 import { defineWorking, type WorkedOut } from './define-working.js';
 import { torqueField } from './fastening/fields.js';
 import { newtonMetresBeside } from './fastening/figures.js';
 import { printFigure } from '../fastening/print-figure.js';
+import type { AnswerPart } from './working.js';
 import { casesOfGroups, torqueOfGroup } from './fastening/groups-of-spec.js';
 
 /** What a torque wrench is set to with an adapter or crow-foot on it. */
@@ -74,16 +75,18 @@ export const wrenchSettingWorking = defineWorking({
   answer: (read): WorkedOut => {
     const torque = read.quantity('torque');
     const angle = read.numberIf('angle') ?? 0;
+    const [wrenchLength, adapterLength] = [read.quantity('wrenchLength'), read.quantity('adapterLength')];
     const { setting } = wrenchSetting({
       torque,
-      wrenchLength: read.quantity('wrenchLength'),
-      adapterLength: read.quantity('adapterLength'),
+      wrenchLength,
+      adapterLength,
       adapterAngle: angle,
     });
     const division = read.quantityIf('division');
     const atDivision = division && toDivision(setting, division);
     return {
       parts: [
+        ...doubtOf(wrenchLength, adapterLength),
         {
           kind: 'facts',
           heading: 'The wrench',
@@ -105,6 +108,26 @@ export const wrenchSettingWorking = defineWorking({
     };
   },
 });
+
+/** No torque wrench is shorter than this, metres: common practice, no source. */
+const shortestWrench = 0.1;
+
+/** A length typed in the wrong unit makes a setting that looks like one; such a wrench is asked about. */
+function doubtOf(wrench: Quantity, adapter: Quantity): readonly AnswerPart[] {
+  const [length, beside] = [toSi(wrench), toSi(adapter)];
+  if (length >= shortestWrench && length >= beside) return [];
+  const why =
+    length < beside
+      ? `its adapter is longer, ${printFigure(adapter)}`
+      : 'no torque wrench is as short as that';
+  return [
+    {
+      kind: 'judgement',
+      verdict: 'doubtful',
+      reason: `A wrench ${printFigure(wrench)} long? As typed, ${why}: look at the units of both lengths before you set it.`,
+    },
+  ];
+}
 
 function toDivision(setting: Quantity, division: Quantity): Quantity {
   const step = convert(division, setting.unit).value;
