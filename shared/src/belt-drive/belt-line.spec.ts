@@ -118,6 +118,13 @@ describe('the cure', () => {
   });
 });
 
+it('a pulley over its limit by less than is printed is said to be just over', () => {
+  // 0.0087 of 300 mm is 2.61 mm.
+  const { verdict, reason } = beltLine(line(dynamo([0, 0, 2.612, 2.612])));
+  expect(verdict).toBe('fail');
+  expect(reason).toMatch(/2\.61\smm out of one plane \(just over the 2\.61\smm allowed over this span\)/);
+});
+
 describe('input that cannot be used', () => {
   const good = line(dynamo([0, 0, 1, 1]));
   it.each([

@@ -39,14 +39,16 @@ export function cureLine(
 }
 
 function moveWords(
-  { name, shim, span, unit }: Driven,
+  { name, shim, span, unit, sets }: Driven,
   { offset, angle }: Misalignment,
   limit: LimitTaken,
   shims: number | undefined,
 ): string {
   const { isInPlane, isStraight } = withinLimit({ offset, angle }, span, limit);
   if (isInPlane) return isStraight ? `The ${name} may stay as it is.` : '';
-  const way = offset > 0 ? 'forward, towards the straight edge' : 'back, away from the straight edge';
+  // Of an edge that does not lie flat on the driver, towards and away mean nothing: the driver's plane decides.
+  const isFlat = sets.every(({ driver }) => Math.abs(driver.slope) < noise);
+  const way = `${offset > 0 ? 'forward' : 'back'}${isFlat ? (offset > 0 ? ', towards the straight edge' : ', away from the straight edge') : ''}`;
   const move = `Move the ${name} ${printLength(Math.abs(offset), unit)} ${way}`;
   if (shims === undefined || shim === undefined || shims === 0) return `${move}.`;
   const count = shims === 1 ? 'one shim' : `${shims} shims`;
@@ -60,7 +62,7 @@ function turnWords({ name, diameter, span, unit }: Driven, found: Misalignment, 
   if (withinLimit(found, span, limit).isStraight) return '';
   const swing = diameter * Math.tan((Math.abs(angle) * Math.PI) / 180);
   const way = angle > 0 ? 'back' : 'forward';
-  return `Turn the ${name} until its far rim has come ${printLength(swing, unit)} ${way} against its near one.`;
+  return `Swing the ${name} on its mounting until its far rim has come ${printLength(swing, unit)} ${way} against its near one.`;
 }
 
 function roomWords({ unit }: Driven, offset: number, room: number | undefined): string {

@@ -33,18 +33,16 @@ export function judgeLine(
 ): Judgement {
   const { offset, angle } = found;
   const { isStraight, isInPlane } = withinLimit(found, span, limit);
-  const out = lengths(Math.abs(offset), limit.offsetPerSpan * span, unit);
-  const turned = `turned ${printNumber(Math.abs(angle), 2)}° to each other (at most ${printNumber(limit.angle, 2)}°)`;
+  const [out, most] = [Math.abs(offset), limit.offsetPerSpan * span].map((metres) =>
+    printLength(metres, unit),
+  );
+  const [turned, mostTurned] = [Math.abs(angle), limit.angle].map((degrees) => `${printNumber(degrees, 2)}°`);
   return {
     verdict: isStraight && isInPlane ? 'pass' : 'fail',
-    reason: `The ${of} are ${out.found} out of one plane (at most ${out.allowed} over this span) and ${turned}.`,
+    reason: `The ${of} are ${out} out of one plane (${allowed(isInPlane, out, most)} over this span) and turned ${turned} to each other (${allowed(isStraight, turned, mostTurned)}).`,
   };
 }
 
-/** Both printed alike, with a digit more where they would look the same. */
-function lengths(found: number, allowed: number, unit: Unit): { found: string; allowed: string } {
-  const coarse = { found: printLength(found, unit), allowed: printLength(allowed, unit) };
-  return coarse.found === coarse.allowed
-    ? { found: printLength(found, unit, 4), allowed: printLength(allowed, unit, 4) }
-    : coarse;
-}
+/** What is allowed; a figure over it by less than is printed of either is said to be just over. */
+const allowed = (isWithin: boolean, found = '', most = ''): string =>
+  !isWithin && found === most ? `just over the ${most} allowed` : `at most ${most}`;

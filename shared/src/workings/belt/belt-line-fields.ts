@@ -18,6 +18,9 @@ const rimWords: Record<(typeof rims)[number], string> = {
   drivenFar: 'driven, far rim',
 };
 
+/** What the driver and the driven pulleys are called while nobody names them. */
+export const usualNames = ['crank pulley', 'driven pulley', 'second driven pulley'] as const;
+
 const isThree = ({ pulleys }: WorkingCase): boolean => pulleys === 'three';
 
 /** The fields of the first or second driven pulley, whose names end in 1 or 2. */
@@ -43,7 +46,7 @@ function drivenSection(n: 1 | 2): FieldSection {
   return {
     heading: n === 1 ? 'The driven pulley' : 'The second driven pulley',
     fields: [
-      { kind: 'text', name: `name${n}`, label: 'What it is', hint: 'dynamo pulley', when: there },
+      { kind: 'text', name: `name${n}`, label: 'What it is', optional: usualNames[n], when: there },
       length(`diameter${n}`, 'Its diameter over the rims', { when: there }),
       length(`span${n}`, 'Between its centre and the driver’s', { when: there }),
       ...gaps('gap', 'Gap', there),
@@ -71,7 +74,7 @@ export const beltLineSections: readonly FieldSection[] = [
   {
     heading: 'The driver',
     fields: [
-      { kind: 'text', name: 'driver', label: 'What drives', hint: 'crank pulley' },
+      { kind: 'text', name: 'driver', label: 'What drives', optional: usualNames[0] },
       length('driverDiameter', 'Diameter of the driver over the rims'),
       length('driverGroove', 'From the driver’s rim to the middle of its groove', {
         optional: 'the rims are taken for the grooves',

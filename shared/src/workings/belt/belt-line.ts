@@ -6,14 +6,14 @@ import type {
   DrivenPulley,
 } from '../../contracts/belt-drive.js';
 import { beltLine } from '../../belt-drive/belt-line.js';
+import { printLength } from '../../belt-drive/print-length.js';
 import { drawBeltLine } from '../../drawing/belt-line.js';
 import { toSi } from '../../quantities/convert.js';
 import { printNumber, printQuantity } from '../../quantities/print.js';
 import { defineWorking } from '../define-working.js';
-import { printedLength } from '../fits/printed-length.js';
 import type { CaseReader } from '../read-case.js';
 import type { AnswerPart, WorkingOptions } from '../working.js';
-import { beltLineSections, rims } from './belt-line-fields.js';
+import { beltLineSections, rims, usualNames } from './belt-line-fields.js';
 
 /** Whether a belt's pulleys run in one plane, and what brings them there. */
 export const beltLineWorking = defineWorking({
@@ -29,12 +29,12 @@ export const beltLineWorking = defineWorking({
       name1: 'dynamo pulley',
       diameter1: '100 mm',
       span1: '500 mm',
-      gap1driverFar: '0.87 mm',
+      gap1driverFar: '0 mm',
       gap1driverNear: '0 mm',
-      gap1drivenNear: '0.44 mm',
-      gap1drivenFar: '0.44 mm',
+      gap1drivenNear: '1.00 mm',
+      gap1drivenFar: '1.87 mm',
     },
-    from: 'a pulley-alignment table: 0.5° is 0.87 mm in 100 mm, 4.36 mm over 500 mm',
+    from: 'a pulley-alignment table: 0.5° is 0.87 mm in 100 mm',
   },
   fromSpec: ({ belt }) => [
     {
@@ -80,7 +80,7 @@ export const beltLineWorking = defineWorking({
         {
           kind: 'steps',
           heading: 'What to do',
-          steps: answer.pulleys.map(({ cure }) => cure.words),
+          steps: [...edgeWords(request), ...answer.pulleys.map(({ cure }) => cure.words)],
         },
         ...drawings(request, answer, options),
         tableOf(answer),
@@ -98,14 +98,29 @@ export const beltLineWorking = defineWorking({
   },
 });
 
+/** Two gaps of the driver that differ by more than this, metres, are of an edge that does not lie flat. */
+const flat = 1e-6;
+
+/** The straight edge is laid along the driver: where its own gaps differ, that comes first. */
+function edgeWords({ driver, driven }: BeltLineRequest): readonly string[] {
+  const leaning = driven
+    .flatMap(({ gaps, quarterTurn }) => (quarterTurn === undefined ? [gaps] : [gaps, quarterTurn]))
+    .find(({ driverNear, driverFar }) => Math.abs(toSi(driverNear) - toSi(driverFar)) > flat);
+  if (leaning === undefined) return [];
+  const { driverNear, driverFar } = leaning;
+  return [
+    `The straight edge does not lie flat on the ${driver.name}: ${printQuantity(driverFar)} at its far rim, ${printQuantity(driverNear)} at its near one. Lay it flat and measure again. If it cannot lie flat, the ${driver.name} or its shaft leans: put that right first.`,
+  ];
+}
+
 function requestOf(read: CaseReader): BeltLineRequest {
   const driverGroove = read.quantityIf('driverGroove');
-  const numbers = read.choice('pulleys') === 'three' ? [1, 2] : [1];
+  const numbers = read.choice('pulleys') === 'three' ? ([1, 2] as const) : ([1] as const);
   const driven = numbers.map((n) => drivenOf(read, n));
   const limit = limitOf(read);
   return {
     driver: {
-      name: read.text('driver'),
+      name: read.textIf('driver') ?? usualNames[0],
       diameter: read.quantity('driverDiameter'),
       ...(driverGroove === undefined ? {} : { faceToGroove: driverGroove }),
     },
@@ -114,11 +129,11 @@ function requestOf(read: CaseReader): BeltLineRequest {
   };
 }
 
-function drivenOf(read: CaseReader, n: number): DrivenPulley {
+function drivenOf(read: CaseReader, n: 1 | 2): DrivenPulley {
   const gaps = (prefix: string): BeltGaps =>
     Object.fromEntries(rims.map((rim) => [rim, read.quantity(`${prefix}${n}${rim}`)])) as unknown as BeltGaps;
   return {
-    name: read.text(`name${n}`),
+    name: read.textIf(`name${n}`) ?? usualNames[n],
     diameter: read.quantity(`diameter${n}`),
     span: read.quantity(`span${n}`),
     gaps: gaps('gap'),
@@ -169,7 +184,7 @@ function tableOf({ pulleys }: BeltLine): AnswerPart {
     ],
     rows: pulleys.map(({ name, offset, offsetPerSpan, angle, runOut, clears }) => [
       name,
-      `${printedLength({ ...offset, value: Math.abs(offset.value) })}${wayOf(offset.value)}`,
+      `${printLength(Math.abs(toSi(offset)), offset.unit)}${wayOf(offset.value)}`,
       printQuantity({ value: Math.abs(offsetPerSpan) * 100, unit: 'mm' }, { digits: 2 }),
       turnWords(angle),
       runOut === null ? 'not measured' : `${printNumber(Math.abs(runOut), 2)}°`,

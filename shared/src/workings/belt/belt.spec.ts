@@ -21,9 +21,27 @@ const spec = (code: string): SpecDocument =>
 describe('the printed examples', () => {
   it('a driver turned 0.5° is 4.36 mm out of plane over 500 mm', () => {
     // T6-021 and T6-026; the typed gaps are the printed 0.87 mm, whose angle is 0.498°.
-    const text = said(beltLineWorking, beltLineWorking.example.typed);
+    const gaps = { gap1driverFar: '0.87 mm', gap1drivenNear: '0.44 mm', gap1drivenFar: '0.44 mm' };
+    const text = said(beltLineWorking, { ...beltLineWorking.example.typed, ...gaps });
     expect(text).toMatch(/dynamo pulley \| 4\.35\d? mm back/);
     expect(text).toMatch(/0\.50°, far rim back/);
+    expect(text).toContain(
+      '1. The straight edge does not lie flat on the crank pulley: 0.87 mm at its far rim',
+    );
+    expect(text).toContain('4.35 mm out of one plane (just over the 4.35 mm allowed over this span)');
+    expect(text).not.toContain('towards the straight edge');
+  });
+
+  it('a driven pulley turned 0.87 mm in 100 mm is turned 0.50°', () => {
+    // T6-021; 1.435 mm is the mean of its two gaps.
+    const text = said(beltLineWorking, beltLineWorking.example.typed);
+    expect(text).toMatch(/Pass: dynamo pulley: The rims are 1\.4\d mm out .* turned 0\.50°/);
+    expect(text).not.toContain('does not lie flat');
+  });
+
+  it('pulleys without a name are called by what they do', () => {
+    const text = said(beltLineWorking, { ...beltLineWorking.example.typed, driver: '', name1: '' });
+    expect(text).toContain('Pass: driven pulley: ');
   });
 
   it('1.6 and 0.5 m, 12 m apart, take 27.32 m', () => {
