@@ -101,6 +101,9 @@ function closedLate(given: Readonly<Record<string, unknown>>, { applied, closed 
   ];
 }
 
+/** How the reason begins where nothing is wrong but the time. */
+export const notYet = 'Not yet: ';
+
 function judgeWait(
   loadAt: number,
   full: Reached | undefined,
@@ -113,7 +116,7 @@ function judgeWait(
   return now < loadAt
     ? {
         verdict: 'fail',
-        reason: `Not yet: ${saySpan(loadAt - now)} still to wait. It may be loaded at ${sayMoment(loadAt, style)}.${strength}`,
+        reason: `${notYet}${saySpan(loadAt - now)} still to wait. It may be loaded at ${sayMoment(loadAt, style)}.${strength}`,
       }
     : { verdict: 'pass', reason: `It may be loaded since ${sayMoment(loadAt, style)}.${strength}` };
 }

@@ -1,6 +1,6 @@
 import type { Cure, CurePoint, CureRequest } from '../contracts/curing.js';
 import type { CompoundSpec, SpecDocument } from '../contracts/spec.js';
-import { cure } from '../curing/cure.js';
+import { cure, notYet } from '../curing/cure.js';
 import { requireMoment, sayMoment } from '../curing/moments.js';
 import { drawCureCurve } from '../drawing/cure-curve.js';
 import { cureFields, sheetColumns } from './cure-fields.js';
@@ -43,7 +43,7 @@ export const cureWorking = defineWorking({
     const drawing = drawCureCurve(request, answer, options);
     return {
       parts: [
-        { kind: 'judgement', verdict: answer.verdict, reason: answer.reason },
+        judgementOf(answer),
         ...factsOf(request, answer),
         ...(drawing === null
           ? []
@@ -63,6 +63,13 @@ export const cureWorking = defineWorking({
     };
   },
 });
+
+/** A joint that only needs more time has failed nothing. */
+function judgementOf({ verdict, reason }: Cure): AnswerPart {
+  return reason.startsWith(notYet)
+    ? { kind: 'judgement', verdict, waits: true, word: 'Not yet', reason: reason.slice(notYet.length) }
+    : { kind: 'judgement', verdict, reason };
+}
 
 function requestOf(read: CaseReader): CureRequest {
   const log = read

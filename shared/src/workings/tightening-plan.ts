@@ -60,7 +60,12 @@ export const tighteningPlanWorking = defineWorking({
     const plan = tighteningPlan(request);
     return {
       parts: [
-        { kind: 'judgement', verdict: plan.verdict, reason: plan.reason },
+        {
+          kind: 'judgement',
+          verdict: plan.verdict,
+          ...(plan.verdict === 'pass' ? { word: 'Order worked out' } : {}),
+          reason: plan.reason,
+        },
         {
           kind: 'drawing',
           caption: 'The number on each is its place in the order',
@@ -117,8 +122,8 @@ function ordersOf({ sequence, loosening }: TighteningPlan): readonly AnswerPart[
       kind: 'facts',
       heading: 'Order, by fastener',
       facts: [
-        { name: 'Tighten', value: sequence.join(' ') },
-        { name: 'Loosen', value: loosening.join(' ') },
+        { name: 'Tighten', value: sequence.join(', ') },
+        { name: 'Loosen', value: loosening.join(', ') },
       ],
     },
   ];
@@ -151,7 +156,7 @@ function passTable({ steps }: TighteningPlan, passes: readonly TighteningPass[])
 }
 
 function caseOfGroup(group: FastenerGroup): WorkingCase {
-  const sequence = group.sequence?.value.join(' ');
+  const sequence = group.sequence?.value.join(', ');
   return {
     ...writeLayout(group.layout),
     part: group.outline === 'head' ? 'head' : 'plain',

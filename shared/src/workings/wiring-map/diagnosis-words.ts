@@ -8,7 +8,7 @@ export const causeTitles: Record<WiringCause, string> = {
   'wired-against-the-rotor': 'Wired against the rotor',
   'two-leads-swapped': 'Two {leads} swapped',
   'other-firing-order': 'Another engine’s firing order',
-  mixed: 'Mixed',
+  mixed: 'Several {leads} on the wrong {outlets}',
 };
 
 const counts = ['No', 'One', 'Two', 'Three', 'Four', 'Five', 'Six', 'Seven', 'Eight'];

@@ -112,7 +112,14 @@ function partsOf(answer: WiringAnswer, options: WorkingOptions): readonly Answer
 function judgementOf({ map, diagnosis, fitted }: WiringAnswer): readonly AnswerPart[] {
   if (map === null) return [];
   if (diagnosis === null || fitted === null) {
-    return [{ kind: 'judgement', of: 'Map', verdict: map.verdict, reason: spoken(map.reason) }];
+    return [
+      {
+        kind: 'judgement',
+        verdict: map.verdict,
+        ...(map.verdict === 'pass' ? { word: 'Map worked out' } : {}),
+        reason: spoken(map.reason),
+      },
+    ];
   }
   const also = diagnosis.alsoFits.map((cause) => causeTitles[cause]).join(', ');
   return [
