@@ -52,6 +52,8 @@ export function judgeShare(
       : `, from ${percent(share / (1 + spread))} to ${percent(share / (1 - spread))} ` +
         `as the nut factor may be ${printNumber(spread * 100, 0)} % off`;
   const { verdict, words } = finding(share);
+  const top =
+    share <= 1 && isUnder(1, share / (1 - spread)) ? 'At the top of that range it is past proof.' : '';
   const slip =
     better === undefined
       ? ''
@@ -61,6 +63,7 @@ export function judgeShare(
     reason: [
       `${printQuantity(torque)} on ${thread.name}, ${nut.words}, clamps with about ` +
         `${load({ value: preload, unit: 'N' })}: ${percent(share)} of the proof load of ${grade.name}${range}.`,
+      top,
       words,
       slip,
       grade.note ?? '',

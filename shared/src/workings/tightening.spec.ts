@@ -34,7 +34,14 @@ describe('the examples answer with what is printed', () => {
     // T4-145, PASS.
     [
       tighteningPlanWorking,
-      ['8.1 lbf·ft', '16.2 lbf·ft', '27 lbf·ft', 'Tighten: 1 3 2 4', 'Loosen: 4 2 3 1'],
+      [
+        '8.1 lbf·ft',
+        '16.2 lbf·ft',
+        '27 lbf·ft',
+        'Order worked out: ',
+        'Tighten: 1, 3, 2, 4',
+        'Loosen: 4, 2, 3, 1',
+      ],
     ],
     // T4-070, TQ-E: 4941 lbf at 75 % of proof.
     [torqueDoubtWorking, ['Pass:', '75 %', '(4944 lbf)']],
@@ -183,7 +190,7 @@ describe('a plan', () => {
     expect(text).toContain('3 | 60° further | 60° | –');
     expect(text).toContain('4 | check all once more');
     // The star of eight, ASME PCC-1 (from memory).
-    expect(text).toContain('Tighten: 1 5 3 7 2 6 4 8');
+    expect(text).toContain('Tighten: 1, 5, 3, 7, 2, 6, 4, 8');
   });
 });
 
@@ -207,7 +214,7 @@ describe('a torque that is doubted', () => {
 
   it('has no band where nothing can be judged', () => {
     const typed = changed(torqueDoubtWorking, { grade: 'unknown' });
-    expect(answer(torqueDoubtWorking, typed).parts.map(({ kind }) => kind)).toEqual(['judgement', 'facts']);
+    expect(answer(torqueDoubtWorking, typed).parts.map(({ kind }) => kind)).toEqual(['judgement', 'facts', 'table']);
   });
 });
 
@@ -234,5 +241,22 @@ describe('a length in the wrong unit', () => {
     expect(
       textOf(wrenchSettingWorking, { torque: '55 ft lbs', wrenchLength: '18 in', adapterLength: '64 mm' }),
     ).not.toMatch(/Doubtful|taken as inches/);
+  });
+});
+
+describe('a torque for a bolt of no known grade', () => {
+  it('is set against the common grades of its thread', () => {
+    // T4-070: 30.9 lbf·ft is 75 % of the proof load of SAE 5, 85 ksi; so 116 % at 55 ksi and 53 % at 120 ksi.
+    const text = textOf(torqueDoubtWorking, { torque: '30.9 lbf·ft', thread: '3/8-16 UNC' });
+    expect(text).toContain('SAE grade 2 | 116 % | over its proof load');
+    expect(text).toContain('SAE grade 5 | 75 % | believable');
+    expect(text).toContain('SAE grade 8 | 53 % | believable');
+    expect(textOf(torqueDoubtWorking, { torque: '50 N·m', thread: 'M10' })).toContain('class 10.9 | ');
+  });
+
+  it('says where the top of its range is past proof', () => {
+    const top = 'At the top of that range it is past proof.';
+    expect(textOf(torqueDoubtWorking, torqueDoubtWorking.example.typed)).toContain(top);
+    expect(textOf(torqueDoubtWorking, changed(torqueDoubtWorking, { spread: '10' }))).not.toContain(top);
   });
 });

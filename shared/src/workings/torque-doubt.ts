@@ -14,6 +14,7 @@ import { percent, printInBoth, typed } from './fastening/figures.js';
 import { printFigure } from '../fastening/print-figure.js';
 import { casesByThread } from './fastening/groups-of-spec.js';
 import { knownGrade, torqueDoubtSections } from './fastening/torque-doubt-fields.js';
+import { gradesFor } from './fastening/grades-for.js';
 import { conditionOf, threadLockFactor } from './fastening/condition.js';
 import type { AnswerPart, WorkingCase } from './working.js';
 
@@ -63,6 +64,7 @@ export const torqueDoubtWorking = defineWorking({
         { kind: 'judgement', verdict: doubt.verdict, reason: doubt.reason },
         ...bandOf(request, doubt, options),
         ...figuresOf(request, doubt),
+        ...gradesFor(request, doubt),
         ...(doubt.tapped === undefined
           ? []
           : [{ kind: 'judgement' as const, of: 'Female thread', ...doubt.tapped }]),
