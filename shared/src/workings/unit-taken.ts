@@ -9,7 +9,7 @@ const metric: readonly Unit[] = ['µm', 'mm', 'cm', 'm'];
  * fraction in a metric length, for nobody writes fractions of a millimetre. Common practice, no source.
  * Example: `3/16` in a field of mm is inches, `4.8` is mm.
  */
-export function unitTaken(field: QuantityField, text: string): Unit {
+export function unitTaken(field: Pick<QuantityField, 'of' | 'unit'>, text: string): Unit {
   const isInches = field.of === 'length' && metric.includes(field.unit) && bareFraction.test(text.trim());
   return isInches ? 'in' : field.unit;
 }

@@ -2,6 +2,7 @@ import { provideHttpClient } from '@angular/common/http';
 import { ChangeDetectionStrategy, Component, signal } from '@angular/core';
 import { TestBed, type ComponentFixture } from '@angular/core/testing';
 import { provideRouter } from '@angular/router';
+import type { Kind, Unit } from '@second-spanner/shared/contracts/quantity';
 import { beforeEach, describe, expect, it } from 'vitest';
 import { QuantityField } from './quantity-field';
 
@@ -9,15 +10,17 @@ import { QuantityField } from './quantity-field';
   imports: [QuantityField],
   changeDetection: ChangeDetectionStrategy.OnPush,
   template: `<ss-quantity-field
-    label="Torque"
-    kind="torque"
-    unit="N·m"
+    label="Figure"
+    [kind]="kind()"
+    [unit]="unit()"
     [value]="text()"
     [error]="error()"
     (typed)="text.set($event)"
   />`,
 })
 class Page {
+  readonly kind = signal<Kind>('torque');
+  readonly unit = signal<Unit>('N·m');
   readonly text = signal('');
   readonly error = signal<string | undefined>(undefined);
 }
@@ -97,5 +100,34 @@ describe('a quantity field', () => {
     await leave();
     expect(field().value).toBe('27 mm');
     expect(unit().value).toBe('N·m');
+  });
+
+  describe('of a length in millimetres', () => {
+    beforeEach(async () => {
+      fixture.componentInstance.kind.set('length');
+      fixture.componentInstance.unit.set('mm');
+      await fixture.whenStable();
+    });
+
+    it('takes a bare fraction for inches, and shows it', async () => {
+      await type('1 3');
+      expect(unit().value).toBe('mm');
+      await type('1 3/4');
+      expect(text()).toBe('1 3/4 in');
+      expect(unit().value).toBe('in');
+      expect(field().value).toBe('1 3/4');
+    });
+
+    it('goes back to millimetres once it is no fraction any more', async () => {
+      await type('3/16');
+      await type('4.8');
+      expect(text()).toBe('4.8 mm');
+    });
+
+    it('leaves a fraction in a unit that was chosen', async () => {
+      await choose('mm');
+      await type('1/2');
+      expect(text()).toBe('1/2 mm');
+    });
   });
 });

@@ -1,6 +1,7 @@
 import { ChangeDetectionStrategy, Component, computed, input, output, signal } from '@angular/core';
 import { units, type Kind, type Unit } from '@second-spanner/shared/contracts/quantity';
 import { kindOfUnit } from '@second-spanner/shared/quantities/unit-names';
+import { unitTaken } from '@second-spanner/shared/workings/unit-taken';
 import { TradeWords } from '../words/trade-words';
 import { describedBy, FieldNotes } from './field-notes';
 import { joinUnit, splitUnit, withUnit } from './split-unit';
@@ -9,7 +10,8 @@ let fields = 0;
 
 /**
  * A figure with its unit chosen beside it. The value is one text, `27 lbf·ft`; a unit typed behind the figure is
- * taken as chosen. Another unit leaves the figure as it was typed: nobody meant it to be converted.
+ * taken as chosen. Another unit leaves the figure as it was typed: nobody meant it to be converted. A bare fraction
+ * of a length is in inches unless its unit was chosen.
  */
 @Component({
   selector: 'ss-quantity-field',
@@ -64,6 +66,9 @@ export class QuantityField {
   /** What stands in the field while it is typed in, left alone until it is done. */
   protected readonly typing = signal<string | null>(null);
   private readonly chosen = signal<Unit | null>(null);
+  private readonly byHand = signal(false);
+  /** What stood beside a fraction before it was taken for inches. */
+  private readonly beforeFraction = signal<Unit | null>(null);
 
   private readonly parted = computed(() => {
     const { figure, unit } = splitUnit(this.value());
@@ -82,7 +87,9 @@ export class QuantityField {
   );
 
   protected type(text: string): void {
-    const unit = this.shownUnit();
+    const before = this.beforeFraction() ?? this.shownUnit();
+    const unit = this.byHand() ? before : unitTaken({ of: this.kind(), unit: before }, text);
+    this.beforeFraction.set(unit === before ? null : before);
     this.typing.set(text);
     this.chosen.set(unit);
     this.typed.emit(withUnit(text, unit));
@@ -91,6 +98,8 @@ export class QuantityField {
   protected choose(name: string): void {
     const unit = this.choices().find((each) => each === name);
     if (unit === undefined) return;
+    this.byHand.set(true);
+    this.beforeFraction.set(null);
     this.chosen.set(unit);
     this.typed.emit(joinUnit(this.parted().figure, unit));
   }

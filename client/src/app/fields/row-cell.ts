@@ -1,5 +1,6 @@
 import { ChangeDetectionStrategy, Component, computed, input, output, signal } from '@angular/core';
 import type { Unit } from '@second-spanner/shared/contracts/quantity';
+import { unitTaken } from '@second-spanner/shared/workings/unit-taken';
 import type { CellField } from '@second-spanner/shared/workings/working';
 import { TradeWords } from '../words/trade-words';
 import { inCell } from './rows';
@@ -53,6 +54,8 @@ export class RowCell {
   readonly label = input.required<string>();
   readonly value = input.required<string>();
   readonly unit = input.required<Unit | null>();
+  /** Whether the person chose that unit; if not, a bare fraction of a length is in inches. */
+  readonly unitChosen = input.required<boolean>();
   readonly error = input<string | undefined>();
   readonly errorId = input.required<string>();
   readonly typed = output<string>();
@@ -81,8 +84,14 @@ export class RowCell {
   });
 
   protected write(text: string): void {
-    const unit = this.unit();
     this.typing.set(text);
+    const unit = this.unitOf(text);
     this.typed.emit(unit === null ? text : withUnit(text, unit));
+  }
+
+  private unitOf(text: string): Unit | null {
+    const [column, unit] = [this.column(), this.unit()];
+    if (unit === null || this.unitChosen() || column.kind !== 'quantity') return unit;
+    return unitTaken({ of: column.of, unit }, text);
   }
 }

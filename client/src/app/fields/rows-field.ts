@@ -55,6 +55,7 @@ export class RowsField {
     this.field().columns.map((column) => ({
       column,
       unit: columnUnit(column, this.rows(), this.chosen()[column.name]),
+      unitChosen: this.chosen()[column.name] !== undefined,
       units: unitsOf(column),
       counts: column.kind === 'number' ? column.counts : null,
     })),
