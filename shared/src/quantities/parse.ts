@@ -1,7 +1,7 @@
 import { InputError } from '../contracts/input-error.js';
-import type { Quantity, Unit } from '../contracts/quantity.js';
+import { units, type Quantity, type Unit } from '../contracts/quantity.js';
 import { clip } from './clip.js';
-import { largestValue } from './convert.js';
+import { kindOf, largestValue } from './convert.js';
 import { readUnit } from './unit-names.js';
 
 const longestText = 60;
@@ -24,7 +24,7 @@ export function parseQuantity(text: string, fallback?: Unit, field = 'quantity')
     );
   }
   const plain = tidy(text);
-  const { value, rest } = readFraction(plain, field) ?? readDecimal(plain, field);
+  const { value, rest } = readFraction(plain, field) ?? readDecimal(plain, field, fallback);
   if (!Number.isFinite(value) || Math.abs(value) > largestValue) {
     throw new InputError(field, 'This number is larger than any workshop figure.');
   }
@@ -32,7 +32,14 @@ export function parseQuantity(text: string, fallback?: Unit, field = 'quantity')
   const unit = name === '' ? fallback : readUnit(name);
   if (unit !== undefined) return { value, unit };
   if (name === '') throw new InputError(field, 'Write the unit too, such as 27 lbf·ft.');
-  throw new InputError(field, `There is no unit “${clip(name)}”. Write it like lbf·ft, N·m, mm, in or thou.`);
+  throw new InputError(field, `There is no unit “${clip(name)}”. ${unitsLike(fallback)}`);
+}
+
+/** Units that a figure may have: those of the field's own kind, where it has one. */
+function unitsLike(fallback: Unit | undefined): string {
+  if (fallback === undefined) return 'Write it like lbf·ft, N·m, mm, in or thou.';
+  const names: readonly string[] = units[kindOf(fallback)];
+  return `Write it in ${names.slice(0, -1).join(', ')} or ${names.at(-1) ?? fallback}.`;
 }
 
 /** Vulgar fractions are spelled out, every kind of space is one space, every kind of minus a hyphen. */
@@ -60,11 +67,11 @@ function readFraction(text: string, field: string): NumberRead | undefined {
   return { value: sign === '-' ? -size : size, rest: text.slice(all.length) };
 }
 
-function readDecimal(text: string, field: string): NumberRead {
+function readDecimal(text: string, field: string, unit: Unit = 'lbf·ft'): NumberRead {
   const match = decimal.exec(text);
   const digits = match?.[2] === undefined ? undefined : plainDecimal(match[2]);
   if (match === null || digits === undefined) {
-    throw new InputError(field, `“${clip(text)}” does not begin with a number. Write it like 27 lbf·ft.`);
+    throw new InputError(field, `“${clip(text)}” does not begin with a number. Write it like 27 ${unit}.`);
   }
   const value = Number(`${match[1] === '-' ? '-' : ''}${digits}e${match[3] ?? '0'}`);
   return { value, rest: text.slice(match[0].length) };

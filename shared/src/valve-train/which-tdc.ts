@@ -1,6 +1,7 @@
 import type { TdcAnswer, WhichTdc, WhichTdcRequest } from '../contracts/calculations.js';
 import { degrees, sentence } from '../ignition/words.js';
 import { requireNumber, requireOneOf, requireRecord } from '../quantities/require.js';
+import { aroundTop } from './around-top.js';
 import { firingAngles, firingOf } from './firing-angles.js';
 import { whatConfirms, whatTells, whereTheTopIs, type Known, type Tdc } from './next-to-look-for.js';
 import { marksSeen, requirePositions, requireSeen, type Engine, type Seen } from './seen.js';
@@ -80,10 +81,11 @@ function told(tdc: Tdc, known: Known, windows: Windows): WhichTdc {
     tdc === 'compression' ? [0, 'exhaust', cycle / 2] : [cycle / 2, 'compression', 0];
   const proof = seen.find((one) => !holds(whereItStood([one], about), otherTdc));
   const by = proof ? `${proof.words}${placeOf(proof, last)}` : 'all that was seen, taken together';
+  const around = aroundTop(asPairs(windows), here === 0 ? 0 : 360) ?? `${rangesOf(windows)} of its cycle`;
   const reason =
     `${atPosition(about, last)}${nameOf(engine.asked.cylinder)} ${about < last ? 'was' : 'is'} ` +
     `at ${tdc} TDC (${degrees(here)}). Its ${other} TDC (${degrees(otherTdc)}) is ruled out by ${by}: ` +
-    `what was seen leaves it at ${rangesOf(windows)} of its cycle, to within ${degrees(engine.tolerance)}.`;
+    `what was seen leaves it ${around}, to within ${degrees(engine.tolerance)}.`;
   return answered(`${tdc}-tdc`, reason, whatConfirms(known, tdc), windows);
 }
 

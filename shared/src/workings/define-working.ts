@@ -37,11 +37,12 @@ export function defineWorking({ answer, basis, fieldOf = [], ...working }: Defin
       }
       try {
         const { parts, assumed = [], cautions = [] } = answer(reader, options);
+        const { plain, rules } = rulesApart(parts);
         return {
           errors: {},
           missing: null,
-          parts,
-          assumed: [...new Set([...read, ...assumed])],
+          parts: plain,
+          assumed: [...new Set([...read, ...assumed, ...rules])],
           cautions,
           basis,
         };
@@ -50,6 +51,21 @@ export function defineWorking({ answer, basis, fieldOf = [], ...working }: Defin
         return { ...nothing, errors: { [fieldAt(error.field, fieldOf)]: error.message }, missing: null };
       }
     },
+  };
+}
+
+/** The rule that a decision ends with, from every reason: a page says it once. */
+function rulesApart(parts: readonly AnswerPart[]): {
+  readonly plain: readonly AnswerPart[];
+  readonly rules: readonly string[];
+} {
+  const rule = /\s*\b(Rule: [^.]*\.)/g;
+  const judged = parts.flatMap((part) => (part.kind === 'judgement' ? [part.reason] : []));
+  return {
+    plain: parts.map((part) =>
+      part.kind === 'judgement' ? { ...part, reason: part.reason.replace(rule, '') } : part,
+    ),
+    rules: judged.flatMap((reason) => [...reason.matchAll(rule)].map((match) => match[1] ?? '')),
   };
 }
 

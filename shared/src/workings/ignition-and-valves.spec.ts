@@ -208,3 +208,50 @@ it.each([valveClockWorking, lashOrderWorking, pistonHeightWorking])(
     }
   },
 );
+
+describe('what may stay open or be written shortly', () => {
+  const said = (working: Working, typed: WorkingCase): string =>
+    workingText(working, typed, working.workOut(typed, { dialect: 'british' }), {
+      dialect: 'british',
+    }).replace(/\u2009/g, ' ');
+  const six = { order: '1-5-3-6-2-4', ivo: '10', ivc: '50', evo: '50', evc: '10', cylinder: '1' };
+
+  it('a TDC told by rocking valves alone says what it takes and leaves', () => {
+    // No. 6 fires 360° after No. 1; its valves rock from 10° before to 10° after its exhaust TDC, 10° either way more.
+    const text = said(whichTdcWorking, { ...six, seen: '|6||||yes|' });
+    expect(text).toContain('leaves it 20° before to 20° after TDC, to within 10°');
+    expect(text).toContain('From and to: 20° before to 20° after TDC');
+    expect(text).toContain('Assumed: No. 1’s piston is taken to be at the top: it was not looked at.');
+    expect(said(whichTdcWorking, { ...six, seen: '1|1|||top||;|6||||yes|' })).not.toContain(
+      'it was not looked at',
+    );
+  });
+
+  it('sightings without a position are seen row by row', () => {
+    const text = said(whichTdcWorking, { ...six, seen: '|1|shut|shut|top||;|1||opening|||' });
+    expect(text).toContain('Assumed: Each thing was seen after the one above it');
+  });
+
+  it('an angle before its first goes round', () => {
+    // 720° is a whole cycle.
+    const at = (crank: string) =>
+      valveClockWorking.workOut({ ...valveClockWorking.example.typed, crank }, { dialect: 'british' });
+    expect(at('-10')).toEqual(at('710'));
+    expect(at('730')).toEqual(at('10'));
+    expect(at('-10').errors).toEqual({});
+  });
+
+  it('an open lead hides the maker’s figures', () => {
+    const typed = { ...leadTestWorking.example.typed, shows: 'open' };
+    expect(said(leadTestWorking, typed)).not.toContain('Most resistance for that length');
+    expect(said(leadTestWorking, typed)).toContain('Fail');
+  });
+
+  it('a figure in no unit is told the units of its kind', () => {
+    const { errors } = leadTestWorking.workOut(
+      { ...leadTestWorking.example.typed, reading: '25 k' },
+      { dialect: 'british' },
+    );
+    expect(errors['reading']).toBe('There is no unit “k”. Write it in Ω, kΩ or MΩ.');
+  });
+});

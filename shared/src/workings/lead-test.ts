@@ -5,7 +5,9 @@ import { printQuantity } from '../quantities/print.js';
 import { defineWorking } from './define-working.js';
 import type { CaseReader } from './read-case.js';
 import { spoken } from './wiring-map/spoken.js';
+import type { QuantityField, WorkingCase } from './working.js';
 
+const isFigure = ({ shows = '' }: WorkingCase): boolean => shows === '' || shows === 'figure';
 const ohms = { kind: 'quantity', of: 'resistance', unit: 'kΩ' } as const;
 
 /** Whether an HT lead measures as it should. */
@@ -44,7 +46,7 @@ export const leadTestWorking = defineWorking({
           ...ohms,
           name: 'reading',
           label: 'Reading',
-          when: ({ shows = '' }) => shows === '' || shows === 'figure',
+          when: isFigure,
         },
         {
           ...ohms,
@@ -66,22 +68,24 @@ export const leadTestWorking = defineWorking({
     },
     {
       heading: 'What the maker says',
-      fields: [
-        { ...ohms, name: 'low', label: 'Least resistance for that length', optional: 'not known' },
-        { ...ohms, name: 'high', label: 'Most resistance for that length', optional: 'not known' },
-        {
-          kind: 'quantity',
-          of: 'length',
-          unit: 'm',
-          name: 'per',
-          label: 'For each',
-          hint: '1 ft, 1 m',
-          optional: '1 m',
-        },
-        { ...ohms, name: 'wholeLow', label: 'Least for a whole {lead}', optional: 'none' },
-        { ...ohms, name: 'wholeHigh', label: 'Most for a whole {lead}', optional: 'none' },
-        { ...ohms, name: 'ends', label: 'Both end fittings together', optional: 'they have no resistance' },
-      ],
+      fields: (
+        [
+          { ...ohms, name: 'low', label: 'Least resistance for that length', optional: 'not known' },
+          { ...ohms, name: 'high', label: 'Most resistance for that length', optional: 'not known' },
+          {
+            kind: 'quantity',
+            of: 'length',
+            unit: 'm',
+            name: 'per',
+            label: 'For each',
+            hint: '1 ft, 1 m',
+            optional: '1 m',
+          },
+          { ...ohms, name: 'wholeLow', label: 'Least for a whole {lead}', optional: 'none' },
+          { ...ohms, name: 'wholeHigh', label: 'Most for a whole {lead}', optional: 'none' },
+          { ...ohms, name: 'ends', label: 'Both end fittings together', optional: 'they have no resistance' },
+        ] as const satisfies readonly QuantityField[]
+      ).map((field) => ({ ...field, when: isFigure })),
     },
   ],
   example: {

@@ -230,3 +230,25 @@ describe('what is drawn and said', () => {
     expect(drawings(cold)).toBe(0);
   });
 });
+
+describe('what may stay open or be written shortly', () => {
+  it('a bore and a journal give a clearance, wherever they were measured', () => {
+    // By hand: 50.05 − 50.00 = 0.05 mm.
+    const typed = { hole: '||50.05 mm', shaft: '||50.00 mm', low: '0.02 mm', high: '0.06 mm' };
+    const text = textOf(runningClearanceWorking, typed);
+    expect(text).toContain('Least: 0.050 mm');
+    expect(text).toContain('Pass');
+  });
+
+  it('a ratio is written as one', () => {
+    const answer = changed(compressionRatioWorking, { wanted: '9:1' });
+    expect(answer.errors).toEqual({});
+    expect(answer).toEqual(changed(compressionRatioWorking, { wanted: '9' }));
+  });
+
+  it('the rule of a decision stands once, apart from the reasons', () => {
+    const text = textOf(roundReadingsWorking);
+    expect(text.match(/Rule: /g)).toHaveLength(1);
+    expect(text).toMatch(/Assumed: Rule: /);
+  });
+});

@@ -1,6 +1,6 @@
 import { InputError } from '../contracts/input-error.js';
 import type { Quantity } from '../contracts/quantity.js';
-import type { CellField, RowsField, WorkingCase, WorkingField } from './working.js';
+import type { CellField, RowsField, TurnField, WorkingCase, WorkingField } from './working.js';
 import { parseQuantity } from '../quantities/parse.js';
 import { requireQuantity } from '../quantities/require.js';
 import { readRows } from './rows.js';
@@ -111,7 +111,7 @@ function readValue(
       case 'number':
         return readPlain(text, path, field.signed === true);
       case 'turn':
-        return readPlain(text, path, field.from < 0);
+        return around(field, readPlain(text, path, true));
       case 'text':
       case 'date':
       case 'moment':
@@ -136,9 +136,16 @@ function readChoice(
   return field.starts;
 }
 
-/** A number with a decimal point or comma, or a fraction such as `1/64`. */
+/** The angle that a value outside the field's ends comes to, whole turns of them on or back: −10° is 710° of 720. */
+function around({ from, to }: TurnField, value: number): number {
+  if (value >= from && value <= to) return value;
+  const turn = to - from;
+  return from + ((((value - from) % turn) + turn) % turn);
+}
+
+/** A number with a decimal point or comma, a fraction such as `1/64`, or a ratio such as `9:1`. */
 function readPlain(text: string, path: string, signed: boolean): number {
-  const match = /^([+\-−]?)(\d+(?:[.,]\d+)?|[.,]\d+)(?: ?\/ ?(\d+(?:[.,]\d+)?))?\s*[°%]?$/.exec(text);
+  const match = /^([+\-−]?)(\d+(?:[.,]\d+)?|[.,]\d+)(?: ?[/:] ?(\d+(?:[.,]\d+)?))?\s*[°%]?$/.exec(text);
   const of = (digits: string | undefined): number => Number((digits ?? '1').replace(',', '.'));
   const value = match === null ? NaN : of(match[2]) / of(match[3]);
   if (!Number.isFinite(value) || Math.abs(value) > 1e9) {

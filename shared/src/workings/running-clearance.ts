@@ -8,7 +8,7 @@ import {
   roundRows,
   uncertaintyField,
 } from './measuring/fields.js';
-import { bandPart, limitsIf, limitsOf, printSize, roundOf } from './measuring/figures.js';
+import { bandPart, limitsIf, limitsOf, onePlace, printSize, roundOf } from './measuring/figures.js';
 import { casesOfMeasurements } from './measuring/from-spec.js';
 import { writeRows } from './rows.js';
 
@@ -24,7 +24,7 @@ export const runningClearanceWorking = defineWorking({
     {
       heading: 'The hole',
       fields: [
-        roundRows('hole', 'Readings of the hole'),
+        roundRows('hole', 'Readings of the hole', onePlace),
         {
           kind: 'text',
           name: 'splitAxis',
@@ -34,7 +34,7 @@ export const runningClearanceWorking = defineWorking({
         },
       ],
     },
-    { heading: 'The shaft', fields: [roundRows('shaft', 'Readings of the shaft')] },
+    { heading: 'The shaft', fields: [roundRows('shaft', 'Readings of the shaft', onePlace)] },
     {
       heading: 'The limits',
       fields: [

@@ -214,7 +214,11 @@ describe('a torque that is doubted', () => {
 
   it('has no band where nothing can be judged', () => {
     const typed = changed(torqueDoubtWorking, { grade: 'unknown' });
-    expect(answer(torqueDoubtWorking, typed).parts.map(({ kind }) => kind)).toEqual(['judgement', 'facts', 'table']);
+    expect(answer(torqueDoubtWorking, typed).parts.map(({ kind }) => kind)).toEqual([
+      'judgement',
+      'facts',
+      'table',
+    ]);
   });
 });
 

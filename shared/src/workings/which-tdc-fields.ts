@@ -19,7 +19,14 @@ const choice = (name: string, label: string, choices: ChoiceField['choices']): C
 
 /** One thing seen a row; rows with the same position were seen without turning the crank between them. */
 export const sightingColumns: readonly CellField[] = [
-  { kind: 'number', name: 'position', label: 'Position', counts: '' },
+  {
+    kind: 'number',
+    name: 'position',
+    label: 'Position',
+    hint: 'the same for things seen without turning the crank between them',
+    counts: '',
+    optional: 'row by row, the crank turned on between them',
+  },
   { kind: 'text', name: 'cylinder', label: 'Cylinder', figures: true },
   choice('inlet', '{Inlet} valve', states),
   choice('exhaust', 'Exhaust valve', states),

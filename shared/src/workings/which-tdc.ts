@@ -4,7 +4,9 @@ import type { Verdict } from '../contracts/verdict.js';
 import { drawValveClock } from '../drawing/valve-clock.js';
 import { firingAngles } from '../valve-train/firing-angles.js';
 import { valveClock } from '../valve-train/valve-clock.js';
+import { aroundTop } from '../valve-train/around-top.js';
 import { whichTdc } from '../valve-train/which-tdc.js';
+import { nameOf } from '../valve-train/words.js';
 import { defineWorking } from './define-working.js';
 import {
   cylinderOf,
@@ -97,7 +99,7 @@ export const whichTdcWorking = defineWorking({
               {
                 kind: 'facts' as const,
                 heading: 'Where it may stand in its own cycle, 0° its compression TDC',
-                facts: rangesOf(windows).map((value, i, all) => ({
+                facts: standsAt(answer, windows).map((value, i, all) => ({
                   name: all.length === 1 ? 'From and to' : `Place ${i + 1}`,
                   value,
                 })),
@@ -108,6 +110,10 @@ export const whichTdcWorking = defineWorking({
       assumed: [
         ...assumedEven(firing.intervals),
         'Between two positions the crank was turned the normal way, by less than one turn.',
+        ...topTaken(request, answer),
+        ...(request.isRowByRow
+          ? ['Each thing was seen after the one above it, the crank turned on between them.']
+          : []),
         ...(read.numberIf('tolerance') === undefined
           ? ['Everything seen may be 10° of crank off: common practice.']
           : []),
@@ -138,6 +144,32 @@ function clockThen(
   ];
 }
 
+/** That the piston is at a TDC at all, where neither it nor the marks were looked at. */
+function topTaken(
+  { cylinder, sightings, about, marksTogether }: WhichTdcRequest,
+  answer: TdcAnswer,
+): readonly string[] {
+  const told = answer === 'compression-tdc' || answer === 'exhaust-tdc';
+  const seen = sightings[about ?? sightings.length - 1] ?? [];
+  const looked = seen.some((one) => one.cylinder === cylinder && one.piston === 'top');
+  return told && !looked && marksTogether === undefined
+    ? [`${upperFirst(nameOf(cylinder))}’s piston is taken to be at the top: it was not looked at.`]
+    : [];
+}
+
+const upperFirst = (words: string): string => words.charAt(0).toUpperCase() + words.slice(1);
+
+/** About the TDC that was told, else as ranges of the cycle. */
+function standsAt(answer: TdcAnswer, windows: WhichTdc['windows']): readonly string[] {
+  const around =
+    answer === 'compression-tdc'
+      ? aroundTop(windows, 0)
+      : answer === 'exhaust-tdc'
+        ? aroundTop(windows, 360)
+        : undefined;
+  return around === undefined ? rangesOf(windows) : [around];
+}
+
 /** The windows as ranges; one that was split at 720° is one again. */
 function rangesOf(windows: WhichTdc['windows']): readonly string[] {
   const [first, last] = [windows[0], windows.at(-1)];
@@ -146,9 +178,11 @@ function rangesOf(windows: WhichTdc['windows']): readonly string[] {
   return joined.map(([from, to]) => `${printAngle(from)} to ${printAngle(to)}`);
 }
 
-function requestOf(read: CaseReader, firing: TypedFiring): WhichTdcRequest {
-  const rows = read.rows('seen');
-  const positions = [...new Set(rows.map((row) => row.number('position')))].sort((a, b) => a - b);
+type TypedRequest = WhichTdcRequest & { readonly isRowByRow: boolean };
+
+function requestOf(read: CaseReader, firing: TypedFiring): TypedRequest {
+  const { rows, isRowByRow } = placed(read.rows('seen'));
+  const positions = [...new Set(rows.map(({ position }) => position))].sort((a, b) => a - b);
   const [about, tolerance] = [read.numberIf('about'), read.numberIf('tolerance')];
   const marks = read.choice<'-' | 'compression' | 'exhaust'>('marks');
   const asked = about === undefined ? undefined : positions.indexOf(about);
@@ -159,11 +193,31 @@ function requestOf(read: CaseReader, firing: TypedFiring): WhichTdcRequest {
     valveTiming: timingOf(read),
     cylinder: cylinderOf(read.text('cylinder'), firing),
     sightings: positions.map((position) =>
-      rows.filter((row) => row.number('position') === position).map((row) => sightingOf(row, firing)),
+      rows.filter((one) => one.position === position).map(({ row }) => sightingOf(row, firing)),
     ),
     ...(asked === undefined ? {} : { about: asked }),
     ...(tolerance === undefined ? {} : { tolerance }),
     ...(marks === '-' ? {} : { marksTogether: marks }),
+    isRowByRow,
+  };
+}
+
+/**
+ * Each row with its position. With none typed each row is a position of its own; else a row without one is at that
+ * of the row above.
+ */
+function placed(rows: readonly CaseReader[]): {
+  readonly rows: readonly { readonly row: CaseReader; readonly position: number }[];
+  readonly isRowByRow: boolean;
+} {
+  const isBlank = rows.every((row) => row.numberIf('position') === undefined);
+  let above = 1;
+  return {
+    rows: rows.map((row, i) => {
+      above = isBlank ? i + 1 : (row.numberIf('position') ?? above);
+      return { row, position: above };
+    }),
+    isRowByRow: isBlank && rows.length > 1,
   };
 }
 

@@ -116,3 +116,12 @@ describe('what a spec gives', () => {
 });
 
 const mm = (value: number) => ({ value, unit: 'mm' }) as const;
+
+it('takes a room of 20 °C and a thousandth of the diameter where nothing else is said', () => {
+  const { room, clearance, ...rest } = heatToAssembleWorking.example.typed;
+  expect([room, clearance]).toEqual(['20 °C', '14.8 µm']);
+  const text = said(heatToAssembleWorking, rest);
+  expect(text).toContain('Assumed: The room is at 20 °C.');
+  expect(text).toContain('Clearance then: 30 µm');
+  expect(text).toContain('a thousandth of the diameter is wanted');
+});

@@ -50,7 +50,7 @@ export const heatSections: readonly FieldSection[] = [
         kind: 'quantity',
         name: 'clearance',
         label: 'Clearance wanted while it goes together',
-        hint: 'about a thousandth of the diameter is easy by hand',
+        optional: 'a thousandth of the diameter, which is easy by hand',
         of: 'length',
         unit: 'µm',
       },
@@ -72,7 +72,7 @@ export const heatSections: readonly FieldSection[] = [
         ],
         starts: 'heating-hub',
       },
-      temperature('room', 'The room is at'),
+      temperature('room', 'The room is at', { optional: '20 °C' }),
       temperature('coldest', 'The inner part is cooled to', { when: ({ by }) => by === 'both' }),
       temperature('hottestAllowed', 'Hottest that the outer part and its neighbours stand', {
         optional: 'not judged',

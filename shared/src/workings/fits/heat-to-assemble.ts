@@ -46,13 +46,15 @@ export const heatToAssembleWorking = defineWorking({
     const [hottestAllowed, coldestAllowed, coldest] = ['hottestAllowed', 'coldestAllowed', 'coldest'].map(
       (name) => read.quantityIf(name),
     );
+    const diameter = read.quantity('diameter');
+    const [clearance, room] = [read.quantityIf('clearance'), read.quantityIf('room')];
     const answer = heatToAssemble({
-      diameter: read.quantity('diameter'),
+      diameter,
       interference: read.quantity('interference'),
-      clearance: read.quantity('clearance'),
+      clearance: clearance ?? { ...diameter, value: diameter.value / 1000 },
       hub: expandingOf(read, 'hub'),
       shaft: expandingOf(read, 'shaft'),
-      room: read.quantity('room'),
+      room: room ?? { value: 20, unit: '°C' },
       by: read.choice('by'),
       coldest,
       hottestAllowed,
@@ -79,7 +81,14 @@ export const heatToAssembleWorking = defineWorking({
         },
         { kind: 'steps', heading: 'In this order', steps: stepsOf(answer) },
       ],
-      assumed: [...answer.assumed, ...coefficientsOf(read)],
+      assumed: [
+        ...(clearance === undefined
+          ? ['A clearance of a thousandth of the diameter is wanted: common practice, no source.']
+          : []),
+        ...(room === undefined ? ['The room is at 20 °C.'] : []),
+        ...answer.assumed,
+        ...coefficientsOf(read),
+      ],
       cautions: answer.cautions,
     };
   },

@@ -39,8 +39,8 @@ export const anyFigure = (name: string, label: string, more: Partial<TextField> 
   ...more,
 });
 
-/** Two-point readings by height and axis. */
-export const roundRows = (name: string, label: string): RowsField => ({
+/** Two-point readings by height and axis, each of which `optional` lets stay empty. */
+export const roundRows = (name: string, label: string, optional?: string): RowsField => ({
   kind: 'rows',
   name,
   label,
@@ -48,8 +48,20 @@ export const roundRows = (name: string, label: string): RowsField => ({
   least: 1,
   most: 60,
   columns: [
-    { kind: 'text', name: 'height', label: 'Where along it', hint: 'top, middle, front' },
-    { kind: 'text', name: 'axis', label: 'Across which way', hint: 'along, across, at the split' },
+    {
+      kind: 'text',
+      name: 'height',
+      label: 'Where along it',
+      hint: 'top, middle, front',
+      ...(optional && { optional }),
+    },
+    {
+      kind: 'text',
+      name: 'axis',
+      label: 'Across which way',
+      hint: 'along, across, at the split',
+      ...(optional && { optional }),
+    },
     { kind: 'quantity', name: 'value', label: 'Reading', of: 'length', unit: 'mm' },
   ],
 });

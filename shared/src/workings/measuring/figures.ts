@@ -32,10 +32,13 @@ export function figureIf(read: CaseReader, name: string, unit?: Unit): Quantity 
   return text === undefined ? undefined : parseQuantity(text, unit, name);
 }
 
+/** What a reading's place is called while nobody says where it was taken. */
+export const onePlace = 'one place';
+
 export function roundOf(read: CaseReader, name: string): readonly RoundReading[] {
   return read.rows(name).map((row) => ({
-    height: row.text('height'),
-    axis: row.text('axis'),
+    height: row.textIf('height') ?? onePlace,
+    axis: row.textIf('axis') ?? onePlace,
     value: row.quantity('value'),
   }));
 }
