@@ -1,5 +1,6 @@
 import type { CapDiagnosis, Cylinder } from '../contracts/calculations.js';
-import type { WiringStep } from '../contracts/steps.js';
+import type { EntryContent, WiringStep } from '../contracts/steps.js';
+import type { Judgement } from '../contracts/verdict.js';
 import { capDiagnosis } from '../ignition/cap-diagnosis.js';
 
 /** What is fitted at each outlet against the map that the step requires. */
@@ -14,4 +15,12 @@ export function diagnoseWiring(
     valveTiming: definition.valveTiming,
     advance: definition.advance,
   });
+}
+
+/** Passes only when the leads stand as the required map has them. */
+export function judgeWiring(
+  definition: WiringStep,
+  { fitted }: Extract<EntryContent, { kind: 'wiring' }>,
+): Judgement {
+  return diagnoseWiring(definition, fitted);
 }

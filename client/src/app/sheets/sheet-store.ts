@@ -5,12 +5,17 @@ import { catchError, concatMap, EMPTY, from, type Subscription } from 'rxjs';
 import { KeptCopies } from '../offline/kept-copies';
 import { WaitingTray } from '../offline/waiting-tray';
 import { SessionStore } from '../session/session-store';
+import { laterPart } from '../states/later-part';
+import { loadJudge } from './kinds/load-judge';
 import { sheetNews, type SheetNews } from './sheet-events';
 import { stepUrl } from './sheet-api';
 import { shownStep, type ShownStep } from './shown-step';
 import { ToolsStore } from './tools/tools-store';
 
 const stepsAhead = 8;
+
+/** Why a step's kind can't be worked here. */
+export const notOnThisDevice = 'No network. No step of this kind has been opened on this device before.';
 
 /**
  * One sheet while one works on it: the sheet, the step at hand with what waits in the tray laid over it, and its
@@ -46,6 +51,19 @@ export class SheetStore {
 
   readonly id = computed(() => this.openId() ?? '');
   readonly code = this.openCode.asReadonly();
+  readonly stages = computed(() => (this.sheet.hasValue() ? this.sheet.value().stages : []));
+  readonly lines = computed<readonly StepLine[]>(() => this.stages().flatMap(({ steps }) => steps));
+  /** The kind of the step at hand, which the sheet's list may tell before the step itself is read. */
+  readonly kind = computed(() => {
+    if (this.detail.hasValue()) return this.detail.value().kind;
+    return this.lines().find(({ code }) => code === this.openCode())?.kind ?? null;
+  });
+  /** The judge of that kind, on its way or here. */
+  readonly judging = laterPart(() => {
+    const kind = this.kind();
+    return kind === null ? undefined : loadJudge[kind];
+  }, notOnThisDevice);
+  readonly judge = computed(() => (this.judging.hasValue() ? this.judging.value() : null));
   readonly step = computed<ShownStep | null>(() => {
     const person = this.sessions.person();
     if (!this.detail.hasValue() || person === null) return null;
@@ -53,10 +71,8 @@ export class SheetStore {
     const items = this.tray
       .items()
       .filter(({ sheetId, stepCode }) => sheetId === detail.sheetId && stepCode === detail.code);
-    return shownStep(detail, items, person, this.tools.all());
+    return shownStep(detail, items, person, { judge: this.judge(), tools: this.tools.all() });
   });
-  readonly stages = computed(() => (this.sheet.hasValue() ? this.sheet.value().stages : []));
-  readonly lines = computed<readonly StepLine[]>(() => this.stages().flatMap(({ steps }) => steps));
 
   constructor() {
     let line: Subscription | undefined;

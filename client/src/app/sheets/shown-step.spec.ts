@@ -1,3 +1,4 @@
+import { judgeEntry } from '@second-spanner/shared/sheet/judge-entry';
 import { describe, expect, it } from 'vitest';
 import type { TrayItem } from '../offline/tray-item';
 import { opensByTray } from './open-offline';
@@ -20,14 +21,21 @@ const item = (value: number, over: Partial<TrayItem> = {}): TrayItem => ({
   ...over,
 });
 
+const judging = { judge: judgeEntry, tools: [dialGauge] };
+
 describe('a step with the tray laid over it', () => {
   it('shows a waiting entry as current, judged here', () => {
-    const step = shownStep(stepOf(endFloat), [item(0.17)], builder, [dialGauge]);
+    const step = shownStep(stepOf(endFloat), [item(0.17)], builder, judging);
     expect(step.entries.map(({ verdict, current, by }) => [verdict, current, by.name])).toEqual([
       ['pass', true, 'Tomasz Brandt'],
     ]);
-    const failing = shownStep(stepOf(endFloat), [item(0.4)], builder, [dialGauge]);
+    const failing = shownStep(stepOf(endFloat), [item(0.4)], builder, judging);
     expect(failing.entries[0]?.verdict).toBe('fail');
+  });
+
+  it('judges nothing as long as what judges is on its way', () => {
+    const step = shownStep(stepOf(endFloat), [item(0.4)], builder, { ...judging, judge: null });
+    expect(step.entries.map(({ verdict, current }) => [verdict, current])).toEqual([['not-judged', true]]);
   });
 
   it('strikes the entry that a waiting one replaces', () => {
@@ -42,7 +50,7 @@ describe('a step with the tray laid over it', () => {
       stepOf(endFloat, { entries: [first] }),
       [{ ...correction, request: { ...correction.request, replaces: first.id, reason: 'misread' } }],
       builder,
-      [dialGauge],
+      judging,
     );
     expect(step.entries.map(({ current, replacedBy }) => [current, replacedBy])).toEqual([
       [false, 'key-1'],
@@ -51,7 +59,7 @@ describe('a step with the tray laid over it', () => {
   });
 
   it('shows a refused entry with its reason, and counts it for nothing', () => {
-    const step = shownStep(stepOf(endFloat), [item(0.17, { refused: 'Not now.' })], builder, [dialGauge]);
+    const step = shownStep(stepOf(endFloat), [item(0.17, { refused: 'Not now.' })], builder, judging);
     expect(step.entries.map(({ current, inTray }) => [current, inTray?.refused])).toEqual([
       [false, 'Not now.'],
     ]);

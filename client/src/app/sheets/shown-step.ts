@@ -1,9 +1,9 @@
 import type { EntryView, StepDetail } from '@second-spanner/shared/contracts/sheets';
 import type { PersonName } from '@second-spanner/shared/contracts/people';
-import type { Tool } from '@second-spanner/shared/contracts/registers';
 import type { Judgement } from '@second-spanner/shared/contracts/verdict';
 import { InputError } from '@second-spanner/shared/contracts/input-error';
-import { judgeEntry } from '@second-spanner/shared/sheet/judge-entry';
+import type { Judge } from '@second-spanner/shared/sheet/judge-of';
+import type { JudgingContext } from '@second-spanner/shared/sheet/judging-context';
 import type { TrayItem } from '../offline/tray-item';
 
 /** An entry as the page shows it: one that the api has, or one that still lies in the tray on this device. */
@@ -16,12 +16,17 @@ export interface ShownStep extends Omit<StepDetail, 'entries'> {
   readonly entries: readonly ShownEntry[];
 }
 
+/** What judges the waiting entries on this device; without a judge, as long as it is being downloaded, they are not judged. */
+export interface JudgingHere extends Pick<JudgingContext, 'tools'> {
+  readonly judge: Judge | null;
+}
+
 /** Lays the waiting entries of a step over what the api has of it. A refused one is shown, but counts for nothing. */
 export function shownStep(
   step: StepDetail,
   items: readonly TrayItem[],
   by: PersonName,
-  tools: readonly Tool[],
+  judging: JudgingHere,
 ): ShownStep {
   const waiting = items.filter(({ refused }) => refused === undefined);
   const replacedBy = new Map(
@@ -37,7 +42,7 @@ export function shownStep(
   });
   return {
     ...step,
-    entries: [...known, ...items.map((item) => fromTray(item, step, by, tools, replacedBy))],
+    entries: [...known, ...items.map((item) => fromTray(item, step, by, judging, replacedBy))],
   };
 }
 
@@ -45,14 +50,14 @@ function fromTray(
   item: TrayItem,
   step: StepDetail,
   by: PersonName,
-  tools: readonly Tool[],
+  judging: JudgingHere,
   replacedBy: ReadonlyMap<string, string>,
 ): ShownEntry {
   const { request, refused, keptAt } = item;
   return {
     id: item.key,
     content: request.content,
-    ...judgedHere(item, step, tools),
+    ...judgedHere(item, step, judging),
     by,
     at: keptAt,
     round: step.round,
@@ -65,9 +70,14 @@ function fromTray(
 }
 
 /** The page's own judgement, until the api's is there. */
-function judgedHere({ request, keptAt }: TrayItem, step: StepDetail, tools: readonly Tool[]): Judgement {
+function judgedHere(
+  { request, keptAt }: TrayItem,
+  step: StepDetail,
+  { judge, tools }: JudgingHere,
+): Judgement {
+  if (judge === null) return { verdict: 'not-judged', reason: 'It is judged when it is sent.' };
   try {
-    return judgeEntry(step.definition, request.content, { tools, on: keptAt.slice(0, 10) });
+    return judge(step.definition, request.content, { tools, on: keptAt.slice(0, 10) });
   } catch (error) {
     if (error instanceof InputError) return { verdict: 'not-judged', reason: error.message };
     throw error;

@@ -1,5 +1,6 @@
 import { signal } from '@angular/core';
 import { TestBed } from '@angular/core/testing';
+import { judgeEntry } from '@second-spanner/shared/sheet/judge-entry';
 import { beforeEach, describe, expect, it } from 'vitest';
 import { ApiProblem } from '../http/api-problem';
 import type { Sent } from '../offline/send-item';
@@ -44,6 +45,7 @@ describe('the work on a step', () => {
             id: signal('sheet'),
             code: signal('3.4'),
             step,
+            judge: signal(judgeEntry),
             lines: signal([]),
             sheet: { hasValue: () => true, value: () => sheetOf() },
           },
@@ -156,5 +158,13 @@ describe('the work on a step', () => {
     // Accepted as it is by the foreman: the api counts it as done.
     show({ entries, done: 3, of: 3, openSnags: 0 });
     expect(work.toRepeat()).toBeNull();
+  });
+
+  it('judges by the judge of the step’s kind, and names the field that keeps it from one', () => {
+    const { judgement, error } = work.judge(mainClearance, { ...reading('Main 1'), toolId: 'none' });
+    expect(judgement).toBeNull();
+    expect(error?.field).toBe('content.toolId');
+    // 0.12 mm lies within 0.10 to 0.25 mm by more than the gauge's 0.01 mm.
+    expect(work.judge(mainClearance, reading('Main 1')).judgement?.verdict).toBe('pass');
   });
 });

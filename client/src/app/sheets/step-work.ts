@@ -3,7 +3,6 @@ import { InputError } from '@second-spanner/shared/contracts/input-error';
 import type { NewEntryRequest } from '@second-spanner/shared/contracts/sheets';
 import type { EntryContent, StepDefinition } from '@second-spanner/shared/contracts/steps';
 import type { Judgement } from '@second-spanner/shared/contracts/verdict';
-import { judgeEntry } from '@second-spanner/shared/sheet/judge-entry';
 import { takesEntries } from '@second-spanner/shared/sheet/sheet-states';
 import { slotKeyOf } from '@second-spanner/shared/sheet/slots';
 import { WaitingTray } from '../offline/waiting-tray';
@@ -107,9 +106,11 @@ export class StepWork {
 
   /** Judges content as it stands, by the same rules that the api has. */
   judge(definition: StepDefinition, content: EntryContent): Judged {
+    const judge = this.store.judge();
+    if (judge === null) return { judgement: null, error: null };
     const on = new Date().toISOString().slice(0, 10);
     try {
-      return { judgement: judgeEntry(definition, content, { tools: this.tools.all(), on }), error: null };
+      return { judgement: judge(definition, content, { tools: this.tools.all(), on }), error: null };
     } catch (error) {
       if (error instanceof InputError) return { judgement: null, error };
       throw error;

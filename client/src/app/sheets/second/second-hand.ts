@@ -1,3 +1,4 @@
+import { NgComponentOutlet } from '@angular/common';
 import { ChangeDetectionStrategy, Component, computed, inject, input, viewChild } from '@angular/core';
 import { MatButton } from '@angular/material/button';
 import { RouterLink } from '@angular/router';
@@ -6,20 +7,17 @@ import { Foot } from '../../foot/foot';
 import { Network } from '../../http/network';
 import { Sentence } from '../../quantity/sentence';
 import { SessionStore } from '../../session/session-store';
-import { withCapital } from '../entry-words';
+import { laterPart } from '../../states/later-part';
+import { LoadState } from '../../states/load-state';
 import { Sign } from '../../verdict/sign';
+import { withCapital } from '../entry-words';
 import { SayWhy } from '../say-why/say-why';
 import { SheetHead, type HeadCell } from '../sheet/sheet-head';
 import { SheetStore } from '../sheet-store';
 import type { ShownStep } from '../shown-step';
 import { Cautions } from '../step/cautions';
 import { CoveredPlate } from '../step/covered-plate';
-import { Compared } from './compared';
-import { Inspect } from './inspect';
-import { LookAgain } from './look-again';
-import { MeasureAgain } from './measure-again';
-import { ReadLeadsAgain } from './read-leads-again';
-import { ReadSetting } from './read-setting';
+import { checkOf, loadCompared, type SecondCheckPart } from './load-check';
 import { SecondWork } from './second-work';
 
 /** The second check at hand: the person's own reading, blind; then both side by side, to countersign or dispute. */
@@ -27,15 +25,11 @@ import { SecondWork } from './second-work';
   selector: 'ss-second-hand',
   imports: [
     Cautions,
-    Compared,
     CoveredPlate,
     Foot,
-    Inspect,
-    LookAgain,
+    LoadState,
     MatButton,
-    MeasureAgain,
-    ReadLeadsAgain,
-    ReadSetting,
+    NgComponentOutlet,
     RouterLink,
     SayWhy,
     Sentence,
@@ -72,6 +66,14 @@ export class SecondHand {
       ...(sheet === null ? [] : [{ caption: `${sheet.carName}, engine`, value: sheet.engineCode }]),
     ];
   });
+  /** What is done here: the own reading first, then both side by side. */
+  protected readonly check = computed<SecondCheckPart | null>(() => {
+    const step = this.step();
+    if (step.can.readAgain) return checkOf(step);
+    const own = this.work.own();
+    return own && { load: loadCompared, inputs: { step, own } };
+  });
+  protected readonly part = laterPart(() => this.check()?.load);
   /** Why there is nothing to do here, where that is so. */
   protected readonly idle = computed(() => {
     const { can, secondCheck, critical, status } = this.step();

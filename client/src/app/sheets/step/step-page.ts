@@ -1,19 +1,22 @@
 import { ChangeDetectionStrategy, Component, effect, inject, input } from '@angular/core';
 import { PageTitle } from '../../layout/page-title';
+import { laterPart } from '../../states/later-part';
 import { LoadState } from '../../states/load-state';
 import { SheetHead } from '../sheet/sheet-head';
-import { SheetStore } from '../sheet-store';
+import { notOnThisDevice, SheetStore } from '../sheet-store';
+import { loadWork } from './load-work';
 import { StepHand } from './step-hand';
 
-/** A step by its address. */
+/** A step by its address, with the work of its kind. */
 @Component({
   selector: 'ss-step-page',
   imports: [LoadState, SheetHead, StepHand],
   changeDetection: ChangeDetectionStrategy.OnPush,
   template: `
-    @if (store.step(); as step) {
+    @let step = store.step();
+    @if (step && work.hasValue() && store.judge()) {
       @for (one of [step]; track one.code) {
-        <ss-step-hand [step]="one" />
+        <ss-step-hand [step]="one" [work]="work.value()" />
       }
     } @else {
       <ss-sheet-head
@@ -21,7 +24,11 @@ import { StepHand } from './step-hand';
         [back]="['/sheets', store.id()]"
         backLabel="Stages of this sheet"
       />
-      <ss-load-state class="sheet" what="the step" [from]="store.detail" />
+      @if (step) {
+        <ss-load-state class="sheet" what="the step" [from]="work.hasValue() ? store.judging : work" />
+      } @else {
+        <ss-load-state class="sheet" what="the step" [from]="store.detail" />
+      }
     }
   `,
   styles: `
@@ -39,6 +46,11 @@ export class StepPage {
 
   /** From the address. */
   readonly code = input.required<string>();
+
+  protected readonly work = laterPart(() => {
+    const kind = this.store.kind();
+    return kind === null ? undefined : loadWork[kind];
+  }, notOnThisDevice);
 
   constructor() {
     effect(() => this.store.openStep(this.code()));

@@ -1,3 +1,4 @@
+import { NgComponentOutlet } from '@angular/common';
 import { ChangeDetectionStrategy, Component, computed, inject, input } from '@angular/core';
 import { MatButton } from '@angular/material/button';
 import { tradeText } from '@second-spanner/shared/contracts/trade-words';
@@ -5,6 +6,8 @@ import type { WiringStep } from '@second-spanner/shared/contracts/steps';
 import { rotationOnCap } from '@second-spanner/shared/drawing/cap-input';
 import { Foot } from '../../../foot/foot';
 import { SessionStore } from '../../../session/session-store';
+import { laterPart, type LoadPart } from '../../../states/later-part';
+import { LoadState } from '../../../states/load-state';
 import { TradeWords } from '../../../words/trade-words';
 import { Correction } from '../../correction/correction';
 import { draft } from '../../drafts/draft';
@@ -13,9 +16,10 @@ import type { HeadCell } from '../../sheet/sheet-head';
 import type { ShownStep } from '../../shown-step';
 import { StepFrame } from '../../step/step-frame';
 import { StepWork } from '../../step-work';
-import { Diagnosis } from './diagnosis';
 import { cylindersByOutlet, isFittedDraft, nothingFitted, outletsOf, type FittedDraft } from './fitted';
 import { FittedFields } from './fitted-fields';
+
+const loadDiagnosis: LoadPart = async () => (await import('./diagnosis')).Diagnosis;
 
 /**
  * Wiring: what is fitted is entered by outlet, with the required map out of sight until it is kept; then the map,
@@ -23,7 +27,17 @@ import { FittedFields } from './fitted-fields';
  */
 @Component({
   selector: 'ss-wiring-work',
-  imports: [Correction, Diagnosis, FittedFields, Foot, MatButton, SaveLine, StepFrame, TradeWords],
+  imports: [
+    Correction,
+    FittedFields,
+    Foot,
+    LoadState,
+    MatButton,
+    NgComponentOutlet,
+    SaveLine,
+    StepFrame,
+    TradeWords,
+  ],
   changeDetection: ChangeDetectionStrategy.OnPush,
   templateUrl: './wiring-work.html',
   styleUrl: '../work.scss',
@@ -50,6 +64,9 @@ export class WiringWork {
     const entry = this.step().entries.findLast(({ current }) => current);
     return entry?.content.kind === 'wiring' ? entry.content.fitted : null;
   });
+  private readonly isKept = computed(() => !this.isEntering() && this.kept() !== null);
+  /** Shown, and downloaded, when the leads are in. */
+  protected readonly diagnosis = laterPart(() => (this.isKept() ? loadDiagnosis : undefined));
   protected readonly mayMove = computed(() => this.work.isOpen() && this.work.toRepeat() !== null);
   protected readonly cells = computed<readonly HeadCell[]>(() => {
     const { cap } = this.definition();
