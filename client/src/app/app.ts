@@ -1,10 +1,11 @@
 import { ChangeDetectionStrategy, Component } from '@angular/core';
 import { RouterOutlet } from '@angular/router';
+import { PageFailed } from './states/page-failed';
 
 @Component({
   selector: 'ss-root',
-  imports: [RouterOutlet],
+  imports: [PageFailed, RouterOutlet],
   changeDetection: ChangeDetectionStrategy.OnPush,
-  template: '<router-outlet />',
+  template: '<ss-page-failed /><router-outlet />',
 })
 export class App {}
