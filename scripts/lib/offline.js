@@ -1,6 +1,6 @@
 // @ts-check
 // What a device keeps for work without a network: the pages from the first visit on, each working once it was
-// opened. The builder's notes say which files are there for workings alone.
+// opened, and so what is of no use without a network. The builder's notes say which files are there for these alone.
 import { readFileSync, writeFileSync } from 'node:fs';
 import { root } from './places.js';
 import { run, runTool } from './run.js';
@@ -11,21 +11,22 @@ import { run, runTool } from './run.js';
  * @typedef {Record<string, Output>} Outputs
  */
 
-/** A working, or the page that shows it. */
-const aWorking = /(^|\/)(shared\/(dist|src)\/workings|client\/src\/app\/workings\/working)\//;
+/** A working, the page that shows it, or the form that starts a sheet. */
+const openedLater =
+  /(^|\/)(shared\/(dist|src)\/workings|client\/src\/app\/(workings\/working|cars\/start))\//;
 
 /** @param {Outputs} outputs */
 const isOpenedLater =
   (outputs) =>
   (/** @type {Import} */ { path, kind }) =>
-    kind === 'dynamic-import' && aWorking.test(outputs[path]?.entryPoint ?? '');
+    kind === 'dynamic-import' && openedLater.test(outputs[path]?.entryPoint ?? '');
 
 /**
- * The scripts that no page needs before a working is opened: those that can't be come by from the first one
- * without opening a working.
+ * The scripts that no page needs before such a part is opened: those that can't be come by from the first one
+ * without opening one.
  * @param {Outputs} outputs
  */
-export const filesOfWorkings = (outputs) => {
+export const filesOpenedLater = (outputs) => {
   const isLater = isOpenedLater(outputs);
   const needed = new Set(
     Object.keys(outputs).filter((name) => outputs[name]?.entryPoint?.endsWith('src/main.ts')),
@@ -37,7 +38,7 @@ export const filesOfWorkings = (outputs) => {
 };
 
 /**
- * Writes the service worker's list again, the files of workings apart. The exit code.
+ * Writes the service worker's list again, what is opened later apart. The exit code.
  * @param {typeof run} [runner]
  */
 export const partOffline = async (runner = run) => {
@@ -46,12 +47,12 @@ export const partOffline = async (runner = run) => {
   const { outputs } = JSON.parse(readFileSync(`${root}/${folder}/stats.json`, 'utf8'));
   /** @type {{ assetGroups: object[] }} */
   const config = JSON.parse(readFileSync(`${root}/client/ngsw-config.json`, 'utf8'));
-  const files = filesOfWorkings(outputs).map((name) => `/${name}`);
-  const workings = { name: 'workings', installMode: 'lazy', updateMode: 'prefetch', resources: { files } };
+  const files = filesOpenedLater(outputs).map((name) => `/${name}`);
+  const later = { name: 'opened-later', installMode: 'lazy', updateMode: 'prefetch', resources: { files } };
   const parted = `${folder}/ngsw-config.json`;
   writeFileSync(
     `${root}/${parted}`,
-    JSON.stringify({ ...config, assetGroups: [workings, ...config.assetGroups] }),
+    JSON.stringify({ ...config, assetGroups: [later, ...config.assetGroups] }),
   );
   return runTool('@angular/service-worker/ngsw-config.js', [`${folder}/browser`, parted], { runner });
 };
