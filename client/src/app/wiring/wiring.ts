@@ -1,10 +1,7 @@
-import { DOCUMENT, NgTemplateOutlet } from '@angular/common';
+import { DOCUMENT, NgComponentOutlet, NgTemplateOutlet } from '@angular/common';
 import { ChangeDetectionStrategy, Component, computed, inject, signal } from '@angular/core';
 import { rxResource } from '@angular/core/rxjs-interop';
 import { MatButton } from '@angular/material/button';
-import { tradeText } from '@second-spanner/shared/contracts/trade-words';
-import { drawCap } from '@second-spanner/shared/drawing/cap';
-import { drawSparkStrip } from '@second-spanner/shared/drawing/spark-strip';
 import { rotorWords } from '@second-spanner/shared/workings/wiring-map/fact-words';
 import { fromQuery, toCase } from '@second-spanner/shared/workings/wiring-map/query';
 import { workOut } from '@second-spanner/shared/workings/wiring-map/work-out';
@@ -15,13 +12,13 @@ import {
 } from '@second-spanner/shared/workings/wiring-map/wiring-form';
 import { wiringMapWorking } from '@second-spanner/shared/workings/wiring-map/wiring-map';
 import { workingText } from '@second-spanner/shared/workings/working-text';
-import { DrawingFigure } from '../drawing/drawing';
 import { ChosenField } from '../fields/chosen-field';
 import { toApiProblem, type ApiProblem } from '../http/api-problem';
 import { Cell } from '../layout/cell';
 import { TitleBlock } from '../layout/title-block';
 import { SessionStore } from '../session/session-store';
 import { Wide } from '../sheets/wide';
+import { laterPart, type LoadPart } from '../states/later-part';
 import { LoadState } from '../states/load-state';
 import { ProblemLine } from '../states/problem-line';
 import { VerdictLine } from '../verdict/verdict';
@@ -41,13 +38,15 @@ import { SpecEngines } from './spec-engines';
 const typedIn = '';
 const longestInHead = 16;
 
+const loadCap: LoadPart = async () => (await import('./answer/cap-figure')).CapFigure;
+const loadStrip: LoadPart = async () => (await import('./answer/strip-figure')).StripFigure;
+
 /** The wiring map by itself: an engine of the spec book or one typed in, its cap, and what is wrong with its leads. */
 @Component({
   selector: 'ss-wiring',
   imports: [
     Cell,
     ChosenField,
-    DrawingFigure,
     EngineFacts,
     EngineFields,
     FittedCells,
@@ -56,6 +55,7 @@ const longestInHead = 16;
     LeadTable,
     LoadState,
     MatButton,
+    NgComponentOutlet,
     NgTemplateOutlet,
     ProblemLine,
     TitleBlock,
@@ -119,28 +119,11 @@ export class WiringPage {
   });
 
   private readonly options = computed(() => ({ dialect: this.sessions.dialect() }));
-  protected readonly capDrawing = computed(() => {
-    const { map, cap, fitted, diagnosis } = this.answer();
-    if (map === null || cap === null) return null;
-    const asFitted = fitted === null ? {} : { fitted, fittedBy: 'outlet' as const };
-    return drawCap(
-      { map, request: cap, ...asFitted, diagnosis: diagnosis ?? undefined, showRequired: true },
-      this.options(),
-    );
-  });
-  protected readonly capCaption = computed(() =>
-    this.say(
-      this.traced()
-        ? 'Cap from above, where the {leads} plug in. Angles clockwise from the mark. Dashed: inside the cap.'
-        : 'Cap from above, where the {leads} plug in. Angles clockwise from the mark.',
-    ),
-  );
-  protected readonly strip = computed(() => {
-    const { diagnosis, valveTiming, advance } = this.answer();
-    return diagnosis === null
-      ? null
-      : drawSparkStrip({ request: { valveTiming, advance }, diagnosis }, this.options());
-  });
+  /** Only a map is drawn, and only then the drawings are downloaded. */
+  private readonly hasMap = computed(() => this.answer().map !== null);
+  protected readonly capFigure = laterPart(() => (this.hasMap() ? loadCap : undefined));
+  private readonly hasDiagnosis = computed(() => this.answer().diagnosis !== null);
+  protected readonly strip = laterPart(() => (this.hasDiagnosis() ? loadStrip : undefined));
   protected readonly typed = computed(() => toCase(this.form()));
   protected readonly text = (): string => {
     const options = this.options();
@@ -175,9 +158,5 @@ export class WiringPage {
   private show(form: WiringForm): void {
     this.form.set(form);
     this.address.write(this.typed());
-  }
-
-  private say(text: string): string {
-    return tradeText(text, this.sessions.dialect());
   }
 }

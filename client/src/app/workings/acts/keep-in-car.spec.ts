@@ -31,6 +31,7 @@ describe('keeping a working in a car file', () => {
   };
   const open = async (): Promise<void> => {
     press('Keep in a car file');
+    await expect.poll(() => page.querySelector('dialog')?.open).toBe(true);
     api.expectOne('/api/cars?limit=200').flush({ items: [car], next: null });
     await fixture.whenStable();
   };
@@ -64,7 +65,16 @@ describe('keeping a working in a car file', () => {
     });
     request.flush({ id: 'k1', carId: 'c1' });
     await expect.poll(() => page.querySelector('a')?.getAttribute('href')).toBe('/cars/c1');
-    expect(page.querySelector('dialog')?.open).toBe(false);
+    expect(page.querySelector('dialog')).toBeNull();
+  });
+
+  it('is left without keeping anything, and opened anew', async () => {
+    await open();
+    press('Not now');
+    expect(page.querySelector('dialog')).toBeNull();
+    await open();
+    expect(page.querySelector('dialog')?.open).toBe(true);
+    api.verify();
   });
 
   it('says why it was not kept, and stays open', async () => {

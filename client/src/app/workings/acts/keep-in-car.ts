@@ -1,83 +1,69 @@
-import {
-  ChangeDetectionStrategy,
-  Component,
-  computed,
-  inject,
-  input,
-  signal,
-  viewChild,
-  type ElementRef,
-} from '@angular/core';
-import { rxResource } from '@angular/core/rxjs-interop';
+import { NgComponentOutlet } from '@angular/common';
+import { ChangeDetectionStrategy, Component, computed, input, signal } from '@angular/core';
 import { MatButton } from '@angular/material/button';
 import { RouterLink } from '@angular/router';
-import type { CarSummary } from '@second-spanner/shared/contracts/car-files';
 import type { WorkingCase } from '@second-spanner/shared/workings/working';
-import { of } from 'rxjs';
-import { ChosenField, type Choice } from '../../fields/chosen-field';
-import { TypedField } from '../../fields/typed-field';
-import { Saving } from '../../sheets/saving/save-state';
+import { laterPart, type LoadPart } from '../../states/later-part';
 import { LoadState } from '../../states/load-state';
-import { ProblemLine } from '../../states/problem-line';
-import { WorkingsApi } from '../workings-api';
+import type { KeptInCar } from './keep-dialog';
 
-/** Keeps a working in a car's file: which car, and under what name. */
+const loadDialog: LoadPart = async () => (await import('./keep-dialog')).KeepDialog;
+
+/** Keeps a working in a car's file: opens the dialog that asks which car, and says where it was kept. */
 @Component({
   selector: 'ss-keep-in-car',
-  imports: [ChosenField, LoadState, MatButton, ProblemLine, RouterLink, TypedField],
+  imports: [LoadState, MatButton, NgComponentOutlet, RouterLink],
   changeDetection: ChangeDetectionStrategy.OnPush,
-  templateUrl: './keep-in-car.html',
-  styleUrl: './keep-in-car.scss',
+  template: `
+    <button matButton type="button" (click)="open()">Keep in a car file</button>
+    <p class="small" role="status">
+      @if (kept(); as kept) {
+        Kept as “{{ kept.title }}” with <a [routerLink]="['/cars', kept.car.id]">{{ kept.car.name }}</a>.
+      }
+    </p>
+    @if (isOpen()) {
+      @if (dialog.hasValue()) {
+        <ng-container *ngComponentOutlet="dialog.value(); inputs: inputs()" />
+      } @else {
+        <ss-load-state what="the car files" [from]="dialog" />
+      }
+    }
+  `,
+  styles: `
+    :host {
+      display: grid;
+      grid-template-columns: minmax(0, 1fr);
+    }
+
+    p:empty {
+      display: none;
+    }
+  `,
 })
 export class KeepInCar {
-  private readonly api = inject(WorkingsApi);
-  private readonly dialog = viewChild.required<ElementRef<HTMLDialogElement>>('dialog');
-
   readonly working = input.required<string>();
   readonly title = input.required<string>();
   readonly typed = input.required<WorkingCase>();
 
-  /** The cars are read when they are first asked for. */
-  private readonly asked = signal(false);
-  protected readonly cars = rxResource({
-    params: () => (this.asked() ? {} : undefined),
-    stream: () => (this.asked() ? this.api.cars() : of([])),
-  });
-  protected readonly choices = computed<readonly Choice[]>(() =>
-    this.known().map(({ id, name, code }) => ({ value: id, words: `${name}, ${code}` })),
-  );
-
-  protected readonly car = signal('');
-  protected readonly name = signal('');
-  protected readonly tried = signal(false);
-  protected readonly keeping = new Saving();
-  protected readonly kept = signal<{ readonly car: CarSummary; readonly title: string } | null>(null);
+  private readonly wasOpened = signal(false);
+  protected readonly isOpen = signal(false);
+  protected readonly kept = signal<KeptInCar | null>(null);
+  protected readonly dialog = laterPart(() => (this.wasOpened() ? loadDialog : undefined));
+  protected readonly inputs = computed(() => ({
+    working: this.working(),
+    title: this.title(),
+    typed: this.typed(),
+    lastCar: this.kept()?.car.id ?? '',
+    closed: this.closed,
+  }));
 
   protected open(): void {
-    this.asked.set(true);
-    this.name.set(this.title());
-    this.tried.set(false);
-    this.keeping.set({ state: 'none' });
-    this.dialog().nativeElement.showModal();
+    this.wasOpened.set(true);
+    this.isOpen.set(true);
   }
 
-  protected close(): void {
-    this.dialog().nativeElement.close();
-  }
-
-  protected async keep(event: Event): Promise<void> {
-    event.preventDefault();
-    this.tried.set(true);
-    const car = this.known().find(({ id }) => id === this.car());
-    const title = this.name().trim();
-    if (car === undefined || title === '') return;
-    const request = { working: this.working(), title, typed: this.typed() };
-    if ((await this.keeping.follow(this.api.keep(car.id, request))) === null) return;
-    this.kept.set({ car, title });
-    this.close();
-  }
-
-  private known(): readonly CarSummary[] {
-    return this.cars.hasValue() ? this.cars.value() : [];
-  }
+  private readonly closed = (kept: KeptInCar | null): void => {
+    this.isOpen.set(false);
+    if (kept !== null) this.kept.set(kept);
+  };
 }
