@@ -1,6 +1,7 @@
 import { InputError } from '../contracts/input-error.js';
 import type { AnswerPart, Working, WorkingAnswer, WorkingOptions } from './working.js';
 import { inWords } from '../drawing/words.js';
+import { lowerFirst } from './lower-first.js';
 import { readCase, type CaseReader } from './read-case.js';
 
 export interface WorkedOut {
@@ -79,7 +80,3 @@ function fieldAt(path: string, fieldOf: NonNullable<Definition['fieldOf']>): str
 function sayMissing(labels: readonly string[]): string | null {
   return labels.length === 0 ? null : `Still to be filled in: ${inWords(labels.map(lowerFirst))}.`;
 }
-
-/** `Wrench length` as it stands in a sentence; `No. 1` and `M10` stay. */
-const lowerFirst = (label: string): string =>
-  /^[A-Z][a-z]+(?![a-z]*\.)/.test(label) ? label.charAt(0).toLowerCase() + label.slice(1) : label;

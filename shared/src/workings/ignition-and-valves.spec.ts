@@ -241,6 +241,18 @@ describe('what may stay open or be written shortly', () => {
     expect(at('-10').errors).toEqual({});
   });
 
+  it('a stop names each valve’s cylinder and kind', () => {
+    // Valve 1 of E I I E E I I E is No. 1's exhaust valve, 2 its inlet valve.
+    const text = said(lashOrderWorking, lashOrderWorking.example.typed);
+    expect(text).toContain('1 (No. 1 exhaust)');
+    expect(text).toContain('2 (No. 1 inlet)');
+  });
+
+  it('a field still open is named as in a sentence', () => {
+    const { missing } = valveClockWorking.workOut({}, { dialect: 'british' });
+    expect(missing).toContain('{inlet} opens');
+  });
+
   it('an open lead hides the maker’s figures', () => {
     const typed = { ...leadTestWorking.example.typed, shows: 'open' };
     expect(said(leadTestWorking, typed)).not.toContain('Most resistance for that length');

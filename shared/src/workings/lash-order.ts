@@ -1,5 +1,5 @@
 import type { SpecDocument } from '../contracts/spec.js';
-import type { LashOrder } from '../contracts/valve-figures.js';
+import type { LashOrder, ListedValve } from '../contracts/valve-figures.js';
 import { drawLashPlan } from '../drawing/lash-plan.js';
 import { inWords } from '../drawing/words.js';
 import { firingAngles } from '../valve-train/firing-angles.js';
@@ -79,7 +79,7 @@ export const lashOrderWorking = defineWorking({
     const plan = lashOrder(request);
     return {
       parts: [
-        { kind: 'steps', heading: 'The stops', steps: stepsOf(plan, firing) },
+        { kind: 'steps', heading: 'The stops', steps: stepsOf(plan, firing, valves) },
         {
           kind: 'drawing',
           caption: 'Valves from front to back, once for each stop',
@@ -123,14 +123,23 @@ export const lashOrderWorking = defineWorking({
   },
 });
 
-function stepsOf({ stops }: LashOrder, firing: TypedFiring): readonly string[] {
+function stepsOf(
+  { stops }: LashOrder,
+  firing: TypedFiring,
+  valves: readonly ListedValve[],
+): readonly string[] {
+  const valveWords = (name: string): string => {
+    const valve = valves.find((one) => one.valve === name);
+    if (valve === undefined) return name;
+    return `${name} (${nameOf(valve.cylinder)} ${valve.type === 'inlet' ? '{inlet}' : 'exhaust'})`;
+  };
   return stops.map(({ crank, set }, i) => {
     const before = stops[i - 1]?.crank;
     const turn =
       before === undefined
         ? `Turn the crank the normal way to ${printAngle(crank)} past the firing TDC of ${nameOf(firing.firingOrder[0] ?? '')}`
         : `Turn on by ${printAngle(crank - before)}, to ${printAngle(crank)}`;
-    return `${turn}${nearTdc(crank, firing)}. Set ${set.length === 1 ? 'valve' : 'valves'} ${inWords(set)}.`;
+    return `${turn}${nearTdc(crank, firing)}. Set ${set.length === 1 ? 'valve' : 'valves'} ${inWords(set.map(valveWords))}.`;
   });
 }
 

@@ -264,3 +264,12 @@ describe('a torque for a bolt of no known grade', () => {
     expect(textOf(torqueDoubtWorking, changed(torqueDoubtWorking, { spread: '10' }))).not.toContain(top);
   });
 });
+
+it('says where fasteners stand in words', () => {
+  const text = textOf(tighteningPlanWorking, {
+    layout: 'positions',
+    positions: '8|0|0;4|100|0',
+    passes: 'check',
+  });
+  expect(text).toContain('Where they stand: fastener 8, across 0, down 0; fastener 4, across 100, down 0');
+});

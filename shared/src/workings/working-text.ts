@@ -2,6 +2,7 @@ import { tradeText } from '../contracts/trade-words.js';
 import {
   begunFrom,
   type AnswerPart,
+  type CellField,
   type ChoiceField,
   type Working,
   type WorkingAnswer,
@@ -9,6 +10,7 @@ import {
   type WorkingField,
   type WorkingOptions,
 } from './working.js';
+import { lowerFirst } from './lower-first.js';
 import { readRows } from './rows.js';
 import { unitTaken } from './unit-taken.js';
 
@@ -58,9 +60,9 @@ function writtenValue(field: Exclude<WorkingField, ChoiceField>, text: string): 
       )
         .map((row) =>
           field.columns
-            .map((column) => typedValue(column, row[column.name] ?? ''))
+            .map((column) => typedCell(column, row[column.name] ?? '', field.columns))
             .filter((cell) => cell !== '')
-            .join(' '),
+            .join(', '),
         )
         .join('; ');
     case 'text':
@@ -68,6 +70,16 @@ function writtenValue(field: Exclude<WorkingField, ChoiceField>, text: string): 
     default:
       return text;
   }
+}
+
+/** A cell of a row, with its column's name where the value alone does not tell what it is. */
+function typedCell(column: CellField, text: string, columns: readonly CellField[]): string {
+  const value = typedValue(column, text);
+  const isBare =
+    (column.kind === 'text' && column.figures === true) ||
+    (column.kind === 'number' && column.counts === '') ||
+    (column.kind === 'quantity' && columns.filter(({ kind }) => kind === 'quantity').length > 1);
+  return value !== '' && isBare && columns.length > 1 ? `${lowerFirst(column.label)} ${value}` : value;
 }
 
 /** The whole working as plain text, to be copied or mailed. `address` opens the same case again. */

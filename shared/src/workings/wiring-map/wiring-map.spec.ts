@@ -52,4 +52,23 @@ describe('the wiring map as a working', () => {
     expect(text).toContain('https://shop.example/workings/wiring');
     expect(text).not.toMatch(/[{}]/);
   });
+
+  it('says what was typed in words', () => {
+    const traced = {
+      ...typed,
+      from: 'cap',
+      posts: '45, 135, 225, 315',
+      trace: '45:C,135:D,225:A,315:B',
+      valves: '16_56_51_21',
+      fitted: 'A:1,45:2',
+      of: 'AT18, edition 2',
+    };
+    const text = workingText(wiringMapWorking, traced, at({}), british);
+    expect(text).toContain('Begun from: AT18, edition 2');
+    expect(text).toContain('45° to C, 135° to D, 225° to A, 315° to B');
+    expect(text).toContain(
+      'inlet opens 16° before TDC, inlet closes 56° after BDC, exhaust opens 51° before BDC',
+    );
+    expect(text).toContain('A to No. 1, 45° to No. 2');
+  });
 });

@@ -15,15 +15,17 @@ import { formOfDocument } from './form-of-spec.js';
 import { companionWords, intervalWords, leadRows } from './map-words.js';
 import { fromQuery, toCase } from './query.js';
 import { spoken } from './spoken.js';
+import { sayAngles, sayFitted, sayTrace, sayValves, sayView } from './spoken-fields.js';
 import type { FormErrors, FormField } from './wiring-form.js';
 import { workOut, type WiringAnswer } from './work-out.js';
 
-const text = (name: string, label: string, optional = ''): TextField => ({
+const text = (name: string, label: string, optional = '', says?: TextField['says']): TextField => ({
   kind: 'text',
   name,
   label,
   optional,
   figures: true,
+  ...(says && { says }),
 });
 
 const sections: readonly FieldSection[] = [
@@ -35,17 +37,20 @@ const sections: readonly FieldSection[] = [
       text('cylinders', 'Cylinders', '4'),
       text('order', 'Firing order'),
       text('turns', 'Rotor turns'),
-      text('from', 'Seen from the', 'cap'),
-      text('posts', 'Posts, degrees from the mark'),
-      text('at', 'First post, degrees from the mark', '0'),
-      text('first', 'Post for the first cylinder'),
+      text('from', 'Seen from', 'the outside of the cap', sayView),
+      text('posts', 'Posts, degrees from the mark', '', sayAngles),
+      text('at', 'First post, degrees from the mark', '0', sayAngles),
+      text('first', 'Post for the first cylinder', '', sayAngles),
       text('intervals', 'Intervals, degrees of crank'),
-      text('trace', 'Cap traced, post to {outlet}'),
-      text('advance', 'Static timing, degrees before TDC', '10'),
-      text('valves', 'Valve timing, {inlet} opens and closes, exhaust opens and closes'),
+      text('trace', 'Cap traced, post to {outlet}', '', sayTrace),
+      text('advance', 'Static timing, degrees before TDC', '10', sayAngles),
+      text('valves', 'Valve timing', '', sayValves),
     ],
   },
-  { heading: '{Leads} as fitted', fields: [text('fitted', '{Leads} as fitted, {outlet} to cylinder')] },
+  {
+    heading: '{Leads} as fitted',
+    fields: [text('fitted', '{Leads} as fitted, {outlet} to cylinder', '', sayFitted)],
+  },
 ];
 
 /** The names of the case by the fields of the form that they are read into, where they differ. */
