@@ -5,6 +5,7 @@ import { CautionSign } from '../../sheets/step/caution-sign';
 import { VerdictLine } from '../../verdict/verdict';
 import { TradeWords } from '../../words/trade-words';
 import { AnswerParts } from './answer-parts';
+import { judgementSign, judgementWord } from './judgement-words';
 
 /** What is said of a case: each judgement, its cautions, and the figures beside it. */
 @Component({
@@ -19,6 +20,8 @@ export class Judged {
   /** Figures that stand beside the judgement. */
   readonly facts = input.required<readonly AnswerPart[]>();
 
+  protected readonly sign = judgementSign;
+  protected readonly word = judgementWord;
   protected readonly judgements = computed(() =>
     this.answer().parts.filter((part) => part.kind === 'judgement'),
   );

@@ -11,6 +11,13 @@ describe('an answer in short', () => {
     expect(inShort({ ...blank, parts: [facts, judgement] })).toBe('Fail: It is 2 mm too long.');
   });
 
+  it('says the judgement’s own word, and waiting for what only waits', () => {
+    const judgement = { kind: 'judgement', verdict: 'fail', reason: 'Two days still.', waits: true } as const;
+    expect(inShort({ ...blank, parts: [judgement] })).toBe('Waiting: Two days still.');
+    const named = { ...judgement, word: 'Wait' };
+    expect(inShort({ ...blank, parts: [named] })).toBe('Wait: Two days still.');
+  });
+
   it('is the first figure where nothing is judged', () => {
     expect(inShort({ ...blank, parts: [facts] })).toBe('Setting: 32.7 N·m');
   });

@@ -4,7 +4,7 @@ import { tradeText } from '@second-spanner/shared/contracts/trade-words';
 import type { WorkingAnswer } from '@second-spanner/shared/workings/working';
 import { debounceTime, skip } from 'rxjs';
 import { SessionStore } from '../../session/session-store';
-import { signOf, signWords } from '../../verdict/signs';
+import { judgementWord } from './judgement-words';
 
 /** How long nothing was typed before the answer is read out: not at every key. */
 const pause = 900;
@@ -31,8 +31,7 @@ export class Spoken {
 export function inShort({ parts, missing, errors }: WorkingAnswer): string {
   const judgement = parts.find((part) => part.kind === 'judgement');
   if (judgement !== undefined) {
-    const word = judgement.verdict === 'not-judged' ? 'Not judged' : signWords[signOf(judgement.verdict)];
-    return `${word}: ${judgement.reason}`;
+    return `${judgementWord(judgement)}: ${judgement.reason}`;
   }
   const fact = parts.find((part) => part.kind === 'facts')?.facts[0];
   if (fact !== undefined) return `${fact.name}: ${fact.value}`;
