@@ -97,6 +97,13 @@ describe('the reading field', () => {
     expect(described?.textContent).toContain('past the wrench’s range');
   });
 
+  it('leaves the room of the unit beside it to a figure with a unit of its own', async () => {
+    fixture.componentInstance.text.set('40,5 ft lb');
+    await fixture.whenStable();
+    expect(page.querySelector('select')).toBeNull();
+    expect(fixture.componentInstance.reading().quantity()).toEqual({ value: 40.5, unit: 'lbf·ft' });
+  });
+
   it('changes its unit and reads the same figure in it', async () => {
     fixture.componentInstance.text.set('27');
     const unit = page.querySelector('select')!;

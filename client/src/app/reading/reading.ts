@@ -12,6 +12,7 @@ import {
 } from '@angular/core';
 import { MatIcon } from '@angular/material/icon';
 import type { Quantity, Unit } from '@second-spanner/shared/contracts/quantity';
+import { splitUnit } from '../fields/split-unit';
 import { Sentence } from '../quantity/sentence';
 import { Sign } from '../verdict/sign';
 import { Keypad } from './keypad';
@@ -48,6 +49,8 @@ export class Reading {
   readonly quantity = computed<Quantity | null>(() => this.read().quantity);
 
   private readonly read = computed(() => readFigure(this.text(), this.unit()));
+  /** Whether a unit is typed with the figure, so that the one beside it does not hold. */
+  protected readonly hasUnit = computed(() => splitUnit(this.text()).unit !== undefined);
   private readonly isTyping = signal(false);
 
   protected readonly id = `reading-${(fields += 1)}`;
