@@ -19,11 +19,18 @@ export interface TextStyle {
   readonly align?: 'left' | 'right' | 'center';
 }
 
+/** A part of the page's width. */
+export interface Column {
+  readonly x: number;
+  readonly width: number;
+}
+
 /** Pages with the same head and foot, filled from the top down. */
 export class Pages {
   readonly document: PDFKit.PDFDocument;
   /** Where the next thing stands. */
   y = 0;
+  private column: Column | null = null;
 
   constructor(private readonly frame: Frame) {
     this.document = new PDFDocument({
@@ -48,19 +55,34 @@ export class Pages {
   }
 
   get left(): number {
-    return margin;
+    return this.column?.x ?? margin;
   }
   get width(): number {
-    return this.document.page.width - 2 * margin;
+    return this.column?.width ?? this.document.page.width - 2 * margin;
   }
   get bottom(): number {
     return this.document.page.height - margin - footHeight;
   }
 
   next(): void {
+    const { column } = this;
+    this.column = null;
     this.document.addPage();
     this.head();
+    this.column = column;
     this.y = margin + headHeight + gap;
+  }
+
+  /** Pages of the same size on which something can be drawn to see how high it is. They are thrown away. */
+  trial(): Pages {
+    return new Pages(this.frame);
+  }
+
+  /** Fills a column from the present place down, as if it were the page. */
+  within(column: Column, fill: () => void): void {
+    this.column = column;
+    fill();
+    this.column = null;
   }
 
   /** Begins a new page when less than `height` is left. */

@@ -28,18 +28,30 @@ interface Place {
 export const cellSize = 8.5;
 export const cellPad = 8;
 
-/** A table of ruled rows at the pages' present place; its head is repeated on a new page. */
-export function table(pages: Pages, columns: readonly Column[], rows: readonly Row[], within?: Place): void {
+/** Points over and under what stands in a row. */
+const usualPad = 3;
+
+/**
+ * A table of ruled rows at the pages' present place; its head is repeated on a new page. `pad` is what stands free
+ * over and under the words of a row, in points.
+ */
+export function table(
+  pages: Pages,
+  columns: readonly Column[],
+  rows: readonly Row[],
+  within?: Place,
+  pad = usualPad,
+): void {
   const area = within ?? { x: pages.left, width: pages.width };
   const places = placesOf(columns, area);
   head(pages, columns, places, area);
   for (const row of rows) {
-    const height = heightOf(pages, row, columns, places, area);
+    const height = heightOf(pages, row, columns, places, area) + 2 * pad;
     if (pages.y + height > pages.bottom) {
       pages.next();
       head(pages, columns, places, area);
     }
-    drawRow(pages, row, columns, places);
+    drawRow(pages, row, columns, places, pad);
     pages.y += height;
     pages.rule(pages.y - 1, 0.35, area.x, area.width);
   }
@@ -95,10 +107,16 @@ function heightOf(
     (sum, words) => sum + pages.heightOf(words, underWidth - cellPad, 'text', 8) + 1,
     0,
   );
-  return Math.max(11, ...heights) + under + 6;
+  return Math.max(11, ...heights) + under;
 }
 
-function drawRow(pages: Pages, row: Row, columns: readonly Column[], places: readonly Place[]): void {
+function drawRow(
+  pages: Pages,
+  row: Row,
+  columns: readonly Column[],
+  places: readonly Place[],
+  pad: number,
+): void {
   let lowest = 0;
   row.cells.forEach((cell, index) => {
     const place = places[index];
@@ -107,13 +125,18 @@ function drawRow(pages: Pages, row: Row, columns: readonly Column[], places: rea
     if (typeof cell === 'string') {
       lowest = Math.max(
         lowest,
-        pages.text(cell, place.x, pages.y + 3, { font, size: cellSize, width: place.width - cellPad, align }),
+        pages.text(cell, place.x, pages.y + pad, {
+          font,
+          size: cellSize,
+          width: place.width - cellPad,
+          align,
+        }),
       );
     } else {
-      verdict(pages, cell.sign, place.x, pages.y + 2.5);
+      verdict(pages, cell.sign, place.x, pages.y + pad - 0.5);
     }
   });
-  let y = pages.y + 3 + Math.max(11, lowest);
+  let y = pages.y + pad + Math.max(11, lowest);
   const from = places[1];
   const to = places.at(-1);
   if (!from || !to) return;

@@ -1,4 +1,5 @@
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
+import { pagesOf } from '../paper/testing/pages-of.js';
 import { startTestApp, type TestApp } from '../testing/test-app.js';
 import { signedInClient, type TestClient } from '../testing/test-client.js';
 import { openWorkshop, type Workshop } from '../testing/workshop.js';
@@ -35,6 +36,14 @@ describe('a kept working', () => {
     const { body } = await clients.imogen.get(`${path}/${keptId}`).expect(200);
     const kept = { ...figure, id: keptId, carId: workshop.cars.ravis, keptBy: 'Tomasz Brandt' };
     expect(body).toEqual({ ...kept, keptAt: expect.stringMatching(/^\d{4}-\d\d-\d\dT/) });
+  });
+
+  it('keeps what it was begun from, and is named by it on paper', async () => {
+    const begun = { ...figure, typed: { ...figure.typed, of: 'AT18, edition 2: head nuts' } };
+    const { body } = await clients.tomasz.post(path, begun).expect(201);
+    expect(body.typed).toEqual(begun.typed);
+    const { headers } = await clients.ravi.get(`${path}/${body.id}/pdf`).expect(200);
+    expect(headers['content-disposition']).toBe('inline; filename="convert-at18-head-nuts-LM-C01.pdf"');
   });
 
   it('stands in the list of its car, the newest first, a page at a time', async () => {
@@ -79,6 +88,12 @@ describe('a kept working', () => {
     ['a number for a text', { ...figure, typed: { figure: 27 } }, 'typed.figure'],
     ['too many names', { ...figure, typed: many }, 'typed'],
     ['too much', { ...figure, typed: { figure: `27 lbf·ft${' '.repeat(20_000)}` } }, 'typed'],
+    [
+      'too long a thing to begin from',
+      { ...figure, typed: { ...figure.typed, of: 'x'.repeat(121) } },
+      'typed.of',
+    ],
+    ['two lines to begin from', { ...figure, typed: { ...figure.typed, of: 'AT18\nhead nuts' } }, 'typed.of'],
     ['a field more', { ...figure, keptBy: 'Nell' }, 'keptBy'],
   ])('is not made of %s', async (_case, body, field) => {
     const answer = await clients.tomasz.post(path, body).expect(400);
@@ -134,7 +149,17 @@ describe('a working on paper', () => {
     expect(again.body.equals(answer.body)).toBe(true);
   });
 
+  it('says what it was begun from and who worked it out, in its words and its name', async () => {
+    const answer = await clients.ravi.get(`${address}&of=AT18,%20edition%202:%20head%20nuts`).expect(200);
+    expect(answer.headers['content-disposition']).toBe('inline; filename="convert-at18-head-nuts.pdf"');
+    const [page] = await pagesOf(answer.body);
+    expect(page).toContain('AT18, edition 2: head nuts');
+    expect(page).toContain('Worked out by Ravi Lindqvist');
+  });
+
   it.each([
+    [`${address}&of=${'x'.repeat(121)}`, 400, 'of'],
+    [`${address}&of=%00`, 400, 'of'],
     ['/workings/gearbox/pdf', 404, undefined],
     ['/workings/convert/pdf', 400, ''],
     ['/workings/convert/pdf?figure=27', 400, 'figure'],

@@ -1,12 +1,13 @@
 import type { CarSummary } from '@second-spanner/shared/contracts/car-files';
 import type { KeptWorking } from '@second-spanner/shared/contracts/kept-workings';
-import type { Working, WorkingCase } from '@second-spanner/shared/workings/working';
+import { begunFrom, type Working, type WorkingCase } from '@second-spanner/shared/workings/working';
 import { typedLines } from '@second-spanner/shared/workings/working-text';
 import { HttpProblem, notFound, refusedByRules } from '../platform/errors/http-problem.js';
 import type { SignedIn } from '../platform/signing-in/signed-in.js';
 import { parsePaper } from '../paper/paper-size.js';
 import type { Print } from '../printing/print-task.js';
 import type { KeptWorkingsService } from './kept-workings.service.js';
+import { fileName } from './file-name.js';
 import type { WorkingPaper } from './paper/working-paper.js';
 import { readTyped } from './read-typed.js';
 import { loadWorking, workOut } from './work-out.js';
@@ -63,17 +64,20 @@ export class WorkingPrints {
     const size = parsePaper(toPrint.paper);
     const dialect = person.dialect ?? shop.dialect;
     const { parts, assumed, cautions, basis } = workOut(working, typed, dialect, toPrint.path);
+    // What it was begun from stands over the page, and not among what was typed.
+    const { [begunFrom]: of = '', ...fields } = typed;
     const paper: WorkingPaper = {
-      ...{ title: working.title, asks: working.asks, typed: typedLines(working, typed) },
+      ...{ title: working.title, asks: working.asks, typed: typedLines(working, fields), begunFrom: of },
       ...{ parts, assumed, cautions, basis, date, dialect, paper: size },
       ...{ shopName: shop.name, demo: shop.demo, address: this.addressOf(working, typed) },
+      workedOutBy: kept?.kept.keptBy ?? person.name,
       kept: kept && {
-        ...{ title: kept.kept.title, keptBy: kept.kept.keptBy, keptAt: kept.kept.keptAt },
+        ...{ title: kept.kept.title, keptAt: kept.kept.keptAt },
         ...{ carCode: kept.car.code, carName: kept.car.name },
       },
     };
-    const code = kept ? `-${kept.car.code.replaceAll(/[^A-Za-z0-9-]/g, '_')}` : '';
-    return { name: `${working.key}${code}.pdf`, pdf: await this.toPdf({ kind: 'working', paper }) };
+    const name = fileName(working.key, of, kept?.car.code);
+    return { name, pdf: await this.toPdf({ kind: 'working', paper }) };
   }
 
   /** Where the same case opens again. */

@@ -1,135 +1,129 @@
-import type { Drawing } from '@second-spanner/shared/drawing/shapes';
-import { drawSign, signWords } from '@second-spanner/shared/drawing/signs';
 import type { AnswerPart } from '@second-spanner/shared/workings/working';
-import { draw, heightOf } from '../../paper/draw.js';
 import type { Pages } from '../../paper/page.js';
 import { table } from '../../paper/table.js';
-import { columnsFor } from './columns.js';
+import { columnsFor, leastWidth } from './columns.js';
+import { besideWidth, drawBeside, drawSmall, type Block } from './drawn.js';
+import { drawFacts } from './facts.js';
+import { drawJudgement } from './judgement.js';
+import { saidAlready } from './said-already.js';
 
 type Part<Kind extends AnswerPart['kind']> = Extract<AnswerPart, { kind: Kind }>;
 /** A text in the trade words of whom it is for. */
 export type Say = (text: string) => string;
 
-/** Points that a unit of a drawing takes: its smallest words can still be read. */
-const drawingScale = 0.68;
-const highest = 400;
+/** The parts of an answer, below what stands. */
+export function drawParts(pages: Pages, parts: readonly AnswerPart[], say: Say): void {
+  for (let at = 0; at < parts.length; at += 1) {
+    const part = parts[at];
+    if (part?.kind === 'drawing') at += drawing(pages, part, { all: parts, after: parts.slice(at + 1) }, say);
+    else if (part) drawPart(pages, part, say);
+  }
+}
 
-/** One part of an answer, below what stands. */
-export function drawPart(pages: Pages, part: AnswerPart, say: Say): void {
+interface Among {
+  readonly all: readonly AnswerPart[];
+  readonly after: readonly AnswerPart[];
+}
+
+/** A drawing with its table and what else has room beside it; gives back how many parts those are. */
+function drawing(pages: Pages, part: Part<'drawing'>, { all, after }: Among, say: Say): number {
+  const own = tableOf(part, all, say);
+  const isWide = (one: AnswerPart): boolean => {
+    const shown =
+      one.kind === 'drawing' ? tableOf(one, all, say) : one.kind === 'table' ? inWords(one, say) : null;
+    return shown !== null && !fitsBeside(pages, shown);
+  };
+  const end = after.findIndex(isWide);
+  const beside = after.slice(0, end < 0 ? after.length : end).map(
+    (one): Block =>
+      (on) =>
+        drawInColumn(on, one, all, say),
+  );
+  const shown = { drawing: part.drawing, caption: say(part.caption) };
+  const blocks = own === null ? [] : [(on: Pages) => drawTable(on, own)];
+  if (own === null || fitsBeside(pages, own)) return drawBeside(pages, shown, blocks, beside);
+  const count = drawBeside(pages, shown, [], beside);
+  drawTable(pages, own);
+  return count;
+}
+
+function drawInColumn(pages: Pages, part: AnswerPart, all: readonly AnswerPart[], say: Say): void {
+  if (part.kind !== 'drawing') {
+    drawPart(pages, part, say);
+    return;
+  }
+  const own = tableOf(part, all, say);
+  const blocks = own === null ? [] : [(on: Pages) => drawTable(on, own)];
+  drawSmall(pages, { drawing: part.drawing, caption: say(part.caption) }, blocks);
+}
+
+/** The table of a drawing; null where other parts say the same. */
+function tableOf({ drawing }: Part<'drawing'>, all: readonly AnswerPart[], say: Say): TableWords | null {
+  const { columns, rows } = drawing.table;
+  if (rows.length === 0 || saidAlready(drawing.table, all)) return null;
+  return inWords({ columns: columns.map((name) => ({ name })), rows }, say);
+}
+
+function drawPart(pages: Pages, part: Exclude<AnswerPart, { kind: 'drawing' }>, say: Say): void {
   switch (part.kind) {
     case 'judgement':
-      judgement(pages, part, say);
+      drawJudgement(pages, part, say);
       return;
     case 'facts':
       facts(pages, part, say);
       return;
     case 'table':
       heading(pages, say(part.heading));
-      tableOf(pages, part.columns, part.rows, say);
+      drawTable(pages, inWords(part, say));
       return;
     case 'steps':
       steps(pages, part, say);
-      return;
-    case 'drawing':
-      drawing(pages, part.drawing, say(part.caption), say);
   }
 }
 
 /** A heading that never stands alone at the foot of a page. */
 export function heading(pages: Pages, words: string): void {
-  pages.need(58);
-  pages.y += 6;
-  pages.y += pages.text(words, pages.left, pages.y, { font: 'text-strong', size: 11 }) + 4;
-}
-
-function judgement(pages: Pages, { of, verdict, reason }: Part<'judgement'>, say: Say): void {
-  const words = say(reason);
-  const indent = 92;
-  const width = pages.width - indent;
-  const about = of === undefined ? '' : say(of);
-  const high = (about === '' ? 0 : 14) + pages.heightOf(words, width, 'text', 10.5);
-  pages.need(high + 16);
-  pages.y += 5;
-  draw(pages.document, drawSign(verdict), pages.left, pages.y - 1, 16);
-  pages.text(signWords[verdict], pages.left + 21, pages.y, { font: 'text-strong', size: 11, width: 70 });
-  let y = pages.y;
-  if (about !== '')
-    y += pages.text(about, pages.left + indent, y, { font: 'text-medium', size: 10.5, width });
-  y += pages.text(words, pages.left + indent, y, { size: 10.5, width });
-  pages.y = y + 7;
-  pages.rule(pages.y - 3, 0.35);
+  pages.need(44);
+  pages.y += 4;
+  pages.y += pages.text(words, pages.left, pages.y, { font: 'text-strong', size: 10 }) + 2;
 }
 
 function facts(pages: Pages, part: Part<'facts'>, say: Say): void {
-  if (part.heading === undefined) pages.y += 6;
+  if (part.heading === undefined) pages.y += 5;
   else heading(pages, say(part.heading));
-  for (const { name, value, note } of part.facts) {
-    const [left, right] = [190, pages.width - 198];
-    const noted = note === undefined ? '' : say(note);
-    const high = Math.max(
-      pages.heightOf(say(name), left, 'text', 9.5),
-      pages.heightOf(say(value), right, 'figures', 9.5) +
-        (noted === '' ? 0 : pages.heightOf(noted, right, 'text', 8)),
-    );
-    pages.need(high + 6);
-    pages.text(say(name), pages.left, pages.y, { size: 9.5, width: left });
-    const below = pages.text(say(value), pages.left + 198, pages.y, {
-      font: 'figures',
-      size: 9.5,
-      width: right,
-    });
-    if (noted !== '') {
-      pages.text(noted, pages.left + 198, pages.y + below, { size: 8, width: right, colour: '#404040' });
-    }
-    pages.y += high + 3;
-    pages.rule(pages.y - 1, 0.35);
-  }
-  pages.y += 4;
+  drawFacts(
+    pages,
+    part.facts.map(({ name, value, note }) => ({
+      ...{ name: say(name), value: say(value) },
+      ...(note !== undefined && { note: say(note) }),
+    })),
+  );
 }
 
-/** Columns in trade words, as wide as they need. */
-export function tableOf(
-  pages: Pages,
-  columns: Part<'table'>['columns'],
-  rows: readonly (readonly string[])[],
-  say: Say,
-): void {
-  const named = columns.map((column) => ({ ...column, name: say(column.name) }));
-  const cells = rows.map((row) => row.map(say));
-  table(
-    pages,
-    columnsFor(pages, named, cells),
-    cells.map((row) => ({ cells: row })),
-  );
+type TableWords = Pick<Part<'table'>, 'columns' | 'rows'>;
+
+const inWords = ({ columns, rows }: TableWords, say: Say): TableWords => ({
+  columns: columns.map((column) => ({ ...column, name: say(column.name) })),
+  rows: rows.map((row) => row.map(say)),
+});
+
+const fitsBeside = (pages: Pages, { columns, rows }: TableWords): boolean =>
+  leastWidth(pages, columns, rows) <= besideWidth(pages);
+
+/** Ruled rows close to each other. */
+function drawTable(pages: Pages, { columns, rows }: TableWords): void {
+  const cells = rows.map((row) => ({ cells: row }));
+  table(pages, columnsFor(pages, columns, rows), cells, undefined, 1.5);
 }
 
 function steps(pages: Pages, part: Part<'steps'>, say: Say): void {
   heading(pages, say(part.heading));
   part.steps.forEach((step, index) => {
-    const width = pages.width - 26;
+    const width = pages.width - 22;
     const words = say(step);
-    pages.need(pages.heightOf(words, width, 'text', 9.5) + 4);
-    pages.text(`${index + 1}.`, pages.left, pages.y, { font: 'figures', size: 9.5, width: 22 });
-    pages.y += pages.text(words, pages.left + 26, pages.y, { size: 9.5, width }) + 3;
+    pages.need(pages.heightOf(words, width, 'text', 9) + 3);
+    pages.text(`${index + 1}.`, pages.left, pages.y, { font: 'figures', size: 9, width: 20 });
+    pages.y += pages.text(words, pages.left + 22, pages.y, { size: 9, width }) + 2;
   });
-  pages.y += 3;
-}
-
-function drawing(pages: Pages, shown: Drawing, caption: string, say: Say): void {
-  const fits = Math.min(pages.width, shown.width * drawingScale);
-  const width = Math.min(fits, (fits * highest) / heightOf(shown, fits));
-  const height = heightOf(shown, width);
-  const { columns, rows } = shown.table;
-  pages.need(height + (rows.length === 0 ? 30 : 80));
-  pages.y += 6;
-  draw(pages.document, shown, pages.left, pages.y, width);
-  pages.y += height + 4;
-  pages.paragraph(caption, { font: 'text-medium', size: 9 });
-  if (rows.length === 0) return;
-  tableOf(
-    pages,
-    columns.map((name) => ({ name })),
-    rows,
-    say,
-  );
+  pages.y += 2;
 }

@@ -16,10 +16,13 @@ export interface WorkingPaper extends Pick<WorkingAnswer, 'parts' | 'assumed' | 
   readonly demo: boolean;
   readonly dialect: Dialect;
   readonly paper: Paper;
-  /** The car that it was kept with, what it was called there, and by whom. */
+  /** Who worked it out, or kept it. */
+  readonly workedOutBy: string;
+  /** What the case was begun from; empty when it was begun from nothing. */
+  readonly begunFrom: string;
+  /** The car that it was kept with, and what it was called there. */
   readonly kept: {
     readonly title: string;
-    readonly keptBy: string;
     readonly keptAt: string;
     readonly carCode: string;
     readonly carName: string;
