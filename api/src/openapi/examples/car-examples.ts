@@ -15,7 +15,8 @@ export const carFile: CarFile = {
 };
 
 export const keepWorking: KeepWorkingRequest = {
-  ...{ working: 'convert', title: 'Main caps, from the American sheet', typed: { figure: '27 lbf·ft' } },
+  ...{ working: 'convert', title: 'Main caps, from the American sheet' },
+  typed: { of: 'AT18, edition 2: main caps', figure: '27 lbf·ft' },
 };
 
 export const keptWorking: KeptWorking = {

@@ -31,7 +31,7 @@ export const carOperations: readonly Operation[] = [
     ...{ method: 'post', path: '/cars/{carId}/workings', tag: 'Workings', who: 'workings.keep' },
     summary: 'Keep a working with a car. It stays as it is kept.',
     description:
-      '`typed` has a text for each field that was filled in; a case that cannot be worked out is not kept.',
+      '`typed` has a text for each field that was filled in, and in `of`, where it was begun from something, a line of at most 120 characters that says what; a case that cannot be worked out is not kept.',
     body: contract('KeepWorkingRequest', keepWorking),
     answers: { 201: { description: 'The kept working.', content: contract('KeptWorking', keptWorking) } },
   },
@@ -49,10 +49,11 @@ export const carOperations: readonly Operation[] = [
   },
   {
     ...{ method: 'get', path: '/workings/{key}/pdf', tag: 'Workings', who: 'calculate', query: [paper] },
-    summary: 'A working without a sheet, on paper.',
+    summary: 'A working without a sheet, on paper, in the name of who asks.',
     freeQuery: {
-      description: 'What was typed: a text for each field of the working, by its name.',
-      example: { figure: '27 lbf·ft' },
+      description:
+        'What was typed: a text for each field of the working, by its name; in `of` what it was begun from, a line of at most 120 characters.',
+      example: { figure: '27 lbf·ft', of: 'AT18, edition 2: head nuts' },
     },
     answers: { 200: { description: 'The pages.', content: pdf } },
   },
