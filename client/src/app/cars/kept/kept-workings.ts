@@ -12,6 +12,7 @@ import { ProblemLine } from '../../states/problem-line';
 import { When } from '../../words/dates';
 import { TradeWords } from '../../words/trade-words';
 import { placeOf } from '../../workings/groups';
+import { keptQuery } from '../../workings/kept-case';
 import { WorkingsApi } from '../../workings/workings-api';
 
 /** The workings that are kept with a car; each opens with what was typed, and can be had as a PDF. */
@@ -37,6 +38,7 @@ export class KeptWorkings {
       return { kept, place: entry === undefined ? null : placeOf(entry), what: entry?.title ?? kept.working };
     }),
   );
+  protected readonly query = keptQuery;
   protected readonly making = new Saving();
 
   protected async makePdf(kept: KeptWorking): Promise<void> {

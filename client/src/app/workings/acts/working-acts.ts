@@ -1,7 +1,16 @@
 import { DOCUMENT } from '@angular/common';
-import { ChangeDetectionStrategy, Component, effect, inject, input, signal, untracked } from '@angular/core';
+import {
+  ChangeDetectionStrategy,
+  Component,
+  computed,
+  effect,
+  inject,
+  input,
+  signal,
+  untracked,
+} from '@angular/core';
 import { MatButton } from '@angular/material/button';
-import type { WorkingCase } from '@second-spanner/shared/workings/working';
+import { begunFrom, type WorkingCase } from '@second-spanner/shared/workings/working';
 import { saveFile } from '../../http/save-file';
 import { SessionStore } from '../../session/session-store';
 import { Saving } from '../../sheets/saving/save-state';
@@ -29,6 +38,11 @@ export class WorkingActs {
   /** The whole answer as plain text, made when it is asked for. */
   readonly text = input.required<() => string>();
 
+  /** The name that a kept copy is offered. */
+  protected readonly keptTitle = computed(() => {
+    const begun = this.typed()[begunFrom] ?? '';
+    return begun === '' ? this.title() : `${this.title()}, ${begun}`;
+  });
   protected readonly copied = signal<'yes' | 'by-hand' | null>(null);
   protected readonly paper = signal<Paper>('a4');
   protected readonly reading = new Saving();

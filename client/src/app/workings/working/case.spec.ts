@@ -29,6 +29,12 @@ describe('a case', () => {
     expect(onlyOwn(working, { a: '1', utm: 'x', toString: 'y' })).toEqual({ a: '1' });
   });
 
+  it('holds what it was begun from', () => {
+    expect(onlyOwn(working, { of: 'AT18, edition 2: head nuts' })).toEqual({
+      of: 'AT18, edition 2: head nuts',
+    });
+  });
+
   it('shows a field only where the rest of the case asks for it, and no empty section', () => {
     const names = (a: string) =>
       visibleSections(working, { a }).map(({ fields }) => fields.map(({ name }) => name));

@@ -1,13 +1,15 @@
-import type {
-  FieldSection,
-  Working,
-  WorkingAnswer,
-  WorkingCase,
+import {
+  begunFrom,
+  type FieldSection,
+  type Working,
+  type WorkingAnswer,
+  type WorkingCase,
 } from '@second-spanner/shared/workings/working';
 
-/** The texts of a case that the working has fields for; an address may hold anything. */
+/** The texts of a case that the working has fields for, and what it was begun from; an address may hold anything. */
 export function onlyOwn(working: Working, typed: WorkingCase): WorkingCase {
-  const names = new Set(working.sections.flatMap(({ fields }) => fields.map(({ name }) => name)));
+  const own = working.sections.flatMap(({ fields }) => fields.map(({ name }) => name));
+  const names = new Set([begunFrom, ...own]);
   return Object.fromEntries(Object.entries(typed).filter(([name]) => names.has(name)));
 }
 

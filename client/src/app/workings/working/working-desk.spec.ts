@@ -88,6 +88,35 @@ describe('a working’s page', () => {
     expect(field().value).toBe('');
   });
 
+  it('says what its case was begun from, also to a changed case, until it is begun again', async () => {
+    await open('/workings/convert/convert?figure=1%20in&of=AT18%2C%20edition%202%3A%20Head%20nuts');
+    expect(words('ss-title-block')).toContain('AT18, edition 2: Head nuts');
+    await type('2 in');
+    expect(words('ss-title-block')).toContain('AT18, edition 2: Head nuts');
+    await press('Begin again, empty');
+    expect(words('ss-title-block')).not.toContain('AT18');
+  });
+
+  it('opens a kept case with its name and a link to its car', async () => {
+    const api = TestBed.inject(HttpTestingController);
+    const reply = async (url: string, body: object): Promise<void> =>
+      expect
+        .poll(() => {
+          const [request] = api.match(url);
+          request?.flush(body);
+          return request;
+        })
+        .toBeDefined();
+    const opened = open('/workings/convert/convert?figure=1%20in&kept=c1,k1');
+    await reply('/api/cars/c1', { id: 'c1', name: 'Aldwyn Tern 1.8' });
+    await reply('/api/cars/c1/workings', { items: [{ id: 'k1', title: 'Sump, an inch' }] });
+    await opened;
+    expect(words('ss-title-block')).toContain('Sump, an inch');
+    expect(page.querySelector('ss-title-block ss-cell a')?.getAttribute('href')).toBe('/cars/c1');
+    await type('2 in');
+    await expect.poll(() => words('ss-title-block')).not.toContain('Sump, an inch');
+  });
+
   it('is opened by its group’s address, which keeps the case', async () => {
     await open('/workings/convert?figure=1%20mm');
     expect(TestBed.inject(Router).url).toBe('/workings/convert/convert?figure=1%20mm');

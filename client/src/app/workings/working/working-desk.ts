@@ -8,9 +8,10 @@ import {
   input,
   signal,
 } from '@angular/core';
+import { RouterLink } from '@angular/router';
 import { tradeText } from '@second-spanner/shared/contracts/trade-words';
 import { typedLines, workingText } from '@second-spanner/shared/workings/working-text';
-import type { Working, WorkingCase } from '@second-spanner/shared/workings/working';
+import { begunFrom, type Working, type WorkingCase } from '@second-spanner/shared/workings/working';
 import { Cell } from '../../layout/cell';
 import { TitleBlock } from '../../layout/title-block';
 import { Sentence } from '../../quantity/sentence';
@@ -22,15 +23,17 @@ import { WorkingActs } from '../acts/working-acts';
 import { AnswerParts } from '../answer/answer-parts';
 import { Grounds } from '../answer/grounds';
 import { Judged } from '../answer/judged';
+import { judgementSign, judgementWord } from '../answer/judgement-words';
 import { NotYet } from '../answer/not-yet';
 import { Spoken } from '../answer/spoken';
 import { caseAddress } from '../case-address';
 import { GroupStrip } from '../group-strip';
 import { groupNames } from '../groups';
+import { keptCase } from '../kept-case';
 import { SpecEditions } from '../spec-editions';
 import { WorkingFieldControl } from './working-field';
 import { isSameCase, onlyOwn, strayErrors, visibleSections } from './case';
-import { WorkingStart, type StartCase } from './working-start';
+import { WorkingStart } from './working-start';
 
 /** A working as it is used: what is typed, what comes of it as one types, and what may be done with it. */
 @Component({
@@ -42,6 +45,7 @@ import { WorkingStart, type StartCase } from './working-start';
     GroupStrip,
     Judged,
     NotYet,
+    RouterLink,
     Sentence,
     Spoken,
     TitleBlock,
@@ -65,8 +69,7 @@ export class WorkingDesk {
 
   private readonly opened = signal<WorkingCase>({});
   private readonly address = caseAddress((typed) => this.opened.set(typed));
-  /** The spec or example that the fields were filled from. */
-  private readonly start = signal<StartCase | null>(null);
+  protected readonly kept = keptCase();
 
   protected readonly typed = computed(() => onlyOwn(this.working(), this.opened()));
   private readonly options = computed(() => ({ dialect: this.sessions.dialect() }));
@@ -109,6 +112,14 @@ export class WorkingDesk {
   protected readonly judgement = computed(() =>
     this.answer().parts.find((part) => part.kind === 'judgement'),
   );
+  protected readonly sign = judgementSign;
+  protected readonly word = judgementWord;
+  /** Where nothing is judged and nothing drawn, the first figure is the answer. */
+  protected readonly main = computed(() =>
+    this.judgement() === undefined && this.shapes().length === 0
+      ? (this.answer().parts.find(({ kind }) => kind === 'facts') ?? null)
+      : null,
+  );
   /** Whether anything stands beside what is large. */
   protected readonly isJudged = computed(
     () => this.answer().cautions.length > 0 || this.beside().length > 0 || this.judgement() !== undefined,
@@ -119,10 +130,11 @@ export class WorkingDesk {
   protected readonly group = computed(() => groupNames[this.working().group]);
   protected readonly title = computed(() => this.say(this.working().title));
   protected readonly person = computed(() => this.sessions.person()?.name ?? '');
-  /** Where the case comes from, as long as it is still as it came. */
+  /** What the case was begun from; of the example it is said as long as nothing is changed. */
   protected readonly origin = computed(() => {
-    const start = this.start();
-    return start !== null && isSameCase(start.typed, this.typed()) ? start.from : null;
+    const begun = this.typed()[begunFrom] ?? '';
+    if (begun !== '') return begun;
+    return isSameCase(this.working().example.typed, this.typed()) ? 'the example' : null;
   });
   protected readonly lines = computed(() => typedLines(this.working(), this.typed()));
   protected readonly workedOut = computed(() => {
@@ -139,9 +151,8 @@ export class WorkingDesk {
     this.show({ ...this.typed(), [name]: text });
   }
 
-  protected begin(start: StartCase): void {
-    this.start.set(start);
-    this.show(start.typed);
+  protected begin(typed: WorkingCase): void {
+    this.show(typed);
   }
 
   protected goToAnswer(): void {

@@ -1,42 +1,60 @@
-import { ChangeDetectionStrategy, Component, computed, inject, input, output, signal } from '@angular/core';
+import {
+  ChangeDetectionStrategy,
+  Component,
+  computed,
+  effect,
+  inject,
+  input,
+  output,
+  signal,
+  untracked,
+} from '@angular/core';
+import { rxResource } from '@angular/core/rxjs-interop';
 import { MatButton } from '@angular/material/button';
-import type { Working, WorkingCase } from '@second-spanner/shared/workings/working';
+import { tradeText } from '@second-spanner/shared/contracts/trade-words';
+import { begunFrom, type Working, type WorkingCase } from '@second-spanner/shared/workings/working';
+import { map } from 'rxjs';
 import { ChosenField, type Choice } from '../../fields/chosen-field';
-import { toApiProblem, type ApiProblem } from '../../http/api-problem';
 import { Sentence } from '../../quantity/sentence';
+import { SessionStore } from '../../session/session-store';
 import { LoadState } from '../../states/load-state';
-import { ProblemLine } from '../../states/problem-line';
+import { isBegun, readBegun, sayBegun } from '../begun-from';
 import { SpecEditions } from '../spec-editions';
-
-/** A case to begin with, and where it comes from. */
-export interface StartCase {
-  readonly typed: WorkingCase;
-  /** Null for nothing typed at all. */
-  readonly from: string | null;
-}
 
 const nothing = '';
 
 /** What the fields can begin with: an engine of the spec book, the worked example, or nothing. */
 @Component({
   selector: 'ss-working-start',
-  imports: [ChosenField, LoadState, MatButton, ProblemLine, Sentence],
+  imports: [ChosenField, LoadState, MatButton, Sentence],
   changeDetection: ChangeDetectionStrategy.OnPush,
   templateUrl: './working-start.html',
   styleUrl: './working-start.scss',
 })
 export class WorkingStart {
+  private readonly dialect = inject(SessionStore).dialect;
   protected readonly editions = inject(SpecEditions);
 
   readonly working = input.required<Working>();
   readonly typed = input.required<WorkingCase>();
-  readonly begun = output<StartCase>();
+  readonly begun = output<WorkingCase>();
 
-  protected readonly edition = signal(nothing);
-  protected readonly problem = signal<ApiProblem | null>(null);
-  protected readonly cases = signal<readonly { readonly name: string; readonly start: StartCase }[]>([]);
-  protected readonly chosenCase = signal(nothing);
-  protected readonly isRead = signal(false);
+  /** An edition that was chosen, of whose cases none has been begun yet. */
+  private readonly picked = signal<string | null>(null);
+  private readonly begunOf = computed(() => readBegun(this.typed()[begunFrom] ?? ''));
+  protected readonly edition = computed(() => this.picked() ?? this.begunOf()?.edition ?? nothing);
+  protected readonly cases = rxResource({
+    params: () => (this.fromSpec() && this.editions.has(this.edition()) ? this.edition() : undefined),
+    stream: ({ params }) =>
+      this.editions.read(params).pipe(map(({ document }) => this.working().fromSpec?.(document) ?? [])),
+  });
+  protected readonly given = computed(() => (this.cases.hasValue() ? this.cases.value() : []));
+  protected readonly chosenCase = computed(() => {
+    const begun = this.begunOf();
+    if (begun?.edition !== this.edition()) return nothing;
+    const at = this.given().findIndex(({ name }) => isBegun(begun, name));
+    return at < 0 ? nothing : String(at);
+  });
 
   protected readonly fromSpec = computed(
     () => this.editions.mayRead && this.working().fromSpec !== undefined,
@@ -45,55 +63,46 @@ export class WorkingStart {
     { value: nothing, words: 'typed in' },
     ...this.editions
       .all()
-      .filter(({ state }) => state === 'approved')
+      .filter(({ state, value }) => state === 'approved' || value === this.edition())
       .map(({ value, words }) => ({ value, words })),
   ]);
   protected readonly caseChoices = computed<readonly Choice[]>(() => [
     ...(this.chosenCase() === nothing ? [{ value: nothing, words: 'choose…' }] : []),
-    ...this.cases().map(({ name }, i) => ({ value: String(i), words: name })),
+    ...this.given().map(({ name }, i) => ({ value: String(i), words: name })),
   ]);
   protected readonly isBlank = computed(() => Object.values(this.typed()).every((text) => text === ''));
 
-  protected chooseEdition(name: string): void {
-    this.edition.set(name);
-    this.cases.set([]);
-    this.chosenCase.set(nothing);
-    this.problem.set(null);
-    this.isRead.set(false);
-    const [code = '', edition = ''] = name.split(',');
-    this.editions.read(name).subscribe({
-      next: ({ document }) => {
-        this.isRead.set(true);
-        const given = this.working().fromSpec?.(document) ?? [];
-        this.cases.set(
-          given.map(({ name, typed }) => ({ name, start: { typed, from: `${code}, edition ${edition}` } })),
-        );
-        if (given.length === 1) this.chooseCase('0');
-      },
-      error: (error: unknown) => this.problem.set(toApiProblem(error)),
+  constructor() {
+    // An edition with one case alone leaves nothing to choose.
+    effect(() => {
+      const given = this.given();
+      if (this.picked() !== null && given.length === 1) untracked(() => this.chooseCase('0'));
     });
   }
 
+  protected chooseEdition(name: string): void {
+    this.picked.set(name === nothing ? null : name);
+    if (name === nothing) this.begun.emit({ ...this.typed(), [begunFrom]: '' });
+  }
+
   protected chooseCase(at: string): void {
-    const chosen = this.cases()[Number(at)];
+    const chosen = this.given()[Number(at)];
     if (chosen === undefined) return;
-    this.chosenCase.set(at);
-    this.begun.emit(chosen.start);
+    const name = tradeText(chosen.name, this.dialect());
+    this.begun.emit({ ...chosen.typed, [begunFrom]: sayBegun(this.edition(), name) });
+    this.picked.set(null);
   }
 
   protected tryExample(): void {
-    this.forget();
-    this.begun.emit({ typed: this.working().example.typed, from: 'the example' });
+    this.start(this.working().example.typed);
   }
 
   protected clear(): void {
-    this.forget();
-    this.begun.emit({ typed: {}, from: null });
+    this.start({});
   }
 
-  private forget(): void {
-    this.edition.set(nothing);
-    this.cases.set([]);
-    this.chosenCase.set(nothing);
+  private start(typed: WorkingCase): void {
+    this.picked.set(null);
+    this.begun.emit(typed);
   }
 }
