@@ -2,6 +2,7 @@ import { DOCUMENT, NgComponentOutlet, NgTemplateOutlet } from '@angular/common';
 import { ChangeDetectionStrategy, Component, computed, inject, signal } from '@angular/core';
 import { rxResource } from '@angular/core/rxjs-interop';
 import { MatButton } from '@angular/material/button';
+import { RouterLink } from '@angular/router';
 import { rotorWords } from '@second-spanner/shared/workings/wiring-map/fact-words';
 import { fromQuery, toCase } from '@second-spanner/shared/workings/wiring-map/query';
 import { workOut } from '@second-spanner/shared/workings/wiring-map/work-out';
@@ -26,6 +27,8 @@ import { printMoment } from '../words/dates';
 import { TradeWords } from '../words/trade-words';
 import { WorkingActs } from '../workings/acts/working-acts';
 import { caseAddress } from '../workings/case-address';
+import { keptCase } from '../workings/kept-case';
+import { isSameCase } from '../workings/working/case';
 import { GroupStrip } from '../workings/group-strip';
 import { editionName, SpecEditions } from '../workings/spec-editions';
 import { EngineFacts } from './answer/engine-facts';
@@ -58,6 +61,7 @@ const loadStrip: LoadPart = async () => (await import('./answer/strip-figure')).
     NgComponentOutlet,
     NgTemplateOutlet,
     ProblemLine,
+    RouterLink,
     TitleBlock,
     TradeWords,
     VerdictLine,
@@ -74,6 +78,7 @@ export class WiringPage {
   protected readonly engines = inject(SpecEngines);
   protected readonly isDesk = inject(Wide).isDesk;
 
+  protected readonly kept = keptCase();
   protected readonly form = signal<WiringForm>(blankForm);
   /** The engine's fields stand open until there is a map, and when they are asked for. */
   protected readonly engineOpen = signal(true);
@@ -125,6 +130,11 @@ export class WiringPage {
   private readonly hasDiagnosis = computed(() => this.answer().diagnosis !== null);
   protected readonly strip = laterPart(() => (this.hasDiagnosis() ? loadStrip : undefined));
   protected readonly typed = computed(() => toCase(this.form()));
+  protected readonly isBlank = computed(() => isSameCase(toCase(blankForm), this.typed()));
+  /** The name that a kept copy is offered. */
+  protected readonly keptTitle = computed(() =>
+    this.spec() === typedIn ? 'Wiring map' : `Wiring map, ${this.engineName()}`,
+  );
   protected readonly text = (): string => {
     const options = this.options();
     const answer = wiringMapWorking.workOut(this.typed(), options);
@@ -149,6 +159,12 @@ export class WiringPage {
       },
       error: (error: unknown) => this.problem.set(toApiProblem(error)),
     });
+  }
+
+  protected tryExample(): void {
+    const { typed } = wiringMapWorking.example;
+    this.engineOpen.set(false);
+    this.show(fromQuery((name) => typed[name] ?? null));
   }
 
   protected emptyFitted(): void {
