@@ -1,7 +1,7 @@
 import { describe, expect, it } from 'vitest';
 import { partsOf, unreadable, wordsOf } from './drawing-case.js';
 import { drawProofBand, type ProofBandPoint } from './proof-band.js';
-import type { CircleShape, LineShape } from './shapes.js';
+import { textWidth, type CircleShape, type LineShape } from './shapes.js';
 
 const point = (share: number, label = '27 lbf·ft'): ProofBandPoint => ({
   label,
@@ -26,6 +26,14 @@ describe('a clamp load on its band', () => {
     const { from, to } = partsOf(drawing, 'range')[0] as LineShape;
     expect(from.x).toBeCloseTo(low + (0.5 - 0.25) * perShare, 1);
     expect(to.x).toBeCloseTo(low + (0.65 / 0.7 - 0.25) * perShare, 1);
+  });
+
+  it('keeps the figure of a believable torque short of the line where doubt begins', () => {
+    const high = xOf(draw(point(0.75)), 'bound:high');
+    const figure = draw(point(0.75)).shapes.find(
+      (shape) => shape.kind === 'text' && shape.content === '75 %',
+    );
+    expect(figure?.kind === 'text' ? figure.at.x + textWidth(figure) : Infinity).toBeLessThan(high);
   });
 
   it('says the same in its table', () => {

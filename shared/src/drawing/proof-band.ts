@@ -1,5 +1,5 @@
 import { arrowHead, corners, hatching, round } from './geometry.js';
-import { circle, line, rect, text, textWidth, type Drawing, type Shape } from './shapes.js';
+import { circle, line, rect, text, textWidth, type Drawing, type Point, type Shape } from './shapes.js';
 import { wording, type DrawingOptions, type Wording } from './words.js';
 
 /** A clamp load as shares of the proof load: 0.75 is 75 %. */
@@ -54,7 +54,7 @@ export function drawProofBand(input: ProofBandInput, options?: DrawingOptions): 
         line(at(share), axis, at(share), axis + 4, 'thin'),
       ),
       ...bounds(input, axis, words),
-      ...points.flatMap((point, i) => pointShapes(point, i, percent)),
+      ...points.flatMap((point, i) => pointShapes(point, i, percent, input.most)),
       text(width / 2, axis + 38, `% of the proof load of ${input.of}`, { ink: 'ink-2', anchor: 'middle' }),
     ],
     table: {
@@ -101,6 +101,7 @@ function pointShapes(
   { label, share, low, high }: ProofBandPoint,
   index: number,
   percent: (share: number) => string,
+  most: number,
 ): readonly Shape[] {
   const y = 60 + index * 34;
   const isOff = share > end;
@@ -117,7 +118,7 @@ function pointShapes(
       ? [{ ...arrowHead({ x: right, y }, 90, ink, 9, 3.4), part: 'off-the-scale' }]
       : bar(at(low), at(high), y, pen, high > end)),
     dot,
-    ...labelShapes(label, percent(share), x, y - 11, ink),
+    ...labelShapes(label, percent(share), { x, y: y - 11 }, share < most ? at(most) : width, ink),
   ];
 }
 
@@ -136,18 +137,18 @@ function bar(
   ];
 }
 
-/** Torque and share side by side about the dot, kept inside the drawing. */
+/** Torque and share side by side about the dot, kept inside the drawing and short of `end`, a bound's line. */
 function labelShapes(
   word: string,
   figure: string,
-  x: number,
-  y: number,
+  { x, y }: Point,
+  end: number,
   ink: 'ink' | 'oxide',
 ): readonly Shape[] {
   const label = text(0, y, word, { anchor: 'end', halo: true, ink });
   const number = text(0, y, figure, { face: 'figures', weight: 600, halo: true, ink });
   const [before, after] = [textWidth(label), textWidth(number)];
-  const between = round(Math.min(Math.max(x + (before - after) / 2, before + 8), width - after - 8));
+  const between = round(Math.min(Math.max(x + (before - after) / 2, before + 8), end - after - 8));
   return [
     { ...label, at: { x: between - 3, y } },
     { ...number, at: { x: between + 3, y } },

@@ -3,8 +3,9 @@ import type { RingGap, RingGapRequest } from '../contracts/measuring.js';
 import type { Quantity } from '../contracts/quantity.js';
 import type { Judgement } from '../contracts/verdict.js';
 import { fromSi, intervalToSi, toSi } from '../quantities/convert.js';
-import { printNumber, printQuantity } from '../quantities/print.js';
+import { printNumber, printQuantity, roundInwards } from '../quantities/print.js';
 import { requireNumber, requireQuantity, requireRecord } from '../quantities/require.js';
+import { decimalsOf } from '../quantities/round.js';
 import { limitDecision } from './limit-decision.js';
 import {
   quantityIfGiven,
@@ -47,7 +48,7 @@ export function ringGap(request: RingGapRequest): RingGap {
       ? null
       : fromSi(Math.PI * toSi(bore) * (coefficient ?? greyIron) * 1e-6 * intervalToSi(hotter), gap.unit);
   const parts = [
-    ...judgeWanted(gap, wanted, uncertainty),
+    ...judgeWanted(gap, wanted, given['perBore'] !== undefined, uncertainty),
     ...(closesBy === null ? [] : [judgeClosing(gap, closesBy, uncertainty)]),
   ];
   return {
@@ -75,12 +76,32 @@ function readWanted(given: Readonly<Record<string, unknown>>, bore: Quantity, ga
   return { low: ofBore(low), ...(high === undefined ? {} : { high: ofBore(high) }) };
 }
 
-function judgeWanted(gap: Quantity, wanted: LimitsGiven, uncertainty?: Quantity): readonly Judgement[] {
+function judgeWanted(
+  gap: Quantity,
+  wanted: LimitsGiven,
+  isOfBore: boolean,
+  uncertainty?: Quantity,
+): readonly Judgement[] {
   if (wanted.low === undefined && wanted.high === undefined) return [];
   const plain = (limit: Quantity | undefined): Quantity | undefined =>
     limit && { ...limit, value: withoutNoise(limit.value) };
-  const limits = { low: plain(wanted.low), high: plain(wanted.high) };
+  const exact = { low: plain(wanted.low), high: plain(wanted.high) };
+  const limits = isOfBore ? readable(exact, gap) : exact;
   return [limitDecision({ value: gap, ...limits, uncertainty })];
+}
+
+/**
+ * Limits that were worked out, to a decimal more than the gap was read to and inwards: no reading can lie between
+ * such a limit and the exact one. As they are where that would leave nothing between them.
+ */
+function readable({ low, high }: LimitsGiven, gap: Quantity): LimitsGiven {
+  const digits = decimalsOf(gap.value) + 1;
+  const rounded = {
+    low: low && roundInwards(low, gap.unit, digits, 'low'),
+    high: high && roundInwards(high, gap.unit, digits, 'high'),
+  };
+  const isEmpty = rounded.low && rounded.high && rounded.low.value > rounded.high.value;
+  return isEmpty === true ? { low, high } : rounded;
 }
 
 function judgeClosing(gap: Quantity, closesBy: Quantity, uncertainty?: Quantity): Judgement {

@@ -252,3 +252,8 @@ describe('what may stay open or be written shortly', () => {
     expect(text).toMatch(/Assumed: Rule: /);
   });
 });
+
+it('a ring’s gap is judged in the figures that it was read in', () => {
+  // T7-004: at least 0.018 135 in, so that 0.019 in is 0.0008 in over it.
+  expect(textOf(ringGapWorking)).toMatch(/Pass: 0\.0190? in is 0\.000[89] in inside the limit of 0\.0182 in/);
+});
