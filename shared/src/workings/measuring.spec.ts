@@ -96,10 +96,10 @@ describe('every error stands at a field that is there', () => {
     [roundReadingsWorking, { readings: 'top|along|88 mm;top|along|88 mm' }, 'readings.1.height'],
     [roundReadingsWorking, { readings: 'top|along|0 mm' }, 'readings.0.value'],
     [roundReadingsWorking, { readings: 'top|along|88 N' }, 'readings.0.value'],
-    [roundReadingsWorking, { of: 'shell', splitAxis: 'upright' }, 'splitAxis'],
-    [roundReadingsWorking, { of: 'shell', splitAxis: 'along', judgedAxis: 'along' }, 'judgedAxis'],
+    [roundReadingsWorking, { part: 'shell', splitAxis: 'upright' }, 'splitAxis'],
+    [roundReadingsWorking, { part: 'shell', splitAxis: 'along', judgedAxis: 'along' }, 'judgedAxis'],
     [roundReadingsWorking, { low: '2 mm', high: '1 mm' }, 'low'],
-    [roundReadingsWorking, { of: 'hole' }, 'of'],
+    [roundReadingsWorking, { part: 'hole' }, 'part'],
     [runningClearanceWorking, { shaft: 'a|b|0 mm' }, 'shaft.0.value'],
     [runningClearanceWorking, { hole: 'a|b|1 mm;a|b|1 mm' }, 'hole.1.height'],
     [runningClearanceWorking, { splitAxis: 'slanting' }, 'splitAxis'],
@@ -204,7 +204,11 @@ describe('what is drawn and said', () => {
   });
 
   it('judges shells off the split, and not with the cap slack', () => {
-    const shells = { of: 'shell', readings: 'front|upright|50.04 mm;front|split|50.08 mm', high: '50.05 mm' };
+    const shells = {
+      part: 'shell',
+      readings: 'front|upright|50.04 mm;front|split|50.08 mm',
+      high: '50.05 mm',
+    };
     expect(verdictOf(of(roundReadingsWorking, { ...shells, splitAxis: 'split' }))).toBe('pass');
     expect(verdictOf(of(roundReadingsWorking, { ...shells, splitAxis: 'split', cap: 'slack' }))).toBe(
       'not-judged',

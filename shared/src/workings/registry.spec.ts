@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import { workingNamed, workings } from './registry.js';
-import { workingGroups } from './working.js';
+import { begunFrom, workingGroups } from './working.js';
 
 /** Loaded before anything is timed: one of them brings a parser of hundreds of modules. */
 const loaded = await Promise.all(
@@ -13,6 +13,11 @@ describe('the list of workings', () => {
     expect(new Set(keys).size).toBe(keys.length);
     const order = workings.map(({ group }) => workingGroups.indexOf(group));
     expect(order).toEqual([...order].sort((a, b) => a - b));
+  });
+
+  it('leaves the name of what a case was begun from to no field', () => {
+    const names = loaded.flatMap(({ working }) => working.sections.flatMap(({ fields }) => fields));
+    expect(names.filter(({ name }) => name === begunFrom)).toEqual([]);
   });
 
   it('finds a working by its key, and nothing for another', () => {

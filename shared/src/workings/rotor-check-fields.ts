@@ -26,7 +26,7 @@ export const rotorSections: readonly FieldSection[] = [
       ...firingFields,
       choice('turns', 'It turns', turns),
       choice('from', 'Seen', sides),
-      choice('of', 'That was read from', [
+      choice('readOn', 'That was read from', [
         { value: 'rotor', words: 'the rotor itself' },
         { value: 'armature', words: 'a magneto’s stamp: its armature' },
       ]),
@@ -35,7 +35,7 @@ export const rotorSections: readonly FieldSection[] = [
           { value: 'other-way', words: 'the other way' },
           { value: 'same-way', words: 'the same way' },
         ]),
-        when: ({ of }) => of === 'armature',
+        when: ({ readOn }) => readOn === 'armature',
       },
       {
         kind: 'text',

@@ -48,7 +48,7 @@ export const rotorCheckWorking = defineWorking({
     [/^timing\.stroke/, 'stroke'],
     [/^timing\.rodLength/, 'rod'],
     [/^timing/, 'advance'],
-    [/^rotationOf/, 'of'],
+    [/^rotationOf/, 'readOn'],
     [/^gearedRotor/, 'geared'],
   ],
   answer: (read, options) => {
@@ -57,7 +57,7 @@ export const rotorCheckWorking = defineWorking({
     const rotorSeenFrom = read.choice<'cap' | 'drive'>('rotorFrom');
     const typedCylinder = read.textIf('cylinder');
     const tolerance = read.numberIf('tolerance');
-    const of = read.choice<'rotor' | 'armature'>('of');
+    const of = read.choice<'rotor' | 'armature'>('readOn');
     const check = rotorCheck({
       cap,
       rotorAngle,

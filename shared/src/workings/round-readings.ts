@@ -16,7 +16,7 @@ import type { CaseReader } from './read-case.js';
 import { writeRows } from './rows.js';
 import type { AnswerPart, WorkingCase } from './working.js';
 
-const isShell = ({ of }: WorkingCase): boolean => of === 'shell';
+const isShell = ({ part }: WorkingCase): boolean => part === 'shell';
 
 /** Readings from the example's service manual: three heights on two axes. */
 const exampleRows = ['top', 'middle', 'bottom'].flatMap((height, i) => [
@@ -36,7 +36,7 @@ export const roundReadingsWorking = defineWorking({
       fields: [
         {
           kind: 'choice',
-          name: 'of',
+          name: 'part',
           label: 'It is',
           choices: [
             { value: 'bore', words: 'a bore' },
@@ -101,7 +101,7 @@ export const roundReadingsWorking = defineWorking({
   ],
   example: {
     typed: {
-      of: 'bore',
+      part: 'bore',
       readings: writeRows(exampleRows, roundColumns),
       ovalityLimit: '0.03 mm',
       taperLimit: '0.03 mm',
@@ -116,6 +116,7 @@ export const roundReadingsWorking = defineWorking({
     ...roundPaths('readings', 'readings'),
     ...limitPaths,
     [/^(ovalityLimit|taperLimit|splitAxis|judgedAxis)/, '$1'],
+    [/^of$/, 'part'],
   ],
   fromSpec: casesOfRounds,
   answer: (read, options): WorkedOut => {
@@ -141,7 +142,7 @@ export const roundReadingsWorking = defineWorking({
 });
 
 function requestOf(read: CaseReader): RoundReadingsRequest {
-  const of = read.choice<RoundReadingsRequest['of']>('of');
+  const of = read.choice<RoundReadingsRequest['of']>('part');
   const optional = {
     splitAxis: read.textIf('splitAxis'),
     judgedAxis: read.textIf('judgedAxis'),

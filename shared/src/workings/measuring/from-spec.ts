@@ -38,12 +38,12 @@ const roundPlaces: Partial<Record<MeasurementPlace, 'bore' | 'journal'>> = {
 /** A case for every bore, tunnel and journal of a spec: its limits, and its rows without readings. */
 export function casesOfRounds(document: SpecDocument): readonly NamedCase[] {
   return document.measurements.flatMap((measurement) => {
-    const of = roundPlaces[measurement.place];
-    if (of === undefined) return [];
+    const kind = roundPlaces[measurement.place];
+    if (kind === undefined) return [];
     return [...placesByPart(measurement.at)].map(([part, places]) => ({
       name: `${measurement.name}: ${part}`,
       typed: {
-        of,
+        part: kind,
         ...limitsTyped(measurement),
         readings: writeRows(places, roundColumns),
       },
