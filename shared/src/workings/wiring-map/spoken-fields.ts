@@ -3,6 +3,9 @@
 /** `45:C,135:D` as `45° to C, 135° to D`. */
 export const sayTrace = (text: string): string => sayPairs(text, (post, outlet) => `${post}° to ${outlet}`);
 
+/** `45:C,135:D` as `C at 45°, D at 135°`. */
+export const sayBeside = (text: string): string => sayPairs(text, (post, outlet) => `${outlet} at ${post}°`);
+
 /** `A:1,45:2` as `A to No. 1, 45° to No. 2`: an outlet is a letter, or the angle of its post. */
 export const sayFitted = (text: string): string =>
   sayPairs(

@@ -61,6 +61,7 @@ describe('the wiring map as a working', () => {
       trace: '45:C,135:D,225:A,315:B',
       valves: '16_56_51_21',
       fitted: 'A:1,45:2',
+      beside: '45:D,135:C',
       of: 'AT18, edition 2',
     };
     const text = workingText(wiringMapWorking, traced, at({}), british);
@@ -70,5 +71,6 @@ describe('the wiring map as a working', () => {
       'inlet opens 16° before TDC, inlet closes 56° after BDC, exhaust opens 51° before BDC',
     );
     expect(text).toContain('A to No. 1, 45° to No. 2');
+    expect(text).toContain('D at 45°, C at 135°');
   });
 });

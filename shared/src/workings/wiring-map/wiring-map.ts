@@ -15,7 +15,7 @@ import { formOfDocument } from './form-of-spec.js';
 import { companionWords, intervalWords, leadRows } from './map-words.js';
 import { fromQuery, toCase } from './query.js';
 import { spoken } from './spoken.js';
-import { sayAngles, sayFitted, sayTrace, sayValves, sayView } from './spoken-fields.js';
+import { sayAngles, sayBeside, sayFitted, sayTrace, sayValves, sayView } from './spoken-fields.js';
 import type { FormErrors, FormField } from './wiring-form.js';
 import { workOut, type WiringAnswer } from './work-out.js';
 
@@ -43,6 +43,7 @@ const sections: readonly FieldSection[] = [
       text('first', 'Post for the first cylinder', '', sayAngles),
       text('intervals', 'Intervals, degrees of crank'),
       text('trace', 'Cap traced, post to {outlet}', '', sayTrace),
+      text('beside', '{Outlets} beside posts', 'as the drawing letters them', sayBeside),
       text('advance', 'Static timing, degrees before TDC', '10', sayAngles),
       text('valves', 'Valve timing', '', sayValves),
     ],
