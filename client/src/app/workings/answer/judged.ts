@@ -19,6 +19,8 @@ export class Judged {
   readonly answer = input.required<WorkingAnswer>();
   /** Figures that stand beside the judgement. */
   readonly facts = input.required<readonly AnswerPart[]>();
+  /** The facts whose first is the answer itself. */
+  readonly main = input<AnswerPart | null>(null);
 
   protected readonly sign = judgementSign;
   protected readonly word = judgementWord;

@@ -114,9 +114,9 @@ export class WorkingDesk {
   );
   protected readonly sign = judgementSign;
   protected readonly word = judgementWord;
-  /** Where nothing is judged and nothing drawn, the first figure is the answer. */
+  /** Where nothing is judged, drawn or listed, the first figure is the answer. */
   protected readonly main = computed(() =>
-    this.judgement() === undefined && this.shapes().length === 0
+    this.judgement() === undefined && this.shapes().every(({ kind }) => kind === 'steps')
       ? (this.answer().parts.find(({ kind }) => kind === 'facts') ?? null)
       : null,
   );
