@@ -91,7 +91,8 @@ export function sideBySide(pages: Pages, left: Block, right: Block): void {
     blocks.forEach((block) => block(pages));
     return;
   }
-  pages.need(high);
+  // The space below the last line may fall away.
+  pages.need(high - 3);
   const top = pages.y;
   columns.forEach((column, index) => {
     pages.y = top;

@@ -13,7 +13,7 @@ const between = 14;
 /** Points below which one column is all that can be read. */
 const roomForTwo = 360;
 /** A fact higher than this beside another takes the whole width. */
-const highest = 34;
+const highest = 30;
 const shareOfName = 0.46;
 
 /** Names with their values, two side by side where there is room; a long one has the width to itself. */

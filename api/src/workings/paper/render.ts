@@ -8,6 +8,9 @@ import { drawCautions, drawJudgement } from './judgement.js';
 import { drawParts, heading, type Say } from './parts.js';
 import type { WorkingPaper } from './working-paper.js';
 
+/** Points that the first line stands closer to the title block than on a sheet of many pages. */
+const closer = 7;
+
 /**
  * A working as a PDF, on one page where it can be. Cautions stand under the judgement that they belong to.
  * Two renderings of the same are the same to the byte.
@@ -15,6 +18,7 @@ import type { WorkingPaper } from './working-paper.js';
 export async function renderWorking(working: WorkingPaper): Promise<Buffer> {
   const pages = new Pages(workingFrame(working));
   const say: Say = (text) => tradeText(text, working.dialect);
+  pages.y -= closer;
   if (working.begunFrom !== '') pages.paragraph(working.begunFrom, { font: 'text-strong', size: 13 });
   question(pages, say(working.asks), whoAndWhen(working));
   heading(pages, 'What was typed');
@@ -66,5 +70,5 @@ function grounds(pages: Pages, basis: readonly string[], assumed: readonly strin
 function lines(pages: Pages, head: string, texts: readonly string[]): void {
   if (texts.length === 0) return;
   heading(pages, head);
-  for (const text of texts) pages.paragraph(text, { size: 8.5 });
+  for (const text of texts) pages.paragraph(text, { size: 8 });
 }
