@@ -3,7 +3,8 @@ import { inject, Injectable } from '@angular/core';
 import type { CarSummary } from '@second-spanner/shared/contracts/car-files';
 import type { KeepWorkingRequest, KeptWorking } from '@second-spanner/shared/contracts/kept-workings';
 import type { WorkingCase } from '@second-spanner/shared/workings/working';
-import type { Observable } from 'rxjs';
+import { map, type Observable } from 'rxjs';
+import { namedFile, type NamedFile } from '../http/save-file';
 import { allPages } from '../list/all-pages';
 
 export type Paper = 'a4' | 'letter';
@@ -22,17 +23,15 @@ export class WorkingsApi {
   }
 
   /** A case as it stands on the page, on paper. */
-  pdf(working: string, typed: WorkingCase, paper: Paper): Observable<Blob> {
-    return this.http.get(`/api/workings/${working}/pdf`, {
-      params: { ...typed, paper },
-      responseType: 'blob',
-    });
+  pdf(working: string, typed: WorkingCase, paper: Paper): Observable<NamedFile> {
+    return this.file(`/api/workings/${working}/pdf`, { ...typed, paper });
   }
 
-  keptPdf({ carId, id }: KeptWorking, paper: Paper): Observable<Blob> {
-    return this.http.get(`/api/cars/${carId}/workings/${id}/pdf`, {
-      params: { paper },
-      responseType: 'blob',
-    });
+  keptPdf({ carId, id }: KeptWorking, paper: Paper): Observable<NamedFile> {
+    return this.file(`/api/cars/${carId}/workings/${id}/pdf`, { paper });
+  }
+
+  private file(address: string, params: Readonly<Record<string, string>>): Observable<NamedFile> {
+    return this.http.get(address, { params, responseType: 'blob', observe: 'response' }).pipe(map(namedFile));
   }
 }

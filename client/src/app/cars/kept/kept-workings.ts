@@ -43,6 +43,6 @@ export class KeptWorkings {
 
   protected async makePdf(kept: KeptWorking): Promise<void> {
     const pdf = await this.making.follow(this.api.keptPdf(kept, 'a4'));
-    if (pdf !== null) saveFile(this.document, pdf, `${kept.working}.pdf`);
+    if (pdf !== null) saveFile(this.document, pdf.file, pdf.name);
   }
 }

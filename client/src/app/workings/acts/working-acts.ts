@@ -74,6 +74,6 @@ export class WorkingActs {
 
   protected async makePdf(): Promise<void> {
     const pdf = await this.reading.follow(this.api.pdf(this.working(), this.typed(), this.paper()));
-    if (pdf !== null) saveFile(this.document, pdf, `${this.working()}.pdf`);
+    if (pdf !== null) saveFile(this.document, pdf.file, pdf.name);
   }
 }
