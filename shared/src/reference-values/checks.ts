@@ -2,10 +2,7 @@ import file from '../../../test-data/reference/reference-values.json' with { typ
 
 /** A figure, figures in their order, figures by name, or a sentence. */
 export type Expected =
-  | number
-  | string
-  | readonly number[]
-  | Readonly<Record<string, number | string | readonly number[]>>;
+  number | string | readonly number[] | Readonly<Record<string, number | string | readonly number[]>>;
 
 /** One value worked out, or only copied, from outside. */
 export interface Check {
