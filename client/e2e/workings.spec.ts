@@ -8,13 +8,28 @@ const placeOf = ({ group, key }: { group: string; key: string }): string => `/wo
 /** The wiring map has a page of its own, and its own tests. */
 const generic = workings.filter(({ key }) => key !== 'wiring-map');
 
-/** On the phone one of each group is looked over by axe: it is the same page, and the desk looks over all. */
+/** On the phone one of each group is looked over: it is the same page, and the desk looks over all at every width. */
 const firstOfGroup = new Set(
   generic
     .filter(({ group }, i) => generic.findIndex((one) => one.group === group) === i)
     .map(({ key }) => key),
 );
-const isPhone = (page: Page): boolean => (page.viewportSize()?.width ?? 0) < 600;
+
+/** At the foot of the page, once it grows no more, the way to the answer rests below the fields and hides none. */
+async function toTheFoot(page: Page): Promise<void> {
+  const moved = (): Promise<number> =>
+    page.evaluate(() => {
+      const before = scrollY;
+      scrollTo(0, document.body.scrollHeight);
+      return Math.abs(scrollY - before);
+    });
+  await expect.poll(moved).toBe(0);
+}
+
+async function sheetsOfPaper(page: Page): Promise<number> {
+  const pdf = (await page.pdf({ format: 'A4', preferCSSPageSize: true })).toString('latin1');
+  return pdf.match(/\/Type\s*\/Page\b/g)?.length ?? 0;
+}
 
 const errors = (page: Page): Locator => page.locator('.error:not(:empty)');
 const answer = (page: Page): Locator => page.locator('ss-judged, ss-answer-parts');
@@ -54,30 +69,18 @@ test.describe('every working', () => {
   });
 
   for (const working of generic) {
-    test(`${working.key}: its example is answered, readable by everybody, at every width`, async () => {
+    const where = firstOfGroup.has(working.key) ? '' : ' @desk';
+    test(`${working.key}: its example is answered, readable by everybody, at every width, on one page of paper${where}`, async () => {
       await page.goto(placeOf(working));
       await tryExample(page);
       await expect(errors(page)).toHaveCount(0);
       await expect(answer(page).first()).toBeVisible();
-      await expectAsWideAs(page, isPhone(page) ? [320, 360] : [960, 1440]);
-      if (isPhone(page) && !firstOfGroup.has(working.key)) return;
-      // At the foot of the page the way to the answer rests below the fields, and hides none of them.
-      await page.evaluate(() => scrollTo(0, document.body.scrollHeight));
+      await expectAsWideAs(page, [320, 360, 960, 1440]);
+      await toTheFoot(page);
       await expectNoAxeViolations(page);
+      expect(await sheetsOfPaper(page)).toBe(1);
     });
   }
-
-  test('each is printed on one A4 page @desk', async () => {
-    test.setTimeout(300_000);
-    const pages: Record<string, number> = {};
-    for (const working of generic) {
-      await page.goto(placeOf(working));
-      await tryExample(page);
-      const pdf = (await page.pdf({ format: 'A4', preferCSSPageSize: true })).toString('latin1');
-      pages[working.key] = pdf.match(/\/Type\s*\/Page\b/g)?.length ?? 0;
-    }
-    expect(pages).toEqual(Object.fromEntries(generic.map(({ key }) => [key, 1])));
-  });
 
   test('says what it waits for while nothing is typed, readable by everybody', async () => {
     await page.goto('/workings/convert/convert');
