@@ -11,6 +11,7 @@ import {
   type WorkingOptions,
 } from './working.js';
 import { lowerFirst } from './lower-first.js';
+import { judgementWord } from './judgement-words.js';
 import { readRows } from './rows.js';
 import { unitTaken } from './unit-taken.js';
 
@@ -104,17 +105,6 @@ export function workingText(
 
 const listed = (what: string, lines: readonly string[]): readonly string[] =>
   lines.map((line) => `${what}: ${line}`);
-
-/** The word that stands before a judgement's reason. */
-const judgementWord = ({ verdict, word, waits }: Extract<AnswerPart, { kind: 'judgement' }>): string =>
-  word ?? (waits === true ? 'Waiting' : verdictWords[verdict]);
-
-const verdictWords = {
-  pass: 'Pass',
-  fail: 'Fail',
-  doubtful: 'Doubtful',
-  'not-judged': 'Not judged',
-} as const;
 
 function partLines(part: AnswerPart): readonly string[] {
   switch (part.kind) {

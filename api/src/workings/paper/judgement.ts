@@ -1,19 +1,22 @@
 import { drawSign, signWords, type SignKind } from '@second-spanner/shared/drawing/signs';
-import type { AnswerPart } from '@second-spanner/shared/workings/working';
+import {
+  judgementSign,
+  judgementWord,
+  type JudgementPart,
+} from '@second-spanner/shared/workings/judgement-words';
 import { draw } from '../../paper/draw.js';
 import type { Pages } from '../../paper/page.js';
 
-type Judgement = Extract<AnswerPart, { kind: 'judgement' }>;
 type Say = (text: string) => string;
 
 const indent = 92;
 const size = 9.5;
 
 /** What came of it: sign, word and reason. */
-export function drawJudgement(pages: Pages, judged: Judgement, say: Say): void {
-  const sign = judged.waits ? 'waiting' : judged.verdict;
+export function drawJudgement(pages: Pages, judged: JudgementPart, say: Say): void {
   const about = judged.of === undefined ? [] : [say(judged.of)];
-  signed(pages, { sign, word: say(judged.word ?? signWords[sign]), about, lines: [say(judged.reason)] });
+  const [sign, word] = [judgementSign(judged), say(judgementWord(judged))];
+  signed(pages, { sign, word, about, lines: [say(judged.reason)] });
 }
 
 /** What is to be minded, with its sign. */

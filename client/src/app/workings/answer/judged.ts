@@ -1,11 +1,11 @@
 import { ChangeDetectionStrategy, Component, computed, input } from '@angular/core';
 import type { AnswerPart, WorkingAnswer } from '@second-spanner/shared/workings/working';
+import { judgementSign, judgementWord } from '@second-spanner/shared/workings/judgement-words';
 import { Sentence } from '../../quantity/sentence';
 import { CautionSign } from '../../sheets/step/caution-sign';
 import { VerdictLine } from '../../verdict/verdict';
 import { TradeWords } from '../../words/trade-words';
 import { AnswerParts } from './answer-parts';
-import { judgementSign, judgementWord } from './judgement-words';
 
 /** What is said of a case: each judgement, its cautions, and the figures beside it. */
 @Component({

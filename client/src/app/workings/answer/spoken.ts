@@ -2,9 +2,9 @@ import { ChangeDetectionStrategy, Component, computed, inject, input } from '@an
 import { toObservable, toSignal } from '@angular/core/rxjs-interop';
 import { tradeText } from '@second-spanner/shared/contracts/trade-words';
 import type { WorkingAnswer } from '@second-spanner/shared/workings/working';
+import { judgementWord } from '@second-spanner/shared/workings/judgement-words';
 import { debounceTime, skip } from 'rxjs';
 import { SessionStore } from '../../session/session-store';
-import { judgementWord } from './judgement-words';
 
 /** How long nothing was typed before the answer is read out: not at every key. */
 const pause = 900;

@@ -10,6 +10,7 @@ import {
 } from '@angular/core';
 import { RouterLink } from '@angular/router';
 import { tradeText } from '@second-spanner/shared/contracts/trade-words';
+import { judgementSign, judgementWord } from '@second-spanner/shared/workings/judgement-words';
 import { typedLines, workingText } from '@second-spanner/shared/workings/working-text';
 import { begunFrom, type Working, type WorkingCase } from '@second-spanner/shared/workings/working';
 import { Cell } from '../../layout/cell';
@@ -23,7 +24,6 @@ import { WorkingActs } from '../acts/working-acts';
 import { AnswerParts } from '../answer/answer-parts';
 import { Grounds } from '../answer/grounds';
 import { Judged } from '../answer/judged';
-import { judgementSign, judgementWord } from '../answer/judgement-words';
 import { NotYet } from '../answer/not-yet';
 import { Spoken } from '../answer/spoken';
 import { caseAddress } from '../case-address';
@@ -151,19 +151,15 @@ export class WorkingDesk {
     this.show({ ...this.typed(), [name]: text });
   }
 
-  protected begin(typed: WorkingCase): void {
-    this.show(typed);
+  protected show(typed: WorkingCase): void {
+    this.opened.set(typed);
+    this.address.write(typed);
   }
 
   protected goToAnswer(): void {
     const answer = this.host.nativeElement.querySelector<HTMLElement>('.judged, .middle');
     answer?.scrollIntoView({ block: 'start' });
     answer?.focus({ preventScroll: true });
-  }
-
-  private show(typed: WorkingCase): void {
-    this.opened.set(typed);
-    this.address.write(typed);
   }
 
   private say(text: string): string {
